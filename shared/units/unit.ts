@@ -1,0 +1,33 @@
+/** Units a value is computed in. People read lengths, speeds and rates in millimetres or inches. */
+export const UNIT_NAMES = [
+  'mm',
+  'mm/rev',
+  'mm/min',
+  'mm/s',
+  'mm2',
+  'mm3',
+  'mm3/min',
+  'mm3/s',
+  'm/s',
+  'm/min',
+  'rpm',
+  'Hz',
+  'deg',
+  'N',
+  'N/mm',
+  'N/mm2',
+  'W',
+  'J/mm3',
+  'kg',
+  'kg/m3',
+  's',
+  'min',
+  '%',
+  'ct',
+  'div',
+  'passes',
+  'K',
+  '1',
+] as const;
+
+export type UnitName = (typeof UNIT_NAMES)[number];
