@@ -50,7 +50,7 @@ const RECALLED = 'Recalled, text not seen';
 type Extra = Pick<Source, 'edition' | 'note'>;
 
 /** One reference; `extra` holds edition and note. */
-function cite<M extends SourceMark>(mark: M, title: string, place: string, extra?: Extra): Source {
+function cite(mark: SourceMark, title: string, place: string, extra?: Extra): Source {
   return { title, place, mark, ...extra };
 }
 
@@ -72,11 +72,6 @@ const LAWS = {
   'japan-36': cite('law', JAPAN, 'art. 36, training'),
   'japan-118': cite('law', JAPAN, 'art. 118, trial run'),
   'dguv-100-500': cite('law', 'DGUV Regel 100-500 (Germany)', 'ch. 2.25 s. 3.1.2, worn wheels'),
-  'dguv-209-002': cite(
-    'law',
-    'DGUV Information 209-002 (Germany)',
-    'expiry of resin-bonded wheels',
-  ),
   'bgv-d12-12': cite('law', 'BGV D12, Schleif- und Bürstwerkzeuge (Germany)', 's. 12, trial run'),
   'osha-letter-2009-10-08': cite(
     'law',
@@ -111,6 +106,11 @@ const HANDBOOKS = {
   }),
   'tc9-524-5': cite('handbook', ARMY_TC, 'ch. 5, grinding on the lathe'),
   'tc9-524-7': cite('handbook', ARMY_TC, 'ch. 7, truing and dressing'),
+  'dguv-209-002': cite(
+    'handbook',
+    'DGUV Information 209-002 (Germany)',
+    'resin-bonded wheels: expiry',
+  ),
   ccohs: cite('handbook', 'Canadian Centre for Occupational Health and Safety', 'grinding wheels'),
   'modern-grinding-dressing': cite('handbook', MODERN_GRINDING, 'Dresser overlays'),
   'trade-association-coolant': cite('handbook', "Abrasive makers' association list", 'coolant'),
