@@ -1,0 +1,2 @@
+/** Stored with every plan; raised whenever the same inputs may give another answer. */
+export const RULES_VERSION = '1.0.0';
