@@ -1,0 +1,99 @@
+import { sql } from 'drizzle-orm';
+import {
+  check,
+  date,
+  foreignKey,
+  index,
+  integer,
+  jsonb,
+  pgTable,
+  primaryKey,
+  text,
+  uuid,
+} from 'drizzle-orm/pg-core';
+
+import { TEXT_LIMITS } from '@/shared/domain/limits';
+import { OPERATIONS, SETUP_STATES, VERDICTS, type SetupInputs } from '@/shared/domain/setups';
+
+import {
+  createdAt,
+  creationDigest,
+  oneOf,
+  shopId,
+  shopPolicy,
+  textUpTo,
+  updatedAt,
+  version,
+} from './columns';
+import { grinders, lathes, quills } from './machines';
+import { memberships, shops } from './people';
+import { wheels } from './wheels';
+
+export const setups = pgTable(
+  'setups',
+  {
+    shopId: shopId(),
+    id: uuid('id').notNull(),
+    name: text('name').notNull(),
+    operation: text('operation', { enum: OPERATIONS }).notNull(),
+    state: text('state', { enum: SETUP_STATES }).notNull().default('draft'),
+    inputs: jsonb('inputs').$type<SetupInputs>().notNull(),
+    typed: jsonb('typed').$type<Record<string, string>>().notNull(),
+    latheId: uuid('lathe_id'),
+    grinderId: uuid('grinder_id'),
+    quillId: uuid('quill_id'),
+    wheelId: uuid('wheel_id'),
+    plan: jsonb('plan').notNull(),
+    verdict: text('verdict', { enum: VERDICTS }).notNull(),
+    verdictCount: integer('verdict_count').notNull(),
+    rulesVersion: text('rules_version').notNull(),
+    /** The shop's date the plan was computed for: expiry is judged against it. */
+    plannedOn: date('planned_on', { mode: 'string' }).notNull(),
+    updatedBy: uuid('updated_by').notNull(),
+    creationDigest: creationDigest(),
+    version: version(),
+    createdAt: createdAt(),
+    updatedAt: updatedAt(),
+  },
+  (t) => [
+    primaryKey({ name: 'setups_pkey', columns: [t.shopId, t.id] }),
+    index('setups_latest').on(t.shopId, t.updatedAt.desc(), t.id.desc()),
+    index('setups_lathe').on(t.shopId, t.latheId),
+    index('setups_grinder').on(t.shopId, t.grinderId),
+    index('setups_wheel').on(t.shopId, t.wheelId),
+    foreignKey({ name: 'setups_shop', columns: [t.shopId], foreignColumns: [shops.id] }),
+    foreignKey({
+      name: 'setups_lathe',
+      columns: [t.shopId, t.latheId],
+      foreignColumns: [lathes.shopId, lathes.id],
+    }),
+    foreignKey({
+      name: 'setups_grinder',
+      columns: [t.shopId, t.grinderId],
+      foreignColumns: [grinders.shopId, grinders.id],
+    }),
+    foreignKey({
+      name: 'setups_quill',
+      columns: [t.shopId, t.grinderId, t.quillId],
+      foreignColumns: [quills.shopId, quills.grinderId, quills.id],
+    }),
+    foreignKey({
+      name: 'setups_wheel',
+      columns: [t.shopId, t.wheelId],
+      foreignColumns: [wheels.shopId, wheels.id],
+    }),
+    foreignKey({
+      name: 'setups_updated_by',
+      columns: [t.shopId, t.updatedBy],
+      foreignColumns: [memberships.shopId, memberships.personId],
+    }),
+    check('setups_name_length', textUpTo(t.name, TEXT_LIMITS.name)),
+    check('setups_operation', oneOf(t.operation, OPERATIONS)),
+    check('setups_state', oneOf(t.state, SETUP_STATES)),
+    check('setups_verdict', oneOf(t.verdict, VERDICTS)),
+    check('setups_verdict_count', sql`${t.verdictCount} >= 0`),
+    check('setups_quill_of_grinder', sql`${t.quillId} is null or ${t.grinderId} is not null`),
+    check('setups_inputs_operation', sql`${t.inputs} ->> 'operation' = ${t.operation}`),
+    shopPolicy('setups'),
+  ],
+);
