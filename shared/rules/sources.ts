@@ -94,6 +94,9 @@ const STANDARDS = {
   'iso-1101': cite('standard', 'ISO 1101, Geometrical tolerancing', 'circular run-out'),
   'iso-12181': cite('standard', 'ISO 12181, Roundness', 'least-squares circle'),
   'iso-3089': cite('standard', 'ISO 3089, Self-centring manual chucks', 'test torque'),
+  'nist-sp-811': cite('standard', 'NIST Special Publication 811', 'app. B, conversion factors', {
+    note: 'The inch is 25.4 mm exactly, the foot 0.3048 m, the pound 0.45359237 kg.',
+  }),
   'us-ordnance-od-1645': cite('standard', 'US Army Ordnance OD 1645', 'p. 32, scroll chucks'),
 } satisfies Record<string, Source>;
 
