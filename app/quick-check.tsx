@@ -1,0 +1,1 @@
+export { QuickCheckScreen as default } from '@/features/quick-check/quick-check-screen';

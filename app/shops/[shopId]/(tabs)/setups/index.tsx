@@ -1,0 +1,1 @@
+export { SetupsScreen as default } from '@/features/setups/setups-screen';

@@ -1,0 +1,1 @@
+export { GrinderScreen as default } from '@/features/machines/grinder-screen';

@@ -1,0 +1,1 @@
+export { GrinderNewScreen as default } from '@/features/machines/grinder-new-screen';

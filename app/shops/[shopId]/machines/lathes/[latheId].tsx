@@ -1,0 +1,1 @@
+export { LatheScreen as default } from '@/features/machines/lathe-screen';

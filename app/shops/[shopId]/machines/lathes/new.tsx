@@ -1,0 +1,1 @@
+export { LatheNewScreen as default } from '@/features/machines/lathe-new-screen';

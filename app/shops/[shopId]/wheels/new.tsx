@@ -1,0 +1,1 @@
+export { WheelNewScreen as default } from '@/features/wheels/wheel-new-screen';

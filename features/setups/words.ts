@@ -1,0 +1,73 @@
+import type { Material } from '@/shared/domain/materials';
+import type { Holding, Operation, PassStrokes, Preload, SetupPart } from '@/shared/domain/setups';
+import type { LookResult, MarkingPlace, RingResult } from '@/shared/domain/wheels';
+
+export const OPERATION_WORDS: Record<Operation, string> = {
+  jaws: 'Chuck jaws',
+  bore: 'Bore',
+  outside: 'Outside cylinder',
+};
+
+/** The name a setup starts with. */
+export const OPERATION_NAMES: Record<Operation, string> = {
+  jaws: 'True the jaws',
+  bore: 'Grind a bore',
+  outside: 'Grind a shaft',
+};
+
+export const PART_WORDS: Record<SetupPart, string> = {
+  work: 'Work',
+  machine: 'Machine',
+  wheel: 'Wheel',
+  cut: 'Cut',
+  dress: 'Dress',
+};
+
+export const MATERIAL_WORDS: Record<Material, string> = {
+  'plain-carbon-annealed': 'Plain carbon steel, soft',
+  'plain-carbon-hardened': 'Plain carbon steel, hardened',
+  'alloy-annealed': 'Alloy steel, soft',
+  'alloy-hardened': 'Alloy steel, hardened',
+  'tool-annealed': 'Tool steel, soft',
+  'tool-hardened': 'Tool steel, hardened',
+  'cast-iron': 'Cast iron',
+  stainless: 'Stainless steel',
+  'copper-alloy': 'Brass, bronze, copper',
+  'aluminium-alloy': 'Aluminium alloy',
+};
+
+export const HOLDING_WORDS: Record<Holding, string> = {
+  chuck: 'Chuck alone',
+  'chuck and centre': 'Chuck and tailstock centre',
+  centres: 'Between centres',
+  'chuck and steady': 'Chuck and steady',
+};
+
+export const PRELOAD_WORDS: Record<Preload, string> = {
+  ring: 'Ring gripped outside the pads',
+  plug: 'Plug behind the pads',
+  spider: 'Spider between the jaws',
+};
+
+export const STROKE_WORDS: Record<PassStrokes, string> = {
+  'one stroke': 'One stroke',
+  'both strokes': 'There and back',
+};
+
+export const LOOK_WORDS: Record<LookResult, string> = {
+  sound: 'Looked at, no fault seen',
+  damaged: 'Damaged',
+};
+
+export const RING_WORDS: Record<RingResult, string> = {
+  clear: 'Rings clear',
+  dull: 'Dull',
+  silent: 'Does not ring',
+};
+
+export const MARKING_PLACE_WORDS: Record<MarkingPlace, string> = {
+  wheel: 'on the wheel',
+  blotter: 'on the blotter',
+  box: 'on the box',
+  tag: 'on a tag',
+};

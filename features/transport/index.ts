@@ -1,0 +1,6 @@
+export { newId } from './ids';
+export { isRefusal, ProblemError, problemOf, problemWords, type Problem } from './problem';
+export { createQueryClient } from './query-client';
+export { request, requestNothing } from './request';
+export { STALE } from './stale';
+export { readStored, removeStored, writeStored } from './device-storage';
