@@ -118,6 +118,8 @@ export interface JawContact {
 
 export interface JawPlan {
   contacts: JawContact[];
+  /** Across the outermost path of the wheel when the first pad is touched. */
+  firstContactDiameterMm: number;
   /** Infeed from first contact until every pad is clean, on radius. */
   cleanUp: Figure;
   eccentricityMm: number;
