@@ -6,6 +6,7 @@ import { fileURLToPath } from 'node:url';
 
 import { Cluster, clusterHome, commandLine } from './local/cluster.mjs';
 import { findPrograms, installPrograms } from './local/programs.mjs';
+import { Trouble } from './local/trouble.mjs';
 
 const SELF = fileURLToPath(import.meta.url);
 const LOCAL = path.resolve(path.dirname(SELF), '../.local');
@@ -34,7 +35,7 @@ export async function openCluster(kind) {
     process.stdout.write(`${line}\n`);
   }
   await close();
-  throw new Error('The database did not start; the reason stands above.');
+  throw new Trouble('The database did not start; the reason stands above.');
 }
 
 /** The process that holds the main cluster, or null. */
@@ -66,7 +67,7 @@ async function guard(kind) {
 
 function mainCluster() {
   const holder = clusterHolder();
-  if (holder) throw new Error(`The database is in use already, by process ${holder}.`);
+  if (holder) throw new Trouble(`The database is in use already, by process ${holder}.`);
   fs.writeFileSync(lockFile(), String(process.pid));
   return new Cluster({ local: LOCAL, name: 'pg', durable: true });
 }
@@ -118,7 +119,7 @@ async function main([command, kind]) {
 
 if (process.argv[1] === SELF) {
   main(process.argv.slice(2)).catch((error) => {
-    process.stderr.write(`${error.message}\n`);
+    process.stderr.write(`${error instanceof Trouble ? error.message : error.stack}\n`);
     process.exit(1);
   });
 }

@@ -5,6 +5,7 @@ import net from 'node:net';
 import path from 'node:path';
 
 import { findPrograms, isRoot } from './programs.mjs';
+import { Trouble } from './trouble.mjs';
 
 const SERVER_ACCOUNT = 'postgres';
 const SUPERUSER = 'postgres';
@@ -31,7 +32,7 @@ export class Cluster {
   /** Makes the cluster where there is none, starts it, and answers with its superuser's address. */
   async start() {
     if (!this.programs) {
-      throw new Error(
+      throw new Trouble(
         `The database in ${this.folder} needs PostgreSQL ${this.made}, which is not installed. ` +
           `Install it (apt-get install postgresql-${this.made}) or move that folder away to begin anew.`,
       );
@@ -96,7 +97,7 @@ export class Cluster {
         return port;
       } catch (error) {
         if (tries < TRIES && this.#logTail().includes('Address already in use')) continue;
-        throw new Error(`PostgreSQL did not start:\n${this.#logTail()}`, { cause: error });
+        throw new Trouble(`PostgreSQL did not start:\n${this.#logTail()}`, { cause: error });
       }
     }
   }
@@ -141,7 +142,7 @@ export function clusterHome(local, account = isRoot ? serverAccount() : null) {
   fs.mkdirSync(elsewhere, { recursive: true, mode: 0o755 });
   const found = fs.lstatSync(elsewhere);
   if (!found.isDirectory() || found.uid !== 0) {
-    throw new Error(`${elsewhere} is in the way: it is not root's folder. Remove it.`);
+    throw new Trouble(`${elsewhere} is in the way: it is not root's folder. Remove it.`);
   }
   return elsewhere;
 }
@@ -156,7 +157,7 @@ function read(file) {
     return fs.readFileSync(file, 'utf8').trim();
   } catch (error) {
     if (error.code !== 'EACCES') return null;
-    throw new Error(
+    throw new Trouble(
       `${file} belongs to another user. Start as that user, or move its folder away to begin anew.`,
       { cause: error },
     );

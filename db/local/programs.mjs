@@ -2,6 +2,8 @@ import { execFileSync, spawnSync } from 'node:child_process';
 import fs from 'node:fs';
 import path from 'node:path';
 
+import { Trouble } from './trouble.mjs';
+
 const DEBIAN = '/usr/lib/postgresql';
 const BY_HAND = 'apt-get update && apt-get install --no-install-recommends postgresql';
 
@@ -35,13 +37,15 @@ export function findPrograms(local, major = null) {
 /** Installs PostgreSQL from Debian's packages: on the machine as root, beside the project otherwise. */
 export function installPrograms(local, say) {
   if (!programOnPath('apt-get')) {
-    throw new Error('PostgreSQL is not installed. Install its server (15 or newer) and try again.');
+    throw new Trouble(
+      'PostgreSQL is not installed. Install its server (15 or newer) and try again.',
+    );
   }
   try {
     if (isRoot) installOnMachine(say);
     else unpackBeside(path.join(local, 'postgresql'), path.join(local, 'apt'), say);
   } catch (error) {
-    throw new Error(`PostgreSQL could not be installed. As root: ${BY_HAND}`, { cause: error });
+    throw new Trouble(`PostgreSQL could not be installed. As root: ${BY_HAND}`, { cause: error });
   }
 }
 
