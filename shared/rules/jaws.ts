@@ -95,7 +95,7 @@ function acrossPad(chuck: JawChuck, angleDeg: number, zMm: number): PadReach {
   const radiusMm = chuck.boreMm / 2;
   const { aMm, bMm } = offsetAt(chuck.offset, zMm);
   const lastRadiusMm = (chuck.lastGroundMm ?? chuck.boreMm) / 2;
-  const bow = (radiusMm ** 2 / 2) * (1 / radiusMm - 1 / lastRadiusMm);
+  const bow = (radiusMm ** 2 / 2) * (1 / lastRadiusMm - 1 / radiusMm);
   const middle = toRadians(angleDeg);
   const half = Math.asin(chuck.padWidthMm / chuck.boreMm);
 
@@ -127,8 +127,11 @@ function turningPoints(slope: (angle: number) => number, half: number): number[]
 }
 
 function contacts(angles: number[], reaches: PadReach[], first: number): JawContact[] {
-  const ranked = reaches.map(({ firstMm }, jaw) => ({ firstMm, jaw }));
-  ranked.sort((one, other) => one.firstMm - other.firstMm || one.jaw - other.jaw);
+  const ranked = reaches.map(({ firstMm }, jaw) => ({
+    nanometres: Math.round(firstMm * 1e6),
+    jaw,
+  }));
+  ranked.sort((one, other) => one.nanometres - other.nanometres || one.jaw - other.jaw);
   return reaches.map(({ firstMm, lastMm }, jaw) => ({
     jaw: jaw + 1,
     angleDeg: angles[jaw] ?? 0,

@@ -187,7 +187,19 @@ export interface Plan {
   passes: Pass[];
   cutFraction: { rough: Figure; finish: Figure };
   dressing: { rough: DressStage; finish: DressStage; diamond: Figure } | null;
-  quill: { stiffness: Figure; stiffnessAtWheel: Figure; lag: Figure; firstFrequency: Figure; taper: Figure };
-  power: { removalRate: Figure; tangentialForce: Figure; normalForce: Figure; power: Figure; burnThreshold: Figure };
+  quill: {
+    stiffness: Figure;
+    stiffnessAtWheel: Figure;
+    lag: Figure;
+    firstFrequency: Figure;
+    taper: Figure;
+  };
+  power: {
+    removalRate: Figure;
+    tangentialForce: Figure;
+    normalForce: Figure;
+    power: Figure;
+    burnThreshold: Figure;
+  };
   time: { grinding: Figure; dressing: Figure; total: Figure };
 }

@@ -1,0 +1,74 @@
+import type { StageCutPlan } from './cut-plan';
+import { figure, stated, term } from './figures';
+import { steadyLag } from './spring';
+import type { Figure } from './types';
+
+const CAP_WORDS: Record<StageCutPlan['by'], string> = {
+  table: 'most in the table, or where interrupted work starts',
+  shop: "the shop's largest",
+  stock: 'a third of the stock to rough off',
+  burn: 'under the burning threshold when dry',
+  lag: 'within the spring allowed',
+  power: "within the motor's power",
+  dial: 'what the dial can set',
+  typed: 'as chosen',
+};
+
+/** A figure that nothing is known about yet. */
+export function unknown(unit: Figure['unit'], meaning: string): Figure {
+  return stated(meaning, [null, unit]);
+}
+
+/** The infeed of a stage as it will be set, with every cap that it stays under. */
+export function infeedFigure(stage: StageCutPlan | null): Figure {
+  if (stage === null) return unknown('mm', 'infeed on radius');
+  const { setting, wantedMm, by, typed, caps } = stage;
+  const terms = typed
+    ? [term('a', CAP_WORDS.typed, [wantedMm, 'mm'])]
+    : [
+        ...caps.map((cap) => term(`a_${cap.by}`, CAP_WORDS[cap.by], [cap.valueMm, 'mm'])),
+        ...(caps.some((cap) => cap.by === by)
+          ? []
+          : [term(`a_${by}`, CAP_WORDS[by], [wantedMm, 'mm'])]),
+      ];
+  return figure({
+    unit: 'mm',
+    formula: typed ? '{a}' : `the least of ${terms.map(({ symbol }) => `{${symbol}}`).join(', ')}`,
+    source: typed ? 'entered' : by === 'table' ? 'mh31-1318' : 'practice-dial',
+    terms,
+    compute: () => setting.infeedMm,
+    note: 'On radius, rounded down to what the dial can set.',
+  });
+}
+
+/** Traverse of a stage per work revolution, from the aim to the feed that is there. */
+export function traverseFigure(stage: StageCutPlan | null, aim: Figure, typed: boolean): Figure {
+  if (stage === null) return unknown('mm/rev', 'traverse per work revolution');
+  if (typed) return stated('traverse, chosen', [stage.traverseMm, 'mm/rev']);
+  return figure({
+    unit: 'mm/rev',
+    formula: stage.byHand ? '{s}' : "the lathe's largest feed up to {s}",
+    source: aim.working.source,
+    terms: [term('s', 'traverse aimed at', [aim.value, 'mm/rev'])],
+    compute: () => stage.traverseMm,
+    note:
+      aim.value !== null && stage.traverseMm < aim.value / 1.5
+        ? 'Cut below the share of the wheel before the infeed is.'
+        : 'A share of the wheel, for each turn of the work.',
+  });
+}
+
+/** What stays as spring between even passes of a stage. */
+export function lagFigure(stage: StageCutPlan | null): Figure {
+  return figure({
+    unit: 'mm',
+    formula: '{a} (1 - {K}) / {K}',
+    source: 'derived-spring',
+    terms: [
+      term('a', 'infeed', [stage?.setting.infeedMm ?? null, 'mm']),
+      term('K', 'cut fraction', [stage?.fraction.value ?? null, '1']),
+    ],
+    compute: steadyLag,
+    note: 'In the steady state each pass takes the whole infeed; only the first ones take less.',
+  });
+}

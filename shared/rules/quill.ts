@@ -1,0 +1,149 @@
+import type { QuillData, QuillMaterial, QuillSegment } from '../domain/machines';
+import { assumedTerm, figure, stated, term } from './figures';
+import type { Figure } from './types';
+
+/** Young's modulus in N/mm2 and density in kg/m3. */
+export const QUILL_MATERIAL: Record<QuillMaterial, { modulus: number; density: number }> = {
+  steel: { modulus: 206_000, density: 7850 },
+  carbide: { modulus: 600_000, density: 14_900 },
+};
+
+const WHEEL_DENSITY = 2200;
+/** Rayleigh's share of a cantilever's own mass that moves with its tip. */
+const MOVING_SHARE = 33 / 140;
+
+interface Bending {
+  deflectionMmPerN: number;
+  slopePerN: number;
+  massKg: number;
+}
+
+/** Deflection, slope at the wheel and mass, for a unit force at the wheel end. */
+function bending(quill: Pick<QuillData, 'segments' | 'material'>): Bending | null {
+  const { modulus, density } = QUILL_MATERIAL[quill.material];
+  let from = 0;
+  const sum = { deflectionMmPerN: 0, slopePerN: 0, massKg: 0 };
+  for (const { lengthMm, diameterMm } of quill.segments) {
+    const to = from + lengthMm;
+    const secondMoment = (Math.PI * diameterMm ** 4) / 64;
+    sum.deflectionMmPerN += (to ** 3 - from ** 3) / (3 * modulus * secondMoment);
+    sum.slopePerN += (to ** 2 - from ** 2) / (2 * modulus * secondMoment);
+    sum.massKg += ((Math.PI * diameterMm ** 2) / 4) * lengthMm * density * 1e-9;
+    from = to;
+  }
+  return from > 0 && sum.deflectionMmPerN > 0 ? sum : null;
+}
+
+/** Length of a quill from the wheel end to the bearing, mm. */
+export function quillLength(segments: readonly QuillSegment[]): number {
+  return segments.reduce((sum, { lengthMm }) => sum + lengthMm, 0);
+}
+
+/**
+ * How stiff a quill is at the wheel, clamped at its bearing; the measured value takes the computed one's place.
+ *
+ * @param quill - segments from the wheel end, mm, material, and the measured stiffness, N/mm.
+ * @returns stiffness, N/mm, unrounded; optimistic where computed, since the bearing gives way too.
+ * @source derived-beam
+ * @example quillStiffness(steppedQuill).value // 100 N bend it 0.0188926 mm: 5293 N/mm
+ */
+export function quillStiffness(quill: QuillData | null): Figure {
+  if (quill !== null && quill.measuredStiffnessNPerMm !== null)
+    return stated('stiffness as measured', [quill.measuredStiffnessNPerMm, 'N/mm']);
+  const bent = quill === null ? null : bending(quill);
+  const modulus = quill === null ? null : QUILL_MATERIAL[quill.material].modulus;
+  const plain = quill !== null && quill.segments.length === 1 ? quill.segments[0] : undefined;
+  return figure({
+    unit: 'N/mm',
+    formula:
+      plain === undefined
+        ? '{k} = 3 {E} / Σ ((x_i³ - x_(i-1)³) / I_i)'
+        : '{k} = 3 {E} π {d}⁴ / (64 {L}³)',
+    source: 'derived-beam',
+    terms: [
+      assumedTerm('E', "Young's modulus of the quill", [modulus, 'N/mm2']),
+      ...(plain === undefined
+        ? []
+        : [
+            term('d', 'quill diameter', [plain.diameterMm, 'mm']),
+            term('L', 'length to the bearing', [plain.lengthMm, 'mm']),
+          ]),
+    ],
+    compute: () => (bent === null ? null : 1 / bent.deflectionMmPerN),
+    note: 'Clamped at the bearing, so optimistic: the bearing and the post give way too.',
+  });
+}
+
+/** Mass of a wheel, kg, from its sizes and an assumed density. */
+export function wheelMassKg(wheel: {
+  diameterNowMm: number;
+  widthMm: number;
+  holeMm: number;
+}): number {
+  const area = (Math.PI * (wheel.diameterNowMm ** 2 - wheel.holeMm ** 2)) / 4;
+  return Math.max(area * wheel.widthMm * WHEEL_DENSITY * 1e-9, 0);
+}
+
+/**
+ * The first bending frequency of a quill with its wheel; the measured value takes the computed one's place.
+ *
+ * @param quill - segments, material, and the measured frequency, Hz.
+ * @param wheelKg - mass of wheel and nut, kg, 0 or more.
+ * @returns frequency, Hz, unrounded; null while quill or wheel is unknown.
+ * @source derived-beam
+ * @example firstFrequency(quill, 1).value // 31.3 Hz for 200 mm of 10 mm steel without mass of its own
+ */
+export function firstFrequency(quill: QuillData | null, wheelKg: number | null): Figure {
+  if (quill !== null && quill.measuredFrequencyHz !== null)
+    return stated('first bending frequency as measured', [quill.measuredFrequencyHz, 'Hz']);
+  const bent = quill === null ? null : bending(quill);
+  return figure({
+    unit: 'Hz',
+    formula: '{f_1} = √({k} · 1000 / ({m} + (33/140) {m_b})) / (2π)',
+    source: 'derived-beam',
+    terms: [
+      term('k', 'stiffness of the quill', [
+        bent === null ? null : 1 / bent.deflectionMmPerN,
+        'N/mm',
+      ]),
+      assumedTerm('m', 'mass of the wheel', [wheelKg, 'kg']),
+      assumedTerm('m_b', 'mass of the quill', [bent?.massKg ?? null, 'kg']),
+    ],
+    compute: (stiffness, wheel, own) =>
+      Math.sqrt((stiffness * 1000) / (wheel + MOVING_SHARE * own)) / (2 * Math.PI),
+    note: 'Clamped at the bearing; in its bearings a quill reaches 0.65 to 0.79 of this.',
+  });
+}
+
+/**
+ * The taper that a bent quill grinds across the width of its wheel.
+ *
+ * @param quill - segments and material; null while not chosen.
+ * @param forceN - normal force at the wheel, N.
+ * @param widthMm - width of the wheel, mm.
+ * @returns difference of radius across the wheel, mm: 1.5 times the quill's own bend times width over length
+ * for a plain quill.
+ * @source derived-beam
+ * @example quillTaper(plainQuill, 10, 12).value
+ */
+export function quillTaper(
+  quill: QuillData | null,
+  forceN: number | null,
+  widthMm: number | null,
+): Figure {
+  const bent = quill === null ? null : bending(quill);
+  return figure({
+    unit: 'mm',
+    formula: '{F_n} {s} {T}',
+    source: 'derived-beam',
+    terms: [
+      term('F_n', 'normal force, finishing', [forceN, 'N']),
+      term('s', 'slope of the quill at the wheel for each newton, radians', [
+        bent?.slopePerN ?? null,
+        '1',
+      ]),
+      term('T', 'wheel width', [widthMm, 'mm']),
+    ],
+    compute: (force, slope, width) => force * slope * width,
+  });
+}
