@@ -159,7 +159,7 @@ module.exports = {
       {
         from: {
           path: '^api/',
-          pathNot: ['-repository\\.ts$', '^api/(composition|main)\\.ts$', LAUNCHER],
+          pathNot: ['-(repository|mapping)\\.ts$', '^api/(composition|main)\\.ts$', LAUNCHER],
         },
         to: { path: ['^db/', 'node_modules/(@types/)?(drizzle-orm|pg)/'] },
       },
@@ -207,7 +207,7 @@ module.exports = {
   ],
   required: [
     demand('routes-validate', 'A routes file parses what it is sent with a contract.', {
-      module: { path: '^api/.+-routes\\.ts$' },
+      module: { path: '^api/.+-routes\\.ts$', pathNot: '^api/http/' },
       to: { path: '^shared/contracts/' },
     }),
     demand('services-check-roles', 'A service asks who may do a thing before it does it.', {

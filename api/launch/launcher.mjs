@@ -75,15 +75,23 @@ class Launcher {
     return { child, ended, stop };
   }
 
-  /** Runs a program to its end; what it says is kept in .local/logs and shown only when it fails. */
-  async run(command, { name, trouble, env = {} }) {
+  /**
+   * Runs a program to its end and answers with what it wrote. Complaints are kept in .local/logs, and
+   * shown only when it fails.
+   */
+  async run(command, { name, trouble, env }) {
     const log = path.join(LOCAL, 'logs', `${name}.log`);
     fs.mkdirSync(path.dirname(log), { recursive: true });
     const file = fs.openSync(log, 'w');
-    const { ended } = this.start(command, { env, stdio: ['ignore', file, file] });
+    const { child, ended } = this.start(command, { env, stdio: ['ignore', 'pipe', file] });
+    let answer = '';
+    child.stdout.setEncoding('utf8').on('data', (text) => {
+      answer += text;
+    });
     const code = await ended;
+    fs.writeSync(file, answer);
     fs.closeSync(file);
-    if (code === 0 || this.ending) return;
+    if (code === 0 || this.ending) return answer;
     const tail = fs.readFileSync(log, 'utf8').trimEnd().split('\n').slice(-TAIL_LINES).join('\n');
     throw new Trouble(`${tail}\n\n${trouble} (all of it: ${path.relative(ROOT, log)})`);
   }

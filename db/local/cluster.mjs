@@ -4,7 +4,8 @@ import fs from 'node:fs';
 import net from 'node:net';
 import path from 'node:path';
 
-import { findPrograms, isRoot } from './programs.mjs';
+import { isRoot } from './debian.mjs';
+import { findPrograms } from './programs.mjs';
 import { Trouble } from './trouble.mjs';
 
 const SERVER_ACCOUNT = 'postgres';

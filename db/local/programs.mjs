@@ -2,12 +2,11 @@ import { execFileSync, spawnSync } from 'node:child_process';
 import fs from 'node:fs';
 import path from 'node:path';
 
+import { installPackage, isRoot, programOnPath, run } from './debian.mjs';
 import { Trouble } from './trouble.mjs';
 
 const DEBIAN = '/usr/lib/postgresql';
-const BY_HAND = 'apt-get update && apt-get install --no-install-recommends postgresql';
-
-export const isRoot = process.getuid?.() === 0;
+const PURPOSE = 'The database';
 
 /**
  * Where PostgreSQL's server programs are, or null.
@@ -36,33 +35,31 @@ export function findPrograms(local, major = null) {
 
 /** Installs PostgreSQL from Debian's packages: on the machine as root, beside the project otherwise. */
 export function installPrograms(local, say) {
-  if (!programOnPath('apt-get')) {
-    throw new Trouble(
-      'PostgreSQL is not installed. Install its server (15 or newer) and try again.',
-    );
+  if (isRoot) {
+    refuseMainCluster();
+    installPackage('postgresql', PURPOSE, say);
+    return;
   }
   try {
-    if (isRoot) installOnMachine(say);
-    else unpackBeside(path.join(local, 'postgresql'), path.join(local, 'apt'), say);
+    unpackBeside(path.join(local, 'postgresql'), path.join(local, 'apt'), say);
   } catch (error) {
-    throw new Trouble(`PostgreSQL could not be installed. As root: ${BY_HAND}`, { cause: error });
+    process.stderr.write(`${error.message}\n`);
+    installPackage('postgresql', PURPOSE, say);
   }
 }
 
-function installOnMachine(say) {
-  say('Installing PostgreSQL from Debian’s packages');
-  // The package would otherwise start a cluster of its own that nobody asked for.
+/** Debian's package would otherwise start a cluster of its own that nobody asked for. */
+function refuseMainCluster() {
   const folder = '/etc/postgresql-common/createcluster.d';
   fs.mkdirSync(folder, { recursive: true });
   fs.writeFileSync(path.join(folder, 'ringtrue.conf'), 'create_main_cluster = false\n');
-  const env = { ...process.env, DEBIAN_FRONTEND: 'noninteractive' };
-  run('apt-get', ['update', '-qq'], { env });
-  run('apt-get', ['install', '-y', '-qq', '--no-install-recommends', 'postgresql'], { env });
 }
 
 /** Without root: what `apt-get install` would install is downloaded and unpacked into `target`. */
 function unpackBeside(target, apt, say) {
+  if (!programOnPath('apt-get')) throw new Trouble('This is not a Debian machine.');
   say('Unpacking PostgreSQL from Debian’s packages into .local');
+  fs.rmSync(apt, { recursive: true, force: true });
   const folders = ['lists/partial', 'archives/partial', 'debs'].map((name) => path.join(apt, name));
   for (const folder of folders) fs.mkdirSync(folder, { recursive: true });
   const options = [
@@ -84,24 +81,6 @@ function unpackBeside(target, apt, say) {
   for (const deb of fs.readdirSync(debs)) run('dpkg', ['-x', path.join(debs, deb), half]);
   fs.rmSync(apt, { recursive: true });
   fs.renameSync(half, target);
-}
-
-function run(program, args, options = {}) {
-  const { status, error } = spawnSync(program, args, {
-    ...options,
-    stdio: ['ignore', 'ignore', 'inherit'],
-  });
-  if (error) throw error;
-  if (status !== 0) throw new Error(`${program} ended with ${status}`);
-}
-
-/** Programs found on the PATH, followed through links to where their siblings are. */
-export function programOnPath(name) {
-  for (const folder of (process.env.PATH ?? '').split(path.delimiter)) {
-    const file = path.join(folder, name);
-    if (folder && fs.existsSync(file)) return fs.realpathSync(file);
-  }
-  return null;
 }
 
 function versionOf(initdb) {
