@@ -95,7 +95,7 @@ function acrossPad(chuck: JawChuck, angleDeg: number, zMm: number): PadReach {
   const radiusMm = chuck.boreMm / 2;
   const { aMm, bMm } = offsetAt(chuck.offset, zMm);
   const lastRadiusMm = (chuck.lastGroundMm ?? chuck.boreMm) / 2;
-  const bow = (radiusMm ** 2 / 2) * (1 / lastRadiusMm - 1 / radiusMm);
+  const bow = (radiusMm ** 2 / 2) * (1 / radiusMm - 1 / lastRadiusMm);
   const middle = toRadians(angleDeg);
   const half = Math.asin(chuck.padWidthMm / chuck.boreMm);
 
