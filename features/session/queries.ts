@@ -1,10 +1,6 @@
 import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
 
-import {
-  session,
-  type SignInRequest,
-  type SignUpRequest,
-} from '@/shared/contracts/session';
+import { session, type SignInRequest, type SignUpRequest } from '@/shared/contracts/session';
 import { shop } from '@/shared/contracts/shops';
 import { request, requestNothing, STALE } from '@/features/transport';
 

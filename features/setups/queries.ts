@@ -27,9 +27,13 @@ export const setupQueries = {
       queryKey: [...setupQueries.all(shopId), 'list', filter],
       queryFn: ({ signal, pageParam }) => {
         const given = Object.entries({ ...filter, after: pageParam }).filter(([, value]) => value);
-        return request(setupPage, `${at(shopId)}?${new URLSearchParams(Object.fromEntries(given))}`, {
-          signal,
-        });
+        return request(
+          setupPage,
+          `${at(shopId)}?${new URLSearchParams(Object.fromEntries(given))}`,
+          {
+            signal,
+          },
+        );
       },
       initialPageParam: '',
       getNextPageParam: (last) => last.next,

@@ -20,78 +20,99 @@ interface AutosaveOptions {
   shopId: string;
   setupId: string;
   values: SetupValues;
-  /** The version that the values stand on; null for a setup that the server has not seen. */
+  /** The version that the values stand on at first; null for a setup that the server has not seen. */
   version: number | null;
   /** When the server last stored it, ISO. */
   savedAt: string | null;
-  /** False while the name is missing. */
+  /** True when the first values hold more than the server has. */
+  unsent: boolean;
+  /** The server's newer version, when the first values stand on an older one. */
+  theirs: Setup | null;
+  /** False while the values cannot be stored: a name is missing. */
   valid: boolean;
-  onSaved: (saved: Setup, values: SetupValues) => void;
+}
+
+function firstState({ theirs, unsent, savedAt }: AutosaveOptions): SaveState {
+  if (theirs) return { kind: 'conflict', theirs };
+  return unsent || savedAt === null ? { kind: 'waiting' } : { kind: 'saved', at: savedAt };
 }
 
 /**
  * Sends a draft to the server whenever typing pauses, one request at a time, and again while the server cannot be
- * reached. Stops at a conflict until the person has chosen.
+ * reached. A conflict stops it until the person has chosen.
  */
 export function useAutosave(options: AutosaveOptions) {
-  const { values, valid, savedAt } = options;
-  const save = useSaveSetup(options.shopId);
-  const version = useRef(options.version);
-  const stored = useRef(options.version === null ? null : options.values);
-  const latest = useRef(options);
-  latest.current = options;
+  const { shopId, setupId, values, valid } = options;
+  const { mutateAsync } = useSaveSetup(shopId);
+  const [state, setState] = useState(() => firstState(options));
+  const [version, setVersion] = useState(options.version);
+  /** The values that the server holds; Formik makes new objects at each change. */
+  const stored = useRef(options.unsent ? null : values);
   const inFlight = useRef(false);
-  const [state, setState] = useState<SaveState>(
-    savedAt ? { kind: 'saved', at: savedAt } : { kind: 'waiting' },
-  );
 
   const send = useCallback(async () => {
-    const { setupId, values: sent, onSaved } = latest.current;
-    if (inFlight.current || stored.current === sent) return;
+    if (inFlight.current) return;
     inFlight.current = true;
     setState({ kind: 'saving' });
     try {
-      const body = toRequest(sent);
-      const saved = await save.mutateAsync({
+      const body = toRequest(values);
+      const saved = await mutateAsync({
         id: setupId,
-        body: version.current === null ? { id: setupId, ...body } : { version: version.current, ...body },
+        body: version === null ? { id: setupId, ...body } : { version, ...body },
       });
-      version.current = saved.version;
-      stored.current = sent;
-      onSaved(saved, sent);
-      setState(
-        latest.current.values === sent ? { kind: 'saved', at: saved.updatedAt } : { kind: 'waiting' },
-      );
+      stored.current = values;
+      setVersion(saved.version);
+      setState({ kind: 'saved', at: saved.updatedAt });
     } catch (error) {
       const theirs = currentOf(error);
-      setState(theirs ? { kind: 'conflict', theirs } : { kind: 'failed', problem: problemOf(error) });
+      setState(
+        theirs ? { kind: 'conflict', theirs } : { kind: 'failed', problem: problemOf(error) },
+      );
     } finally {
       inFlight.current = false;
     }
-  }, [save]);
+  }, [mutateAsync, setupId, values, version]);
 
   useEffect(() => {
-    if (stored.current === values || !valid || state.kind === 'conflict' || state.kind === 'saving')
+    if (
+      isStored(stored.current, values) ||
+      !valid ||
+      state.kind === 'conflict' ||
+      state.kind === 'saving'
+    )
       return;
-    const pause = state.kind === 'failed' ? RETRY_MS : PAUSE_MS;
-    const timer = setTimeout(() => void send(), pause);
+    if (state.kind === 'saved') setState({ kind: 'waiting' });
+    const timer = setTimeout(() => void send(), state.kind === 'failed' ? RETRY_MS : PAUSE_MS);
     return () => clearTimeout(timer);
-  }, [values, valid, state, send]);
+  }, [values, valid, state.kind, send]);
 
-  /** After a conflict: go on from the server's version, with the person's own values or with theirs. */
-  const resolve = useCallback((theirs: Setup, keep: SetupValues | null) => {
-    version.current = theirs.version;
-    if (keep === null) stored.current = latest.current.values;
-    setState(keep === null ? { kind: 'saved', at: theirs.updatedAt } : { kind: 'waiting' });
+  /** After a conflict: the person's values go on top of the server's version. */
+  const keepMine = useCallback((theirs: Setup) => {
+    setVersion(theirs.version);
+    setState({ kind: 'waiting' });
   }, []);
 
-  return { state, saveNow: send, resolve };
+  /** After a conflict: the server's values replace the person's. */
+  const take = useCallback((theirs: Setup, taken: SetupValues) => {
+    stored.current = taken;
+    setVersion(theirs.version);
+    setState({ kind: 'saved', at: theirs.updatedAt });
+  }, []);
+
+  return { state, version, saveNow: send, keepMine, take };
+}
+
+/** Shown in other units, the same inputs need no saving. */
+function isStored(stored: SetupValues | null, values: SetupValues): boolean {
+  if (stored === null || stored.name !== values.name || stored.inputs !== values.inputs)
+    return false;
+  return stored.texts === values.texts || stored.units !== values.units;
 }
 
 function currentOf(error: unknown): Setup | null {
   if (!isRefusal(error, 'stale-version')) return null;
   const problem = problemOf(error);
-  const parsed =
-    problem.kind === 'refused' ? setupContract.safeParse(problem.details.current) : undefined;
-  return parsed?.success ? parsed.data : null;
+  if (problem.kind !== 'refused') return null;
+  const parsed = setupContract.safeParse(problem.details.current);
+  return parsed.success ? parsed.data : null;
 }

@@ -1,0 +1,1 @@
+export { machineQueries } from './queries';

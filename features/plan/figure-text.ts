@@ -1,0 +1,96 @@
+import type { UnitSystem } from '@/shared/domain/people';
+import type { Figure, Quantity } from '@/shared/rules';
+import { SOURCES, type SourceId } from '@/shared/rules/sources';
+import { displayUnit, ENTRY_UNITS } from '@/shared/units/entry-units';
+import { formatQuantity, type FormatOptions } from '@/shared/units/format';
+
+/** A figure's number as shown beside its unit; null while something it needs is missing. */
+export function figureNumber(
+  figure: Figure,
+  units: UnitSystem,
+  options: FormatOptions = {},
+): string | null {
+  if (figure.value === null) return null;
+  return formatQuantity({ value: figure.value, unit: figure.unit }, units, {
+    ...options,
+    withUnit: false,
+  });
+}
+
+export const figureUnit = (figure: Figure, units: UnitSystem): string =>
+  ENTRY_UNITS[displayUnit(figure.unit, units)].label;
+
+/** Number and unit, for sentences. */
+export function figureText(figure: Figure, units: UnitSystem, options: FormatOptions = {}): string {
+  if (figure.value === null) return '–';
+  return formatQuantity({ value: figure.value, unit: figure.unit }, units, options);
+}
+
+/** How findings write their quantities. */
+export const quantityText =
+  (units: UnitSystem) =>
+  (quantity: Quantity): string =>
+    formatQuantity(quantity, units);
+
+/** Small values, such as a cutting fraction, keep three figures that count. */
+function metricDigits(value: number): FormatOptions {
+  const size = Math.abs(value);
+  if (size === 0 || size >= 1) return {};
+  return { digits: Math.min(9, 2 - Math.floor(Math.log10(size))) };
+}
+
+const metric = (value: number, unit: Quantity['unit']) =>
+  formatQuantity({ value, unit }, 'mm', { ...metricDigits(value), withUnit: false });
+
+/**
+ * A figure's working as the sheet shows it. Formulas hold for metric values, so they stand in the lines; a reader
+ * of inches finds theirs beside the meaning.
+ */
+export function workingProps(figure: Figure, units: UnitSystem, options: FormatOptions = {}) {
+  const { formula, terms, source, note } = figure.working;
+  const own = (value: number | null, unit: Quantity['unit']) =>
+    units === 'inch' && value !== null && displayUnit(unit, 'inch') !== unit
+      ? `, ${formatQuantity({ value, unit }, 'inch')}`
+      : '';
+  const shown = figureText(figure, 'mm', options);
+  const { title, place, mark } = sourceWords(source);
+  return {
+    formula,
+    terms: terms.map((term) => ({
+      symbol: term.symbol,
+      meaning: `${term.meaning}${own(term.value, term.unit)}`,
+      value: term.value === null ? null : metric(term.value, term.unit),
+      unit: ENTRY_UNITS[term.unit].label,
+      ...(term.assumed ? { assumed: true } : {}),
+    })),
+    result: figure.value === null ? null : `${shown}${own(figure.value, figure.unit)}`,
+    ...(figure.band
+      ? {
+          band: `The range of the values behind it gives ${formatQuantity(
+            { value: figure.band.low, unit: figure.unit },
+            units,
+            { withUnit: false },
+          )} to ${formatQuantity({ value: figure.band.high, unit: figure.unit }, units)}.`,
+        }
+      : {}),
+    ...(note ? { note } : {}),
+    source: [title, place].filter(Boolean).join(', '),
+    mark,
+  };
+}
+
+export function sourceWords(id: SourceId): { title: string; place: string; mark: string } {
+  const { title, place, mark } = SOURCES[id];
+  return { title, place, mark: MARK_WORDS[mark] };
+}
+
+const MARK_WORDS = {
+  law: 'Law',
+  standard: 'Standard',
+  handbook: 'Handbook',
+  textbook: 'Textbook',
+  derived: 'Derived from first principles, checked numerically',
+  'common practice': 'Common practice, no source',
+  entered: 'As entered',
+  memory: 'Recalled from memory, text not seen; your shop can set its own value',
+} as const;

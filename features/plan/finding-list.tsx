@@ -1,0 +1,29 @@
+import { findingWords, type Finding } from '@/shared/rules';
+import { FindingCard } from '@/features/ui/finding-card';
+
+import { quantityText, sourceWords } from './figure-text';
+import { useReader } from './reader';
+
+interface FindingListProps {
+  findings: readonly Finding[];
+  /** Names the source under each finding. */
+  sourced?: boolean;
+}
+
+/** Findings in words: what is known, why it matters, what to do next. */
+export function FindingList({ findings, sourced = false }: FindingListProps) {
+  const { units } = useReader();
+  return findings.map((finding, index) => {
+    const { title, remedy } = findingWords(finding, quantityText(units));
+    const { title: source, place, mark } = sourceWords(finding.source);
+    return (
+      <FindingCard
+        key={`${finding.code}-${index}`}
+        level={finding.level}
+        {...(sourced ? { source: `${[source, place].filter(Boolean).join(', ')}. ${mark}.` } : {})}
+      >
+        {`${title} ${remedy}`}
+      </FindingCard>
+    );
+  });
+}

@@ -1,0 +1,56 @@
+import { Stack } from '@/features/ui/card';
+import { Field } from '@/features/ui/field';
+import { Select } from '@/features/ui/select';
+import { TEXT_LIMITS } from '@/shared/domain/limits';
+import { MARKING_PLACES } from '@/shared/domain/wheels';
+
+import { usePlanner } from '../planner-context';
+import { MARKING_PLACE_WORDS } from '../words';
+import { PlannerQuantity, QuantityRow } from './planner-fields';
+
+/** A wheel for this setup alone, as its marking reads. */
+export function TypedWheelFields() {
+  const { values, plan, setInput } = usePlanner();
+  const { typed } = values.inputs.wheel;
+  if (!typed) return null;
+  const fills = plan.findings.some(({ code }) => code === 'wheel-fills-bore');
+  return (
+    <Stack>
+      <Field
+        name="wheel.typed.marking"
+        label="Marking"
+        hint="As printed: abrasive, grain, grade, structure, bond."
+        value={typed.marking ?? ''}
+        onChangeText={(text) => setInput('wheel.typed.marking', text === '' ? null : text)}
+        maxLength={TEXT_LIMITS.marking}
+      />
+      <QuantityRow>
+        <PlannerQuantity
+          path="wheel.typed.diameterNewMm"
+          {...(fills
+            ? { error: 'The wheel is as wide as the bore, or wider: it cannot go in.' }
+            : {})}
+        />
+        <PlannerQuantity path="wheel.typed.diameterNowMm" remark="optional" />
+      </QuantityRow>
+      <QuantityRow>
+        <PlannerQuantity path="wheel.typed.widthMm" />
+        <PlannerQuantity path="wheel.typed.holeMm" />
+      </QuantityRow>
+      <QuantityRow>
+        <PlannerQuantity path="wheel.typed.markedRpm" />
+        <PlannerQuantity path="wheel.typed.markedSpeedMPerS" />
+      </QuantityRow>
+      <Select
+        name="wheel.typed.markingReadOn"
+        label="Where the speed was read"
+        options={MARKING_PLACES.map((place) => ({
+          value: place,
+          label: MARKING_PLACE_WORDS[place],
+        }))}
+        value={typed.markingReadOn}
+        onChange={(next) => setInput('wheel.typed.markingReadOn', next)}
+      />
+    </Stack>
+  );
+}

@@ -1,0 +1,1 @@
+export { wheelQueries } from './queries';
