@@ -23,6 +23,8 @@ import { planWorkSpeed, workSpeedFindings } from './work-speed';
 export { assemblePlanInput, emptySetupInputs, typedWheelData, type Found } from './assemble';
 export { CAUTIONS, type CautionId } from './cautions';
 export { FINDINGS, findingWords, type FindingCode } from './findings';
+export { orderOfWork, type WorkStep } from './order-of-work';
+export { quickCheck, type QuickCheck, type QuickCheckInput } from './quick-check';
 export type * from './types';
 export type { PlanInput } from '../domain/setups';
 export { RULES_VERSION } from './version';
