@@ -13,7 +13,13 @@ import {
 } from 'drizzle-orm/pg-core';
 
 import { TEXT_LIMITS } from '@/shared/domain/limits';
-import { OPERATIONS, SETUP_STATES, VERDICTS, type SetupInputs } from '@/shared/domain/setups';
+import {
+  OPERATIONS,
+  SETUP_STATES,
+  VERDICTS,
+  type SetupInputs,
+  type Verdict,
+} from '@/shared/domain/setups';
 
 import {
   createdAt,
@@ -29,6 +35,13 @@ import { grinders, lathes, quills } from './machines';
 import { memberships, shops } from './people';
 import { wheels } from './wheels';
 
+/** The plan whole, as the rules made it. */
+interface PlanRecord {
+  rulesVersion: string;
+  verdict: Verdict;
+  [part: string]: unknown;
+}
+
 export const setups = pgTable(
   'setups',
   {
@@ -43,7 +56,7 @@ export const setups = pgTable(
     grinderId: uuid('grinder_id'),
     quillId: uuid('quill_id'),
     wheelId: uuid('wheel_id'),
-    plan: jsonb('plan').notNull(),
+    plan: jsonb('plan').$type<PlanRecord>().notNull(),
     verdict: text('verdict', { enum: VERDICTS }).notNull(),
     verdictCount: integer('verdict_count').notNull(),
     rulesVersion: text('rules_version').notNull(),

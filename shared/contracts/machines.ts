@@ -41,6 +41,23 @@ const latheFields = {
 
 export const latheData = z.strictObject(latheFields) satisfies z.ZodType<LatheData>;
 
+/** No two with the same id, or the same name in whatever case. */
+const distinct = (items: readonly { id: string; name: string }[], context: z.RefinementCtx) => {
+  for (const key of ['id', 'name'] as const) {
+    const seen = new Set<string>();
+    items.forEach((item, index) => {
+      const value = item[key].toLowerCase();
+      if (seen.has(value))
+        context.addIssue({
+          code: 'custom',
+          path: [index, key],
+          message: `This ${key} is used twice.`,
+        });
+      seen.add(value);
+    });
+  }
+};
+
 const measuredSpeed = z.strictObject({
   rpm: within(LIMITS.spindleRpm),
   measuredOn: isoDate,
@@ -60,7 +77,7 @@ const grinderFields = {
   motorNoLoadRpm: within(LIMITS.motorRpm),
   motorPowerW: within(LIMITS.motorPowerW),
   spindleMaximumRpm: within(LIMITS.spindleRpm).nullable(),
-  beltSteps: z.array(beltStep).min(1).max(20),
+  beltSteps: z.array(beltStep).min(1).max(20).superRefine(distinct),
   guard: z.enum(GUARDS),
   postStiffnessNPerMm: within(LIMITS.stiffnessNPerMm).nullable(),
   wheelRotation: z.enum(ROTATIONS).nullable(),
@@ -97,7 +114,10 @@ const grinderBody = {
   data: grinderData,
   typed: typedTexts,
   /** All quills and arbors of the grinder; one left out is retired. */
-  quills: z.array(z.strictObject({ id, name, data: quillData })).max(30),
+  quills: z
+    .array(z.strictObject({ id, name, data: quillData }))
+    .max(30)
+    .superRefine(distinct),
 };
 
 export const createLatheRequest = z.strictObject({ id, ...latheBody });

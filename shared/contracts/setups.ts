@@ -143,6 +143,8 @@ export const setupQuery = z.strictObject({
 /** A copy under a new id and name, with the inputs as they stand. */
 export const duplicateSetupRequest = z.strictObject({ id, name });
 
+export const retireSetupRequest = z.strictObject({ version: expectedVersion });
+
 export type Setup = z.infer<typeof setup>;
 export type SetupSummary = z.infer<typeof setupSummary>;
 export type SetupPage = z.infer<typeof setupPage>;

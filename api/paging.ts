@@ -1,0 +1,43 @@
+import { Refusal } from './refusals';
+
+/** The last row's sort key as the client carries it back. */
+export const cursorOf = (...key: string[]): string =>
+  Buffer.from(JSON.stringify(key)).toString('base64url');
+
+/**
+ * The sort key in a cursor.
+ *
+ * @param shape - one pattern for each part of the key
+ */
+export function keyOf(cursor: string, ...shape: RegExp[]): string[] {
+  const parts = decode(cursor);
+  if (parts.length !== shape.length || !shape.every((part, index) => part.test(parts[index] ?? '')))
+    throw new Refusal('invalid-query', {
+      errors: [{ path: 'after', message: 'This is not the place where a page ended.' }],
+    });
+  return parts;
+}
+
+function decode(cursor: string): string[] {
+  try {
+    const parts: unknown = JSON.parse(Buffer.from(cursor, 'base64url').toString());
+    return Array.isArray(parts) ? parts.map(String) : [];
+  } catch {
+    return [];
+  }
+}
+
+/** Of one row more than the page holds: the page, and where the next one starts. */
+export function pageOf<Row, Item>(
+  rows: Row[],
+  limit: number,
+  { item, key }: { item: (row: Row) => Item; key: (row: Row) => string[] },
+): { items: Item[]; next: string | null } {
+  const kept = rows.slice(0, limit);
+  const last = kept.at(-1);
+  const hasMore = rows.length > limit && last !== undefined;
+  return { items: kept.map(item), next: hasMore ? cursorOf(...key(last)) : null };
+}
+
+/** A pattern for ILIKE that finds the text anywhere, whatever signs it holds. */
+export const containing = (text: string) => `%${text.replace(/[\\%_]/g, '\\$&')}%`;

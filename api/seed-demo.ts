@@ -1,0 +1,67 @@
+import { createGrinderRequest, createLatheRequest } from '@/shared/contracts/machines';
+import { signUpRequest } from '@/shared/contracts/session';
+import { createSetupRequest } from '@/shared/contracts/setups';
+import { createWheelRequest } from '@/shared/contracts/wheels';
+import type { GrinderData, LatheData, QuillData } from '@/shared/domain/machines';
+import type { Role, UnitSystem } from '@/shared/domain/people';
+import type { SetupInputs } from '@/shared/domain/setups';
+import type { WheelData } from '@/shared/domain/wheels';
+
+import type { Server } from './composition';
+
+interface DemoPerson {
+  id: string;
+  name: string;
+  email: string;
+  role: Role;
+}
+
+interface Named<T> {
+  id: string;
+  name: string;
+  data: T;
+}
+
+export interface DemoShop {
+  id: string;
+  name: string;
+  units: UnitSystem;
+  timeZone: string;
+  /** Of everybody in it: it is public. */
+  password: string;
+  lead: DemoPerson;
+  others: readonly DemoPerson[];
+  lathes: readonly Named<LatheData>[];
+  grinders: readonly (Named<GrinderData> & { quills: readonly Named<QuillData>[] })[];
+  wheels: readonly { id: string; tag: string; data: WheelData }[];
+  setups: readonly { id: string; name: string; inputs: SetupInputs }[];
+}
+
+/** Puts the demo shop in, the way its people would: what is there already stays as it is. */
+export async function seedDemo(services: Server['services'], demo: DemoShop): Promise<void> {
+  const { lead, password } = demo;
+  const caller = { personId: lead.id, shopId: demo.id };
+  await services.accounts.signUp(
+    signUpRequest.parse({
+      personId: lead.id,
+      shopId: demo.id,
+      name: lead.name,
+      email: lead.email,
+      password,
+      shopName: demo.name,
+      units: demo.units,
+      timeZone: demo.timeZone,
+    }),
+  );
+  for (const person of demo.others)
+    await services.accounts.join({ ...person, shopId: demo.id, password });
+  const typed = {};
+  for (const lathe of demo.lathes)
+    await services.lathes.create(caller, createLatheRequest.parse({ ...lathe, typed }));
+  for (const grinder of demo.grinders)
+    await services.grinders.create(caller, createGrinderRequest.parse({ ...grinder, typed }));
+  for (const wheel of demo.wheels)
+    await services.wheels.create(caller, createWheelRequest.parse({ ...wheel, typed }));
+  for (const setup of demo.setups)
+    await services.setups.create(caller, createSetupRequest.parse({ ...setup, typed }));
+}

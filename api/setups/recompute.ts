@@ -1,0 +1,42 @@
+import { RULES_VERSION } from '@/shared/rules';
+
+import type { ShopScope } from '../shop-scope';
+import { existing } from '../stored-items';
+import { dateIn, planFor } from './planning';
+import type { Draft, DraftFilter } from './setups-repository';
+
+/** Makes the plans of the shop's drafts anew after something they rest on has changed. */
+export type Recompute = (scope: ShopScope, which: DraftFilter | 'all') => Promise<void>;
+
+/** Drafts whose plan was made on another day, or by an older version of the rules. */
+export type RefreshOutdated = (scope: ShopScope) => Promise<void>;
+
+export const recomputeDrafts =
+  (now: () => Date): Recompute =>
+  async (scope, which) =>
+    replan(scope, await scope.setups.lockDrafts(which === 'all' ? {} : which), now());
+
+export const refreshOutdated =
+  (now: () => Date): RefreshOutdated =>
+  async (scope) => {
+    const { timeZone } = await existing(scope.shop.find());
+    const current = { rulesVersion: RULES_VERSION, today: dateIn(timeZone, now()) };
+    await replan(scope, await scope.setups.lockOutdatedDrafts(current), now());
+  };
+
+async function replan(scope: ShopScope, drafts: Draft[], now: Date): Promise<void> {
+  if (drafts.length === 0) return;
+  const shop = await existing(scope.shop.find());
+  for (const { id, inputs, verdict } of drafts) {
+    const stored = await planFor(inputs, { scope, shop, now });
+    await scope.setups.storePlan(id, stored);
+    if (stored.plan.verdict !== verdict)
+      await scope.audit.record({
+        action: 'recompute',
+        subject: 'setup',
+        subjectId: id,
+        before: { verdict },
+        after: { verdict: stored.plan.verdict, rulesVersion: stored.plan.rulesVersion },
+      });
+  }
+}
