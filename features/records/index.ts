@@ -1,0 +1,31 @@
+export { SearchField, useAddressPart } from './address-search';
+export { ChoiceField, knownOrNull, UNKNOWN } from './choice-field';
+export { DateField, dateText, readDate } from './date-field';
+export { FormFold } from './form-fold';
+export { LoadProblem, MorePages } from './more-pages';
+export { Facts, keyPart, NOT_GIVEN, rowParts, type Part } from './parts';
+export { RecordForm, type RecordValues, type Stored } from './record-form';
+export { dayWords, shopDay, whenWords } from './shop-time';
+export {
+  collectTexts,
+  EMPTY_ENTRY,
+  EntryField,
+  entryInUnits,
+  entryRules,
+  mapEntries,
+  recallTexts,
+  storedEntry,
+  typedEntry,
+  type Entries,
+  type EntryChange,
+  type TypedEntry,
+} from './typed-entry';
+export {
+  EMPTY_LIST,
+  ListField,
+  listInUnits,
+  listRule,
+  listWords,
+  storedList,
+  type TypedList,
+} from './typed-list';
