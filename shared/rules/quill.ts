@@ -12,18 +12,29 @@ const WHEEL_DENSITY = 2200;
 /** Rayleigh's share of a cantilever's own mass that moves with its tip. */
 const MOVING_SHARE = 33 / 140;
 
-interface Bending {
+/** How a quill answers a unit force at its wheel end, and what it weighs. */
+export interface Bending {
   deflectionMmPerN: number;
   slopePerN: number;
   massKg: number;
 }
 
-/** Deflection, slope at the wheel and mass, for a unit force at the wheel end. */
-function bending(quill: Pick<QuillData, 'segments' | 'material'>): Bending | null {
-  const { modulus, density } = QUILL_MATERIAL[quill.material];
+/**
+ * Bending of a stepped cantilever, clamped at the far end of its last segment.
+ *
+ * @param segments - length and diameter of each segment from the wheel end, mm.
+ * @param material - Young's modulus, N/mm2, and density, kg/m3.
+ * @returns deflection and slope for one newton at the wheel, and mass; null without any length.
+ * @source derived-beam
+ * @example bendingOf([{ lengthMm: 30, diameterMm: 10 }, { lengthMm: 50, diameterMm: 20 }], QUILL_MATERIAL.steel)?.deflectionMmPerN // 0.000188926
+ */
+export function bendingOf(
+  segments: readonly QuillSegment[],
+  { modulus, density }: { modulus: number; density: number },
+): Bending | null {
   let from = 0;
   const sum = { deflectionMmPerN: 0, slopePerN: 0, massKg: 0 };
-  for (const { lengthMm, diameterMm } of quill.segments) {
+  for (const { lengthMm, diameterMm } of segments) {
     const to = from + lengthMm;
     const secondMoment = (Math.PI * diameterMm ** 4) / 64;
     sum.deflectionMmPerN += (to ** 3 - from ** 3) / (3 * modulus * secondMoment);
@@ -32,6 +43,24 @@ function bending(quill: Pick<QuillData, 'segments' | 'material'>): Bending | nul
     from = to;
   }
   return from > 0 && sum.deflectionMmPerN > 0 ? sum : null;
+}
+
+/**
+ * First bending frequency of a cantilever with a mass at its end.
+ *
+ * @param stiffnessNPerMm - stiffness at the end, N/mm, over 0.
+ * @param tipKg - mass at the end, kg.
+ * @param ownKg - mass of the cantilever, kg; 33/140 of it moves with the end.
+ * @returns frequency, Hz, unrounded.
+ * @source derived-beam
+ * @example tipMassFrequency(38.656, 1, 0) // 31.29 Hz
+ */
+export function tipMassFrequency(stiffnessNPerMm: number, tipKg: number, ownKg: number): number {
+  return Math.sqrt((stiffnessNPerMm * 1000) / (tipKg + MOVING_SHARE * ownKg)) / (2 * Math.PI);
+}
+
+function bending(quill: Pick<QuillData, 'segments' | 'material'>): Bending | null {
+  return bendingOf(quill.segments, QUILL_MATERIAL[quill.material]);
 }
 
 /** Length of a quill from the wheel end to the bearing, mm. */
@@ -109,8 +138,7 @@ export function firstFrequency(quill: QuillData | null, wheelKg: number | null):
       assumedTerm('m', 'mass of the wheel', [wheelKg, 'kg']),
       assumedTerm('m_b', 'mass of the quill', [bent?.massKg ?? null, 'kg']),
     ],
-    compute: (stiffness, wheel, own) =>
-      Math.sqrt((stiffness * 1000) / (wheel + MOVING_SHARE * own)) / (2 * Math.PI),
+    compute: tipMassFrequency,
     note: 'Clamped at the bearing; in its bearings a quill reaches 0.65 to 0.79 of this.',
   });
 }
