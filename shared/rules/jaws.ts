@@ -144,7 +144,7 @@ function contacts(angles: number[], reaches: PadReach[], first: number): JawCont
 function cleanUp(radius: { first: number; last: number }, lastGroundMm: number | null): Figure {
   return figure({
     unit: 'mm',
-    formula: '{Δr} = {r_last} − {r_first}',
+    formula: '{Δr} = {r_last} - {r_first}',
     source: 'derived-jaw-contact',
     terms: [
       term('r_last', 'path of the wheel at which the last pad is clean', [radius.last, 'mm']),

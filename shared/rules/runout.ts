@@ -110,7 +110,7 @@ function runOut(readings: readonly Reading[]): Figure {
   const values = readings.map(({ readingMm }) => readingMm);
   return figure({
     unit: 'mm',
-    formula: '{TIR} = {h} − {l}',
+    formula: '{TIR} = {h} - {l}',
     source: 'iso-1101',
     terms: [
       term('h', 'highest reading', [Math.max(...values), 'mm']),
@@ -124,7 +124,7 @@ function outOfRound(residualsMm: readonly number[]): Figure {
   const enough = residualsMm.length > FITTED_VALUES;
   return figure({
     unit: 'mm',
-    formula: '{f} = {p} − {v}',
+    formula: '{f} = {p} - {v}',
     source: 'iso-12181',
     terms: [
       term('p', 'furthest outside the circle', [enough ? Math.max(...residualsMm) : null, 'mm']),

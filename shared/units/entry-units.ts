@@ -16,6 +16,7 @@ type Measure =
   | 'feed'
   | 'feed rate'
   | 'area'
+  | 'specific removal'
   | 'volume'
   | 'removal rate'
   | 'surface speed'
@@ -80,6 +81,8 @@ export const ENTRY_UNITS = {
   'in/s': unit('feed rate', MM_PER_INCH * SECONDS_PER_MINUTE, 'in/s', 3),
   mm2: unit('area', 1, 'mm²', 2),
   in2: unit('area', MM_PER_INCH ** 2, 'in²', 4),
+  'mm2/s': unit('specific removal', 1, 'mm³/(mm·s)', 2),
+  'in2/min': unit('specific removal', MM_PER_INCH ** 2 / SECONDS_PER_MINUTE, 'in³/(in·min)', 3),
   mm3: unit('volume', 1, 'mm³', 1),
   in3: unit('volume', MM3_PER_IN3, 'in³', 4),
   'mm3/min': unit('removal rate', 1, 'mm³/min', 0),
@@ -132,6 +135,7 @@ const INCH_UNITS: Partial<Record<UnitName, EntryUnit>> = {
   'mm/min': 'in/min',
   'mm/s': 'in/s',
   mm2: 'in2',
+  'mm2/s': 'in2/min',
   mm3: 'in3',
   'mm3/min': 'in3/min',
   'mm3/s': 'in3/s',

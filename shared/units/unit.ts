@@ -5,6 +5,7 @@ export const UNIT_NAMES = [
   'mm/min',
   'mm/s',
   'mm2',
+  'mm2/s',
   'mm3',
   'mm3/min',
   'mm3/s',
