@@ -101,16 +101,19 @@ async function jest(launcher, { projects, patterns = [], env }) {
 }
 
 async function browser(launcher, patterns) {
-  const { databaseUrl, signIns } = await openDatabase(launcher, 'test');
+  const { env, signIns } = await openDatabase(launcher, 'test');
   await buildWeb(launcher, WEB_ROOT);
   const log = fs.openSync(path.join(LOCAL, 'logs/browser-server.log'), 'w');
   const server = await startServer(launcher, {
     port: await freePort(),
-    env: { DATABASE_URL: databaseUrl, WEB_ROOT },
+    env: { DATABASE_URL: databaseUrl, WEB_ROOT, SEED_DEMO: String(signIns.length > 0) },
     stdio: ['ignore', log, log],
   });
-  const env = { BASE_URL: server.address, SIGN_INS: JSON.stringify(signIns) };
-  const result = await jest(launcher, { projects: ['browser'], patterns, env });
+  const result = await jest(launcher, {
+    projects: ['browser'],
+    patterns,
+    env: { BASE_URL: server.address, SIGN_INS: JSON.stringify(signIns) },
+  });
   await server.stop();
   return result;
 }

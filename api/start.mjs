@@ -19,14 +19,14 @@ launch(async (launcher) => {
   }
   await requireFreePort(port, 'npm start');
   await installPackages(launcher);
-  const { databaseUrl, signIns } = await (given
+  const { env, signIns } = await (given
     ? useGivenDatabase(launcher)
     : openDatabase(launcher, 'main'));
   await buildWeb(launcher, WEB_ROOT);
   say('Starting the server');
   const server = await startServer(launcher, {
     port,
-    env: { DATABASE_URL: databaseUrl, WEB_ROOT },
+    env: { DATABASE_URL: databaseUrl, WEB_ROOT, SEED_DEMO: String(signIns.length > 0) },
   });
   say(`\nRingtrue is at ${server.address}`);
   for (const { role, email, password } of signIns) say(`  ${role.padEnd(12)}${email}  ${password}`);

@@ -6,7 +6,6 @@ import { Strategy } from 'passport-local';
 import type { SignInRequest } from '@/shared/contracts/session';
 
 declare global {
-  // eslint-disable-next-line @typescript-eslint/no-namespace -- Express declares its user type so.
   namespace Express {
     interface User {
       id: string;

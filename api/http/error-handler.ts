@@ -21,6 +21,7 @@ const NOT_NOW = /^(08|53|57P|57014|40001|40P01|55P03|25P03)|^E(CONN|HOST|PIPE|TI
 
 export const unknownPath: RequestHandler = (_req, res) => sendProblem(res, 'not-found');
 
+// eslint-disable-next-line max-params -- Express knows an error handler by its four parameters.
 export const errorHandler: ErrorRequestHandler = (error: unknown, req, res, next) => {
   if (res.headersSent) {
     next(error);

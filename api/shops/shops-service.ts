@@ -1,10 +1,13 @@
 import type { UpdateShopRequest } from '@/shared/contracts/shops';
 import { can } from '@/shared/roles/roles';
 
+import type { AuditTrail } from '../audit/audit-trail';
 import { demand } from '../refusals';
 import type { Recompute } from '../setups/recompute';
 import type { Caller, InShop } from '../shop-scope';
 import { existing, updateItem } from '../stored-items';
+
+const trail = (audit: AuditTrail) => ({ subject: 'shop' as const, audit });
 
 export const shopsService = (inShop: InShop, recompute: Recompute) => ({
   get: (caller: Caller) =>
@@ -16,9 +19,8 @@ export const shopsService = (inShop: InShop, recompute: Recompute) => ({
   update: (caller: Caller, request: UpdateShopRequest) =>
     inShop(caller, async (scope) => {
       demand(can(scope.role, 'shop:update'));
-      const { shop, audit } = scope;
-      const id = caller.shopId;
-      const updated = await updateItem(shop, { id, request }, { subject: 'shop', audit });
+      const edit = { id: caller.shopId, request };
+      const updated = await updateItem(scope.shop, edit, trail(scope.audit));
       await recompute(scope, 'all');
       return updated;
     }),

@@ -3,6 +3,8 @@ import { lead, others, password } from './people';
 import { setups } from './setups';
 import { wheels } from './wheels';
 
+export { signIns } from './people';
+
 /** A shop to look around in. Its people, its name and the makers of its machines are invented. */
 export const demoShop = {
   id: '01900000-0000-7000-8000-000000000001',
