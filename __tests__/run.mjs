@@ -106,7 +106,7 @@ async function browser(launcher, patterns) {
   const log = fs.openSync(path.join(LOCAL, 'logs/browser-server.log'), 'w');
   const server = await startServer(launcher, {
     port: await freePort(),
-    env: { DATABASE_URL: databaseUrl, WEB_ROOT, SEED_DEMO: String(signIns.length > 0) },
+    env: { ...env, WEB_ROOT },
     stdio: ['ignore', log, log],
   });
   const result = await jest(launcher, {

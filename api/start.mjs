@@ -26,7 +26,7 @@ launch(async (launcher) => {
   say('Starting the server');
   const server = await startServer(launcher, {
     port,
-    env: { DATABASE_URL: databaseUrl, WEB_ROOT, SEED_DEMO: String(signIns.length > 0) },
+    env: { ...env, WEB_ROOT },
   });
   say(`\nRingtrue is at ${server.address}`);
   for (const { role, email, password } of signIns) say(`  ${role.padEnd(12)}${email}  ${password}`);

@@ -6,7 +6,7 @@ import { typescript } from './server.mjs';
  * Opens a private cluster and brings its database to the newest schema, with the demo shop in it.
  *
  * @param {'main' | 'test'} kind - see openCluster
- * @returns the application role's address of the database, and who can sign in
+ * @returns what the server's environment needs, and who can sign in
  */
 export async function openDatabase(launcher, kind) {
   say('Starting PostgreSQL');
@@ -18,7 +18,8 @@ export async function openDatabase(launcher, kind) {
     trouble: 'The database could not be prepared.',
     env: { DATABASE_ADMIN_URL: adminUrl },
   });
-  return JSON.parse(answer);
+  const { databaseUrl, signIns } = JSON.parse(answer);
+  return { env: { DATABASE_URL: databaseUrl, SEED_DEMO: 'true' }, signIns };
 }
 
 /** The database of DATABASE_URL; its schema is brought up to date where the owner's address is given too. */
@@ -30,5 +31,5 @@ export async function useGivenDatabase(launcher) {
       trouble: 'The database could not be brought up to date.',
     });
   }
-  return { databaseUrl: process.env.DATABASE_URL, signIns: [] };
+  return { env: {}, signIns: [] };
 }

@@ -20,12 +20,18 @@ export const typescript = (file) => [process.execPath, '--import', 'tsx', file];
 export async function startServer(launcher, { port, env, stdio }) {
   const server = launcher.start(typescript('api/main.ts'), {
     stdio,
-    env: { NODE_ENV: 'production', SESSION_SECRET: sessionSecret(), PORT: String(port), ...env },
+    env: {
+      NODE_ENV: 'production',
+      LOG_LEVEL: process.env.LOG_LEVEL ?? 'warn',
+      SESSION_SECRET: sessionSecret(),
+      PORT: String(port),
+      ...env,
+    },
   });
-  const address = `http://127.0.0.1:${port}`;
-  const ended = server.ended.then(() => 'ended');
+  const address = `http://localhost:${port}`;
+  const ended = server.ended.then(() => true);
   const deadline = Date.now() + READY_WITHIN_MS;
-  while ((await Promise.race([isReady(address), ended])) !== true) {
+  while (!(await isReady(address))) {
     const over = await Promise.race([ended, pause()]);
     if (over || Date.now() > deadline) throw new Trouble('The server did not start.');
   }

@@ -13,18 +13,23 @@ export const isRoot = process.getuid?.() === 0;
  * @param {string} purpose - the words for what it is needed for
  */
 export function installPackage(name, purpose, say) {
-  const byHand = `As root: apt-get update && apt-get install --no-install-recommends ${name}`;
-  if (!isRoot || !programOnPath('apt-get')) {
-    throw new Trouble(`${purpose} needs ${name}, which is not installed. ${byHand}`);
-  }
+  if (!isRoot || !programOnPath('apt-get')) throw new Trouble(missing(name, purpose));
   say(`Installing ${name} from Debian’s packages`);
   const env = { ...process.env, DEBIAN_FRONTEND: 'noninteractive' };
   try {
     run('apt-get', ['update', '-qq'], { env });
     run('apt-get', ['install', '-y', '-qq', '--no-install-recommends', name], { env });
   } catch (error) {
-    throw new Trouble(`${name} could not be installed. ${byHand}`, { cause: error });
+    throw new Trouble(missing(name, purpose), { cause: error });
   }
+}
+
+/** What is missing, and how to get it by hand. */
+export function missing(name, purpose) {
+  return (
+    `${purpose} needs ${name}, which is not installed. ` +
+    `As root: apt-get update && apt-get install --no-install-recommends ${name}`
+  );
 }
 
 /** Runs a program to its end and throws when it fails; what it complains of is shown. */

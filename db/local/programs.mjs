@@ -2,7 +2,7 @@ import { execFileSync, spawnSync } from 'node:child_process';
 import fs from 'node:fs';
 import path from 'node:path';
 
-import { installPackage, isRoot, programOnPath, run } from './debian.mjs';
+import { installPackage, isRoot, missing, programOnPath, run } from './debian.mjs';
 import { Trouble } from './trouble.mjs';
 
 const DEBIAN = '/usr/lib/postgresql';
@@ -38,14 +38,14 @@ export function installPrograms(local, say) {
   if (isRoot) {
     refuseMainCluster();
     installPackage('postgresql', PURPOSE, say);
-    return;
+  } else {
+    try {
+      unpackBeside(path.join(local, 'postgresql'), path.join(local, 'apt'), say);
+    } catch (error) {
+      process.stderr.write(`${error.message}\n`);
+    }
   }
-  try {
-    unpackBeside(path.join(local, 'postgresql'), path.join(local, 'apt'), say);
-  } catch (error) {
-    process.stderr.write(`${error.message}\n`);
-    installPackage('postgresql', PURPOSE, say);
-  }
+  if (!findPrograms(local)) throw new Trouble(missing('postgresql', PURPOSE));
 }
 
 /** Debian's package would otherwise start a cluster of its own that nobody asked for. */
@@ -80,6 +80,7 @@ function unpackBeside(target, apt, say) {
   fs.rmSync(half, { recursive: true, force: true });
   for (const deb of fs.readdirSync(debs)) run('dpkg', ['-x', path.join(debs, deb), half]);
   fs.rmSync(apt, { recursive: true });
+  fs.rmSync(target, { recursive: true, force: true });
   fs.renameSync(half, target);
 }
 
