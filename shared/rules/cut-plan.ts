@@ -2,7 +2,7 @@ import type { PlanInput } from '../domain/setups';
 import { dialOf, settle, type Dial, type Setting } from './dial';
 import { finite } from './figures';
 import { balanceCut, infeedCaps, leastCap, type Cap } from './infeed';
-import { cutFraction } from './spring';
+import { cutFraction, cuttingStiffness } from './spring';
 import { positive, type Surface } from './surface';
 import { feedAtMost, traverseAims, type TraverseAims } from './traverse';
 import type { Figure } from './types';
@@ -160,7 +160,15 @@ function cutEffects(basis: CutBasis) {
     lagPerMm2:
       energy === null || wheelMPerS === null || work === null || stiffness.value === null
         ? null
-        : finite((energy * (work / wheelMPerS)) / (input.rules.forceRatio * stiffness.value)),
+        : finite(
+            cuttingStiffness({
+              energy,
+              workMPerS: work,
+              wheelMPerS,
+              traverseMm: 1,
+              forceRatio: input.rules.forceRatio,
+            }) / stiffness.value,
+          ),
     wattsPerMm2:
       energy === null || latheRpm === null || surface.diameterMm === null
         ? null

@@ -41,7 +41,7 @@ const MM_PER_S_PER_M_PER_MIN = 1000 / 60;
  * and the range is carried along. A material without a row in the table takes its nearest one, and says so.
  *
  * @param material - work material; null while not chosen.
- * @returns geometric mean in J/mm3 (the same number in N/mm2), with the range as its band.
+ * @returns geometric mean in J/mm3 (a thousand times the number in N/mm2), with the range as its band.
  * @source kalpakjian-energy
  * @example specificEnergy('cast-iron').value // 26.8 J/mm3
  * @example specificEnergy('cast-iron').band // { low: 12, high: 60 }

@@ -1,17 +1,20 @@
 import type { PlanInput } from '../domain/setups';
 import { cautionsFor } from './cautions';
 import { clearanceFindings } from './clearance';
+import { equivalentDiameter } from './contact';
 import { unknown } from './cut-figures';
+import { deepestWithoutBurn, specificEnergy } from './energy';
 import { guardFindings } from './guard';
 import { effectiveQuill } from './mandrel';
 import { needsOf } from './needs';
 import { planCutOutcome } from './plan-cut';
 import { planSpeed } from './plan-speed';
-import { firstFrequency, quillStiffness, quillTaper, wheelMassKg } from './quill';
+import { cuttingForce, planPower } from './power-plan';
+import { firstFrequency, quillStiffness, quillTaper, taperFindings, wheelMassKg } from './quill';
 import { rotationFindings, workRotation } from './rotation';
 import { postStiffness, stiffnessAtWheel, workStiffness } from './stiffness';
 import { jawPlanOf, stockFindings, stockOf } from './stock';
-import { notNegative, surfaceOf } from './surface';
+import { notNegative, positive, surfaceOf } from './surface';
 import { planTime } from './time';
 import type { Plan } from './types';
 import { unitFindings } from './unit-doubt';
@@ -19,6 +22,7 @@ import { verdictOf } from './verdict';
 import { RULES_VERSION } from './version';
 import { wheelFindings } from './wheel-checks';
 import { planWorkSpeed, workSpeedFindings } from './work-speed';
+import { isSteel } from './work-table';
 
 export { assemblePlanInput, emptySetupInputs, typedWheelData, type Found } from './assemble';
 export { CAUTIONS, type CautionId } from './cautions';
@@ -64,13 +68,22 @@ export function planSetup(given: PlanInput): Plan {
     ),
     work: workStiffness(work, surface),
   });
+  const energy = specificEnergy(work.material);
+  const steel = work.material !== null && isSteel(work.material);
+  const contact = equivalentDiameter(
+    wheel?.diameterNowMm ?? null,
+    surface.diameterMm,
+    surface.side,
+  );
   const outcome = planCutOutcome(
     {
       input,
       surface,
       stockMm: stock.value,
-      energy: null,
-      burnMm: null,
+      energy: energy.value,
+      burnMm: steel
+        ? deepestWithoutBurn(energy.value, contact.value, turning.workSpeed.value)
+        : null,
       wheelMPerS: speed.wheelSpeed.value,
       workMPerMin: turning.workSpeed.value,
       latheRpm: turning.latheRpm.value,
@@ -78,6 +91,24 @@ export function planSetup(given: PlanInput): Plan {
     },
     turning.latheRpm,
   );
+  const load = {
+    surface,
+    energy,
+    wheelSpeed: speed.wheelSpeed,
+    forceRatio: input.rules.forceRatio,
+  };
+  const roughForce = cuttingForce(load, outcome.infeed.rough.value, outcome.traverse.roughRate);
+  const finishForce = cuttingForce(load, outcome.infeed.finish.value, outcome.traverse.finishRate);
+  const motorW = positive(grinder?.motorPowerW ?? null);
+  const power = planPower({
+    load,
+    force: roughForce,
+    infeedMm: outcome.infeed.rough.value,
+    wheelMm: wheel?.diameterNowMm ?? null,
+    workMPerMin: turning.workSpeed.value,
+    availableW: motorW === null ? null : motorW * input.rules.powerShare,
+    steel,
+  });
   const direction = {
     side: surface.side,
     lathe,
@@ -86,6 +117,7 @@ export function planSetup(given: PlanInput): Plan {
     workRotation: input.machine.workRotation,
   };
   const widthMm = wheel?.widthMm ?? null;
+  const taper = quillTaper(quill, finishForce.normal.value, widthMm);
   const findings = [
     ...speed.findings,
     ...(wheel === null
@@ -121,6 +153,8 @@ export function planSetup(given: PlanInput): Plan {
     ...stockFindings(input),
     ...workSpeedFindings(turning, surface.diameterMm),
     ...outcome.findings,
+    ...power.findings,
+    ...taperFindings(taper, work.toleranceMm),
     ...unitFindings(input),
   ];
   const needs = needsOf(input);
@@ -161,15 +195,9 @@ export function planSetup(given: PlanInput): Plan {
       stiffnessAtWheel: stiffness,
       lag: outcome.lag,
       firstFrequency: firstFrequency(quill, wheel === null ? null : wheelMassKg(wheel)),
-      taper: quillTaper(quill, null, widthMm),
+      taper: taper,
     },
-    power: {
-      removalRate: unknown('mm3/s', 'metal removed'),
-      tangentialForce: unknown('N', 'force along the cut'),
-      normalForce: unknown('N', 'force pressing the quill back'),
-      power: unknown('W', 'power'),
-      burnThreshold: unknown('J/mm3', 'burning threshold'),
-    },
+    power: power.power,
     time: planTime({
       schedule: outcome.schedule,
       travel: outcome.traverse.travel,

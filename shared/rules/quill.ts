@@ -1,6 +1,7 @@
 import type { QuillData, QuillMaterial, QuillSegment } from '../domain/machines';
-import { assumedTerm, figure, stated, term } from './figures';
-import type { Figure } from './types';
+import { finding } from './findings';
+import { assumedTerm, figure, quantity, stated, term } from './figures';
+import type { Figure, Finding } from './types';
 
 /** Young's modulus in N/mm2 and density in kg/m3. */
 export const QUILL_MATERIAL: Record<QuillMaterial, { modulus: number; density: number }> = {
@@ -174,4 +175,16 @@ export function quillTaper(
     ],
     compute: (force, slope, width) => force * slope * width,
   });
+}
+
+/** The share of the tolerance that the quill's taper may take, on diameter, before it is worth a word. */
+const TAPER_SHARE = 0.25;
+
+/** A note when the quill's taper, on diameter, takes a good part of the tolerance. */
+export function taperFindings(taper: Figure, toleranceMm: number | null): Finding[] {
+  if (taper.value === null || toleranceMm === null) return [];
+  const onDiameter = 2 * taper.value;
+  return onDiameter > toleranceMm * TAPER_SHARE
+    ? [finding('quill-taper', { figures: { taper: quantity(onDiameter, 'mm') } })]
+    : [];
 }

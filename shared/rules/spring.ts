@@ -4,14 +4,17 @@ import type { Figure } from './types';
 /** Spark-out never helps beyond this: under a rubbing threshold some spring stays. */
 const MOST_SPARK_OUTS = 12;
 
+/** A joule is a newton metre: one J/mm3 is 1 000 N/mm2. */
+const N_PER_MM2 = 1000;
+
 /**
  * How much more the wheel presses for each millimetre deeper that it cuts.
  *
- * @param cut - specific energy u in J/mm3 (the same number in N/mm2), work and wheel speed in m/s, traverse in
- * mm per work revolution, and tangential over normal force.
+ * @param cut - specific energy in J/mm3, work and wheel speed in m/s, traverse in mm per work revolution, and
+ * tangential over normal force.
  * @returns cutting stiffness, N/mm, unrounded.
  * @source derived-spring
- * @example cuttingStiffness({ energy: 38, workMPerS: 0.25, wheelMPerS: 20, traverseMm: 1.5, forceRatio: 0.4 })
+ * @example cuttingStiffness({ energy: 38, workMPerS: 0.25, wheelMPerS: 20, traverseMm: 1.5, forceRatio: 0.4 }) // 1781 N/mm
  */
 export function cuttingStiffness(cut: {
   energy: number;
@@ -20,7 +23,9 @@ export function cuttingStiffness(cut: {
   traverseMm: number;
   forceRatio: number;
 }): number {
-  return (cut.energy * (cut.workMPerS / cut.wheelMPerS) * cut.traverseMm) / cut.forceRatio;
+  return (
+    (N_PER_MM2 * cut.energy * (cut.workMPerS / cut.wheelMPerS) * cut.traverseMm) / cut.forceRatio
+  );
 }
 
 /** What the cut fraction of one stage depends on; null while unknown. Speeds in m/s, traverse in mm. */
@@ -44,7 +49,7 @@ export interface StageCut {
 export function cutFraction(stiffness: Figure, cut: StageCut): Figure {
   return figure({
     unit: '1',
-    formula: '{K} = {k} / ({k} + {u} ({v_w}/{v_s}) {s} / {μ})',
+    formula: '{K} = {k} / ({k} + 1 000 {u} ({v_w}/{v_s}) {s} / {μ})',
     source: 'derived-spring',
     terms: [
       termOf('k', 'stiffness at the wheel', stiffness),

@@ -90,3 +90,10 @@ export function workRow(material: Material): WorkRow {
     source: source ?? 'mh31-1318',
   };
 }
+
+/** Whether rules that are known for steel alone hold for a material. */
+export function isSteel(material: Material): boolean {
+  return !NOT_STEEL.includes(material);
+}
+
+const NOT_STEEL: readonly Material[] = ['cast-iron', 'copper-alloy', 'aluminium-alloy'];
