@@ -3,6 +3,12 @@ import { createHash } from 'node:crypto';
 import type { AuditedWrite, AuditTrail } from './audit/audit-trail';
 import { idReused, notFound, staleVersion } from './refusals';
 
+/**
+ * Held until the transaction ends. 'share' keeps a row as it is, 'no key update' is taken to edit it: others may
+ * still refer to it.
+ */
+export type Lock = 'share' | 'no key update';
+
 interface Item {
   id: string;
   version: number;
@@ -10,7 +16,7 @@ interface Item {
 
 /** What every repository of editable things offers. */
 export interface ItemRepository<T extends Item, Create extends { id: string }, Content> {
-  find(id: string, lock?: 'share' | 'update'): Promise<T | null>;
+  find(id: string, lock?: Lock): Promise<T | null>;
   /** The digest of the request that made it. */
   creationDigest(id: string): Promise<string | null>;
   /** Null when the id is in use. */
@@ -72,7 +78,7 @@ export async function updateItem<T extends Item, Content>(
   { id, request, check }: Edit<T, Content>,
   { subject, audit, view = (item) => item }: Trail<T>,
 ): Promise<T> {
-  const before = await existing(repository.find(id, 'update'));
+  const before = await existing(repository.find(id, 'no key update'));
   check?.(before);
   if (before.version !== request.version) throw staleVersion(before);
   const after = await repository.update(id, request);

@@ -4,6 +4,7 @@ import type { Transaction } from '@/db/client';
 import { beltSteps, grinders, quills } from '@/db/schema';
 import type { CreateGrinderRequest, Grinder } from '@/shared/contracts/machines';
 
+import type { Lock } from '../stored-items';
 import { keepingUnique } from '../unique-names';
 import {
   beltStepRows,
@@ -72,7 +73,7 @@ export const grindersRepository = (tx: Transaction, shopId: string) => {
       );
     },
 
-    async find(id: string, lock?: 'share' | 'update'): Promise<Grinder | null> {
+    async find(id: string, lock?: Lock): Promise<Grinder | null> {
       const query = tx.select().from(grinders).where(one(id)).$dynamic();
       return only(await (lock ? query.for(lock) : query));
     },

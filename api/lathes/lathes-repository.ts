@@ -4,6 +4,7 @@ import type { Transaction } from '@/db/client';
 import { lathes } from '@/db/schema';
 import type { CreateLatheRequest, Lathe } from '@/shared/contracts/machines';
 
+import type { Lock } from '../stored-items';
 import { keepingUnique } from '../unique-names';
 
 type Content = Omit<CreateLatheRequest, 'id'>;
@@ -21,7 +22,7 @@ export const lathesRepository = (tx: Transaction, shopId: string) => {
       return rows.map(toLathe);
     },
 
-    async find(id: string, lock?: 'share' | 'update'): Promise<Lathe | null> {
+    async find(id: string, lock?: Lock): Promise<Lathe | null> {
       const query = tx.select().from(lathes).where(one(id)).$dynamic();
       const [row] = await (lock ? query.for(lock) : query);
       return row ? toLathe(row) : null;

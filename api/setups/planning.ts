@@ -1,36 +1,37 @@
-import type { Shop } from '@/shared/contracts/shops';
 import type { SetupInputs } from '@/shared/domain/setups';
 import { assemblePlanInput, planSetup, type Plan } from '@/shared/rules';
 
 import { refusedByRule } from '../refusals';
 import type { ShopScope } from '../shop-scope';
+import { existing } from '../stored-items';
 import type { StoredPlan } from './setups-repository';
 
 /** The calendar date in a time zone. */
 export const dateIn = (timeZone: string, now: Date): string =>
-  new Intl.DateTimeFormat('en-CA', { timeZone }).format(now);
+  new Intl.DateTimeFormat('sv-SE', { timeZone }).format(now);
 
-type Sources = Pick<ShopScope, 'lathes' | 'grinders' | 'wheels'>;
+type Sources = Pick<ShopScope, 'shop' | 'lathes' | 'grinders' | 'wheels'>;
 
 /**
- * What the inputs name, in this shop. With a lock for sharing, none of it can change until the plan made
+ * The shop, and what of it the inputs name. With a lock for sharing, none of it can change until the plan made
  * from it is stored: whoever changes it afterwards finds that plan and makes it anew.
  */
 async function partsOf({ machine, wheel }: SetupInputs, from: Sources, lock?: 'share') {
+  const shop = await existing(from.shop.find(lock));
   const { latheId, grinderId, quillId } = machine;
   const lathe = latheId === null ? null : await from.lathes.find(latheId, lock);
   const grinder = grinderId === null ? null : await from.grinders.find(grinderId, lock);
   const quill = grinder?.quills.find(({ id }) => id === quillId) ?? null;
   const rackWheel = wheel.wheelId === null ? null : await from.wheels.find(wheel.wheelId, lock);
-  return { lathe, grinder, quill, rackWheel };
+  return { shop, lathe, grinder, quill, rackWheel };
 }
 
 /** Makes the plan from the inputs and from what they name, as it stands in this transaction. */
 export async function planFor(
   inputs: SetupInputs,
-  { scope, shop, now }: { scope: Sources; shop: Shop; now: Date },
+  { scope, now }: { scope: Sources; now: Date },
 ): Promise<StoredPlan> {
-  const { lathe, grinder, quill, rackWheel } = await partsOf(inputs, scope);
+  const { shop, lathe, grinder, quill, rackWheel } = await partsOf(inputs, scope);
   const plannedOn = dateIn(shop.timeZone, now);
   const plan = planSetup(
     assemblePlanInput(inputs, {

@@ -25,10 +25,8 @@ export const refreshOutdated =
   };
 
 async function replan(scope: ShopScope, drafts: Draft[], now: Date): Promise<void> {
-  if (drafts.length === 0) return;
-  const shop = await existing(scope.shop.find());
   for (const { id, inputs, verdict } of drafts) {
-    const stored = await planFor(inputs, { scope, shop, now });
+    const stored = await planFor(inputs, { scope, now });
     await scope.setups.storePlan(id, stored);
     if (stored.plan.verdict !== verdict)
       await scope.audit.record({

@@ -6,6 +6,7 @@ import type { Setup, SetupPage } from '@/shared/contracts/setups';
 import type { Operation, SetupInputs, SetupState, Verdict } from '@/shared/domain/setups';
 
 import { containing, keyOf, pageOf } from '../paging';
+import type { Lock } from '../stored-items';
 
 /** A plan as it is stored beside the inputs it was made from. */
 export interface StoredPlan {
@@ -57,9 +58,9 @@ export const setupsRepository = (tx: Transaction, shopId: string) => {
       .from(setups)
       .where(and(eq(setups.shopId, shopId), eq(setups.state, 'draft'), filter))
       .orderBy(asc(setups.id))
-      .for('update');
+      .for('no key update');
 
-  const find = async (id: string, lock?: 'share' | 'update'): Promise<Setup | null> => {
+  const find = async (id: string, lock?: Lock): Promise<Setup | null> => {
     const query = tx
       .select({ row: setups, updatedByName: persons.name })
       .from(setups)

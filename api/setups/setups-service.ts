@@ -36,7 +36,7 @@ function demandDraft({ state }: Setup): void {
 
 export function setupsService({ inShop, refreshOutdated, now }: SetupsContext) {
   const planned = async (scope: ShopScope, inputs: SetupInputs) => ({
-    stored: await planFor(inputs, { scope, shop: await existing(scope.shop.find()), now: now() }),
+    stored: await planFor(inputs, { scope, now: now() }),
     updatedBy: scope.personId,
   });
 
@@ -92,7 +92,7 @@ export function setupsService({ inShop, refreshOutdated, now }: SetupsContext) {
     retire: (caller: Caller, id: string, { version }: { version: number }) =>
       inShop(caller, async ({ role, personId, setups, audit }) => {
         demand(can(role, 'setup:draft'));
-        const before = await existing(setups.find(id, 'update'));
+        const before = await existing(setups.find(id, 'no key update'));
         if (before.version !== version) throw staleVersion(before);
         if (before.state === 'retired') throw refusedByRule('state', 'It is retired already.');
         const after = await setups.setState(id, 'retired', personId);

@@ -4,10 +4,12 @@ import type { Transaction } from '@/db/client';
 import { shops } from '@/db/schema';
 import type { Shop } from '@/shared/contracts/shops';
 
+import type { Lock } from '../stored-items';
+
 type Content = Pick<Shop, 'name' | 'units' | 'timeZone'>;
 
 export const shopsRepository = (tx: Transaction, shopId: string) => ({
-  async find(_id = shopId, lock?: 'share' | 'update'): Promise<Shop | null> {
+  async find(lock?: Lock): Promise<Shop | null> {
     const query = tx.select().from(shops).where(eq(shops.id, shopId)).$dynamic();
     const [row] = await (lock ? query.for(lock) : query);
     return row ? toShop(row) : null;
@@ -22,7 +24,7 @@ export const shopsRepository = (tx: Transaction, shopId: string) => ({
     return toShop(row);
   },
 
-  async update(_id: string, { name, units, timeZone }: Content): Promise<Shop> {
+  async update({ name, units, timeZone }: Content): Promise<Shop> {
     const [row] = await tx
       .update(shops)
       .set({

@@ -5,7 +5,7 @@ import type { AuditTrail } from '../audit/audit-trail';
 import { demand } from '../refusals';
 import type { Recompute } from '../setups/recompute';
 import type { Caller, InShop } from '../shop-scope';
-import { existing, updateItem } from '../stored-items';
+import { existing, updateItem, type Lock } from '../stored-items';
 
 const trail = (audit: AuditTrail) => ({ subject: 'shop' as const, audit });
 
@@ -19,8 +19,12 @@ export const shopsService = (inShop: InShop, recompute: Recompute) => ({
   update: (caller: Caller, request: UpdateShopRequest) =>
     inShop(caller, async (scope) => {
       demand(can(scope.role, 'shop:update'));
+      const repository = {
+        find: (_id: string, lock?: Lock) => scope.shop.find(lock),
+        update: (_id: string, content: UpdateShopRequest) => scope.shop.update(content),
+      };
       const edit = { id: caller.shopId, request };
-      const updated = await updateItem(scope.shop, edit, trail(scope.audit));
+      const updated = await updateItem(repository, edit, trail(scope.audit));
       await recompute(scope, 'all');
       return updated;
     }),

@@ -6,6 +6,7 @@ import type { CreateWheelRequest, Wheel } from '@/shared/contracts/wheels';
 import type { WheelData } from '@/shared/domain/wheels';
 
 import { containing, keyOf, pageOf } from '../paging';
+import type { Lock } from '../stored-items';
 import { keepingUnique } from '../unique-names';
 
 type Content = Omit<CreateWheelRequest, 'id'>;
@@ -45,7 +46,7 @@ export const wheelsRepository = (tx: Transaction, shopId: string) => {
       });
     },
 
-    async find(id: string, lock?: 'share' | 'update'): Promise<Wheel | null> {
+    async find(id: string, lock?: Lock): Promise<Wheel | null> {
       const query = tx.select().from(wheels).where(one(id)).$dynamic();
       const [row] = await (lock ? query.for(lock) : query);
       return row ? toWheel(row) : null;

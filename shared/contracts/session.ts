@@ -2,7 +2,7 @@ import * as z from 'zod';
 
 import { TEXT_LIMITS } from '../domain/limits';
 import { ROLES, UNIT_SYSTEMS } from '../domain/people';
-import { id, name } from './common';
+import { id, name, timeZone } from './common';
 
 const email = z.string().trim().toLowerCase().max(TEXT_LIMITS.email).pipe(z.email());
 
@@ -19,7 +19,7 @@ export const signUpRequest = z.strictObject({
   password: z.string().min(TEXT_LIMITS.passwordMin).max(TEXT_LIMITS.passwordMax),
   shopName: name,
   units: z.enum(UNIT_SYSTEMS),
-  timeZone: z.string().min(1).max(60),
+  timeZone,
 });
 
 export const membership = z.strictObject({

@@ -2,7 +2,7 @@ import * as z from 'zod';
 
 import { ROLES, UNIT_SYSTEMS } from '../domain/people';
 import { DEFAULT_SHOP_RULES, type ShopRules } from '../domain/shop-rules';
-import { expectedVersion, name, stored } from './common';
+import { expectedVersion, name, stored, timeZone } from './common';
 
 const ruleNames = Object.keys(DEFAULT_SHOP_RULES) as (keyof ShopRules)[];
 
@@ -25,7 +25,7 @@ export const updateShopRequest = z.strictObject({
   version: expectedVersion,
   name,
   units: z.enum(UNIT_SYSTEMS),
-  timeZone: z.string().min(1).max(60),
+  timeZone,
 });
 
 /** A person of the shop, as colleagues see them. */
