@@ -15,7 +15,7 @@ interface SaveStripProps {
 /** The form's one main action, within thumb's reach. */
 export function SaveStrip({ label, busy, kept, onSave }: SaveStripProps) {
   return (
-    <View style={styles.strip}>
+    <View role="region" aria-label="Save" style={styles.strip}>
       <View style={styles.inner}>
         <Button kind="primary" wide label={label} busy={busy} onPress={onSave} />
         {kept ? <Small align="center">Kept on this device until it is saved.</Small> : null}

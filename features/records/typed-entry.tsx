@@ -78,7 +78,7 @@ export function mapEntries<Name extends string, Values extends Entries<Name>>(
 export function entryRules<Name extends string>(
   specs: Specs<Name>,
   units: UnitSystem,
-  required: readonly Name[] = [],
+  required: readonly NoInfer<Name>[] = [],
 ) {
   return Object.fromEntries(
     namesOf(specs).map((name) => [

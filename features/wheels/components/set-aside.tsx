@@ -1,0 +1,87 @@
+import { useQueryClient } from '@tanstack/react-query';
+import { useState } from 'react';
+
+import { FormProblem } from '@/features/forms';
+import { isRefusal } from '@/features/transport';
+import { Button } from '@/features/ui/button';
+import { Field } from '@/features/ui/field';
+import { Sheet } from '@/features/ui/sheet';
+import { Body } from '@/features/ui/text';
+import type { Wheel } from '@/shared/contracts/wheels';
+import { TEXT_LIMITS } from '@/shared/domain/limits';
+
+import { useSaveWheel, wheelQueries } from '../queries';
+
+const MISSING = 'Enter why: what was seen or heard, in a few words.';
+
+/** Anybody may set a wheel aside; it then stops every setup that uses it. */
+export function SetAside({ shopId, wheel }: { shopId: string; wheel: Wheel }) {
+  const client = useQueryClient();
+  const save = useSaveWheel(shopId);
+  const [open, setOpen] = useState(false);
+  const [reason, setReason] = useState('');
+  const [error, setError] = useState<string>();
+  const { state } = wheel.data;
+  if (state === 'set aside' || state === 'scrapped') return null;
+
+  const setAside = () => {
+    const setAsideReason = reason.trim();
+    if (!setAsideReason) {
+      setError(MISSING);
+      return;
+    }
+    setError(undefined);
+    const { tag, typed, version } = wheel;
+    const data = { ...wheel.data, state: 'set aside' as const, setAsideReason };
+    save.mutate(
+      { id: wheel.id, body: { version, tag, typed, data } },
+      {
+        onSuccess: () => setOpen(false),
+        onError: () => void client.invalidateQueries({ queryKey: wheelQueries.all(shopId) }),
+      },
+    );
+  };
+
+  return (
+    <>
+      <Button kind="danger" label="Set aside" onPress={() => setOpen(true)} />
+      <Sheet
+        open={open}
+        onClose={() => setOpen(false)}
+        title={`Set ${wheel.tag} aside`}
+        shape="box"
+        footer={
+          <Button
+            kind="dangerFilled"
+            wide
+            label="Set aside"
+            busy={save.isPending}
+            onPress={setAside}
+          />
+        }
+      >
+        <Body>
+          Every setup that uses this wheel stops at once. Only a lead returns it to the rack.
+        </Body>
+        {isRefusal(save.error, 'stale-version') ? (
+          <Body>
+            Somebody changed this wheel in the meantime. Look at it again, then press once more.
+          </Body>
+        ) : (
+          <FormProblem error={save.error} />
+        )}
+        <Field
+          name="setAsideReason"
+          label="Reason"
+          hint="Shown wherever the wheel is: chipped edge, dull ring, fell on the floor."
+          value={reason}
+          onChangeText={setReason}
+          error={error}
+          lines={3}
+          maxLength={TEXT_LIMITS.note}
+          required
+        />
+      </Sheet>
+    </>
+  );
+}

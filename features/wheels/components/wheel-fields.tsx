@@ -1,0 +1,215 @@
+import { useFormikContext } from 'formik';
+
+import { TextField } from '@/features/forms';
+import { ChoiceField, DateField, EntryField, FormFold, UNKNOWN } from '@/features/records';
+import { useShop } from '@/features/session';
+import { Cell, Row, Stack } from '@/features/ui/card';
+import { Checkbox } from '@/features/ui/checkbox';
+import { Field } from '@/features/ui/field';
+import { Segmented } from '@/features/ui/segmented';
+import { Heading } from '@/features/ui/text';
+import { TEXT_LIMITS } from '@/shared/domain/limits';
+import { LOOK_RESULTS, MARKING_PLACES, RING_RESULTS, WHEEL_STATES } from '@/shared/domain/wheels';
+import type { WheelState } from '@/shared/domain/wheels';
+import { ENTRY_UNITS } from '@/shared/units/entry-units';
+
+import { MANDREL_FIELDS, WHEEL_FIELDS, type MandrelField, type WheelField } from '../fields';
+import { withSpeedUnit, type WheelValues } from '../form';
+import { SPEED_UNITS, speedHint, typedSpeed } from '../marked-speed';
+import { LOOK_WORDS, MARKING_PLACE_WORDS, RING_WORDS, STATE_WORDS } from '../words';
+
+function WheelQuantity({ name, required }: { name: WheelField; required?: boolean }) {
+  const { values } = useFormikContext<WheelValues>();
+  return (
+    <Cell>
+      <EntryField name={name} spec={WHEEL_FIELDS[name]} units={values.units} required={required} />
+    </Cell>
+  );
+}
+
+function MandrelQuantity({ name, required }: { name: MandrelField; required?: boolean }) {
+  const { values } = useFormikContext<WheelValues>();
+  return (
+    <EntryField
+      name={`mounted.${name}`}
+      spec={MANDREL_FIELDS[name]}
+      units={values.units}
+      required={required}
+    />
+  );
+}
+
+/** What is marked: the specification and the speeds, and where they were read. */
+export function MarkingFields() {
+  return (
+    <Stack>
+      <Row align="flex-start">
+        <Cell>
+          <TextField
+            name="tag"
+            label="Tag"
+            hint={`The name it hangs under on the rack, at most ${TEXT_LIMITS.tag} characters.`}
+            maxLength={TEXT_LIMITS.tag}
+            required
+          />
+        </Cell>
+        <Cell>
+          <TextField
+            name="marking"
+            label="Marking"
+            hint="As it stands on the wheel, like A 60 K 8 V. Leave empty where nothing is legible."
+            maxLength={TEXT_LIMITS.marking}
+          />
+        </Cell>
+      </Row>
+      <Heading>Marked speed</Heading>
+      <MarkedSpeed />
+      <Row align="flex-start">
+        <WheelQuantity name="markedRpm" />
+      </Row>
+      <ChoiceField
+        name="markingReadOn"
+        label="Marking read"
+        hint="Small wheels carry their speed on the blotter, the box or a tag."
+        as="rows"
+        options={[
+          ...MARKING_PLACES.map((value) => ({ value, label: MARKING_PLACE_WORDS[value] })),
+          { value: UNKNOWN, label: 'not recorded' },
+        ]}
+      />
+    </Stack>
+  );
+}
+
+function MarkedSpeed() {
+  const { values, errors, touched, setValues, setFieldValue, setFieldTouched } =
+    useFormikContext<WheelValues>();
+  const { speedUnit, markedSpeedMPerS } = values;
+  const name = 'markedSpeedMPerS';
+  // The entry's error is one sentence about the whole entry, where Formik's types expect one for each key.
+  const error = errors[name] as string | undefined;
+  return (
+    <Stack gap={2}>
+      <Segmented
+        name="speedUnit"
+        label="Unit of the marked speed"
+        value={speedUnit}
+        options={SPEED_UNITS.map((unit) => ({ value: unit, label: ENTRY_UNITS[unit].label }))}
+        onChange={(unit) => void setValues(withSpeedUnit(values, unit))}
+      />
+      <Field
+        name={name}
+        label="Marked speed"
+        hint={speedHint(speedUnit)}
+        unit={ENTRY_UNITS[speedUnit].label}
+        value={markedSpeedMPerS.text}
+        onChangeText={(text) => void setFieldValue(name, typedSpeed(text, speedUnit))}
+        onBlur={() => void setFieldTouched(name)}
+        error={touched[name] ? error : undefined}
+        maxLength={TEXT_LIMITS.typed}
+      />
+    </Stack>
+  );
+}
+
+export function SizeFields() {
+  const { values, setFieldValue } = useFormikContext<WheelValues>();
+  const { isMounted } = values;
+  return (
+    <Stack>
+      <Heading>Sizes</Heading>
+      <Row align="flex-start">
+        <WheelQuantity name="diameterNewMm" required />
+        <WheelQuantity name="diameterNowMm" />
+      </Row>
+      <Row align="flex-start">
+        <WheelQuantity name="widthMm" required />
+        <WheelQuantity name="holeMm" required={!isMounted} />
+      </Row>
+      <FormFold
+        label="Mounted wheel"
+        value={isMounted ? 'on its own mandrel' : 'no'}
+        names={['mounted']}
+      >
+        <Checkbox
+          name="isMounted"
+          label="The wheel sits on a mandrel of its own"
+          checked={isMounted}
+          onChange={(next) => void setFieldValue('isMounted', next)}
+        />
+        {isMounted ? (
+          <>
+            <MandrelQuantity name="mandrelDiameterMm" required />
+            <MandrelQuantity name="overhangMm" required />
+            <Checkbox
+              name="mounted.threaded"
+              label="The mandrel is threaded"
+              hint="A threaded mandrel has the figure for half an inch of overhang of a plain one."
+              checked={values.mounted.threaded}
+              onChange={(next) => void setFieldValue('mounted.threaded', next)}
+            />
+            <MandrelQuantity name="makerMaximumRpm" />
+          </>
+        ) : null}
+      </FormFold>
+    </Stack>
+  );
+}
+
+/** What was seen and heard, and whether the wheel is in use. `before` is the state as stored. */
+export function StateFields({ before }: { before: WheelState | null }) {
+  const { values } = useFormikContext<WheelValues>();
+  const { may } = useShop();
+  const isOut = before === 'set aside' || before === 'scrapped';
+  const locked = isOut && !may('wheel:return') ? 'Only a lead returns a wheel.' : undefined;
+  return (
+    <Stack>
+      <Heading>Checks</Heading>
+      <ChoiceField
+        name="looked"
+        label="Close look"
+        hint="Clean and dry, in good light: cracks, chips, stains."
+        as="rows"
+        options={[
+          ...LOOK_RESULTS.map((value) => ({ value, label: LOOK_WORDS[value] })),
+          { value: UNKNOWN, label: 'Not recorded' },
+        ]}
+      />
+      <ChoiceField
+        name="rung"
+        label="Ring test"
+        hint="Wheels of 4 in and under, and soft bonds, may not ring: then the look decides."
+        as="rows"
+        options={[
+          ...RING_RESULTS.map((value) => ({ value, label: RING_WORDS[value] })),
+          { value: UNKNOWN, label: 'Not recorded' },
+        ]}
+      />
+      <DateField
+        name="expiresOn"
+        label="Expires on"
+        hint="The last day on which it may run. Leave empty where no date is given."
+      />
+      <ChoiceField
+        name="state"
+        label="State"
+        as="rows"
+        options={WHEEL_STATES.map((value) => ({
+          value,
+          label: STATE_WORDS[value],
+          ...(value === 'on the rack' || value === 'mounted' ? { lockedBecause: locked } : {}),
+        }))}
+      />
+      {values.state === 'set aside' ? (
+        <TextField
+          name="setAsideReason"
+          label="Reason"
+          hint="Shown wherever the wheel is."
+          lines={3}
+          maxLength={TEXT_LIMITS.note}
+          required
+        />
+      ) : null}
+    </Stack>
+  );
+}
