@@ -28,7 +28,7 @@ export function AppFrame({ tabs, brand = 'Ringtrue' }: AppFrameProps) {
   const { wide } = useLayout();
   return (
     <Tabs style={[styles.frame, wide && styles.frameWide]}>
-      <View role="main" style={styles.main}>
+      <View style={styles.main}>
         <TabSlot />
       </View>
       <TabList role="navigation" aria-label="Places" style={wide ? styles.rail : styles.bar}>

@@ -72,7 +72,7 @@ export function Screen({
         {header}
       </View>
       {both ? (
-        <View style={styles.panes}>
+        <View role="main" style={styles.panes}>
           <ScrollView style={styles.first} contentContainerStyle={content}>
             {children}
           </ScrollView>
@@ -81,10 +81,12 @@ export function Screen({
           </ScrollView>
         </View>
       ) : (
-        <ScrollView style={styles.scroll} contentContainerStyle={content}>
-          {children}
-          {pane}
-        </ScrollView>
+        <View role="main" style={styles.scroll}>
+          <ScrollView contentContainerStyle={content}>
+            {children}
+            {pane}
+          </ScrollView>
+        </View>
       )}
       {strip}
     </View>

@@ -1,7 +1,7 @@
 import { StyleSheet, View } from 'react-native';
 
 import { Card } from './card';
-import { FormulaLines } from './formula';
+import { FormulaLines, SymbolText } from './formula';
 import type { FormulaTerm } from './formula';
 import { Sheet } from './sheet';
 import { Body, Label, Small, Subheading } from './text';
@@ -36,7 +36,9 @@ export function WorkingBlock({ formula, terms, result, band, note, source, mark 
           {terms.map((term) => (
             <View key={term.symbol} role="listitem" style={styles.term}>
               <View style={styles.symbol}>
-                <Label>{term.symbol}</Label>
+                <Label>
+                  <SymbolText symbol={term.symbol} />
+                </Label>
               </View>
               <View style={styles.meaning}>
                 <Small>{term.meaning}</Small>

@@ -2,7 +2,7 @@ import { scaleLinear } from 'd3-scale';
 import { StyleSheet, View } from 'react-native';
 
 import { ChoiceList } from '@/features/ui/choice-list';
-import { Engraved, Label, NumeralSmall, Small, Strong } from '@/features/ui/text';
+import { Engraved, NumeralSmall, Small, Strong } from '@/features/ui/text';
 import { colors, space } from '@/features/ui/tokens';
 import { useLayout } from '@/features/ui/use-layout';
 import type { UnitSystem } from '@/shared/domain/people';
@@ -37,15 +37,15 @@ export function StepLimits({ speed, limits, units, onChoose }: StepLimitsProps) 
       <ChoiceList
         label="Belt step"
         value={speed.chosen}
+        readOnly={onChoose === undefined}
         onChange={(id) => onChoose?.(id)}
         options={speed.steps.map((step) => ({
           value: step.id,
-          locked: onChoose === undefined || step.allowed === false,
+          locked: step.allowed === false,
           face: (
             <StepFace
               step={step}
               units={units}
-              chosen={step.id === speed.chosen}
               reason={lockedBecause(step, limits.governing, units)}
               barShare={share(step.rpm.value ?? 0)}
               limitAt={limitAt}
@@ -60,7 +60,6 @@ export function StepLimits({ speed, limits, units, onChoose }: StepLimitsProps) 
 interface StepFaceProps {
   step: BeltStepPlan;
   units: UnitSystem;
-  chosen: boolean;
   reason: string | null;
   /** Where the bar ends and the limit stands, in percent of the scale. */
   barShare: number;
@@ -79,7 +78,7 @@ function StepFace({ step, units, reason, barShare, limitAt }: StepFaceProps) {
       <View style={styles.words}>
         <Strong tone={locked ? 'stop' : 'text'}>{stepRpm(step, units)}</Strong>
         <Small tone={locked ? 'stop' : 'textSoft'}>{`${stepSpeed(step, units)}${remark}`}</Small>
-        {locked ? <Label tone="stop">{reason}</Label> : null}
+        {locked ? <Small tone="stop">{reason}</Small> : null}
       </View>
       <View aria-hidden style={[styles.scale, cramped && styles.scaleCramped]}>
         <View style={styles.track}>
@@ -116,7 +115,7 @@ const styles = StyleSheet.create({
     justifyContent: 'center',
     paddingVertical: space[2],
   },
-  scale: { width: '46%', maxWidth: 420, justifyContent: 'center' },
+  scale: { width: '40%', maxWidth: 420, justifyContent: 'center' },
   scaleCramped: { width: '100%', maxWidth: '100%', minHeight: 28 },
   track: { height: 12, backgroundColor: colors.well },
   bar: { height: 12 },

@@ -1,0 +1,121 @@
+import { arc } from 'd3-shape';
+
+import type { JawContact, JawPlan } from '@/shared/rules/types';
+
+const NICE = [1, 2, 4, 5, 8, 10, 20, 40, 50, 80, 100, 200, 400, 500, 800, 1000, 2000, 5000, 10000];
+/** The largest gap is drawn about this share of the bore's radius. */
+const GAP_SHARE = 0.34;
+const FACE_POINTS = 12;
+
+export interface Point {
+  x: number;
+  y: number;
+}
+
+/** Clockwise from straight up, as readings stand on a dial. */
+export function polar(centre: Point, radius: number, angleDeg: number): Point {
+  const angle = (angleDeg * Math.PI) / 180;
+  return { x: centre.x + radius * Math.sin(angle), y: centre.y - radius * Math.cos(angle) };
+}
+
+/** How many times too large gaps are drawn, so that the largest of them is plainly seen; a round number. */
+export function exaggeration(plans: readonly JawPlan[], boreMm: number): number {
+  const largest = Math.max(
+    ...plans.flatMap((plan) => [
+      plan.eccentricityMm,
+      ...plan.contacts.map((contact) => contact.touchesAtMm),
+    ]),
+  );
+  if (!(largest > 0)) return 1;
+  const wanted = (GAP_SHARE * boreMm) / 2 / largest;
+  return NICE.filter((times) => times <= wanted).at(-1) ?? 1;
+}
+
+/** Where everything stands in a drawing of a given width. */
+export interface ChuckLayout {
+  centre: Point;
+  /** Ends of the jaws, edge of the chuck's face, and the wheel's path at the first touch, in pixels. */
+  outerRadius: number;
+  faceRadius: number;
+  pathRadius: number;
+  height: number;
+}
+
+const OUTER_SHARE = 0.43;
+const FACE_SHARE = 0.82;
+const PATH_SHARE = 0.52;
+
+/** Leaves room for words above the top jaw and under the lowest end, and no more. */
+export function chuckLayout(width: number, plan: JawPlan, textScale: number): ChuckLayout {
+  const outerRadius = width * OUTER_SHARE;
+  const lowest = Math.max(
+    FACE_SHARE,
+    ...plan.contacts.map(({ angleDeg }) => -Math.cos((angleDeg * Math.PI) / 180)),
+  );
+  const margin = 8 * textScale;
+  const centre = { x: width / 2, y: margin + outerRadius };
+  return {
+    centre,
+    outerRadius,
+    faceRadius: outerRadius * FACE_SHARE,
+    pathRadius: outerRadius * PATH_SHARE,
+    height: centre.y + outerRadius * lowest + 2 * margin,
+  };
+}
+
+interface JawSpec {
+  plan: JawPlan;
+  contact: JawContact;
+  layout: ChuckLayout;
+  /** How many times too large offsets are drawn. */
+  times: number;
+  boreMm: number;
+  padWidthMm: number;
+}
+
+export const pixelsPerMm = ({ pathRadius }: ChuckLayout, boreMm: number) =>
+  pathRadius / (boreMm / 2);
+
+/** The outline of one jaw: its face stands off the wheel's path by the gap that the plan gives it. */
+export function jawOutline(spec: JawSpec): string {
+  const { plan, contact, layout } = spec;
+  const { centre, pathRadius, outerRadius } = layout;
+  const scale = pixelsPerMm(layout, spec.boreMm);
+  const offsetScale = scale * spec.times;
+  const half = halfAngleDeg(spec.boreMm, spec.padWidthMm, plan.contacts.length);
+  const halfWidth = Math.max((spec.padWidthMm * scale) / 2, 2);
+  const reach = (turn: number) =>
+    offsetScale *
+    plan.eccentricityMm *
+    Math.cos(((contact.angleDeg + turn - plan.highSpotDeg) * Math.PI) / 180);
+  const turns = Array.from(
+    { length: FACE_POINTS + 1 },
+    (_, index) => half * ((2 * index) / FACE_POINTS - 1),
+  );
+  const nearest = Math.min(...turns.map(reach));
+  const face = turns.map((turn) =>
+    polar(
+      centre,
+      pathRadius + offsetScale * contact.touchesAtMm + reach(turn) - nearest,
+      contact.angleDeg + turn,
+    ),
+  );
+  const end = polar(centre, outerRadius, contact.angleDeg);
+  const across = (contact.angleDeg * Math.PI) / 180;
+  const corner = (side: 1 | -1): Point => ({
+    x: end.x + side * halfWidth * Math.cos(across),
+    y: end.y + side * halfWidth * Math.sin(across),
+  });
+  const points = [...face, corner(1), corner(-1)];
+  return `M${points.map(({ x, y }) => `${x.toFixed(1)},${y.toFixed(1)}`).join('L')}Z`;
+}
+
+/** Pads are drawn no wider than lets neighbours stand apart. */
+function halfAngleDeg(boreMm: number, padWidthMm: number, jaws: number): number {
+  const half = (Math.asin(Math.min(padWidthMm / boreMm, 1)) * 180) / Math.PI;
+  return Math.min(Math.max(half, 1), 160 / jaws);
+}
+
+/** The chuck's face: a ring between two radii round a centre. */
+export const ring = (inner: number, outer: number): string =>
+  arc()({ innerRadius: inner, outerRadius: outer, startAngle: 0, endAngle: 2 * Math.PI }) ?? '';
