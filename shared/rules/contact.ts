@@ -119,29 +119,27 @@ export function removalRate(
 /**
  * Metal removed each second when the wheel plunges without traverse.
  *
- * @param workMm - diameter of the ground surface, mm.
- * @param widthMm - width of wheel that cuts, mm.
- * @param infeedMmPerRev - infeed on radius for each turn of the work, mm.
- * @param workRpm - lathe speed, rpm.
+ * @param plunge - diameter of the ground surface and width of wheel that cuts, mm, infeed on radius for each
+ * turn of the work, mm, and lathe speed, rpm.
  * @returns mm3/s, unrounded.
  * @source derived-contact-length
- * @example plungeRemovalRate(40, 10, 0.005, 120).value // 12.57 mm3/s
+ * @example plungeRemovalRate({ workMm: 40, widthMm: 10, infeedMmPerRev: 0.005, workRpm: 120 }).value // 12.57 mm3/s
  */
-export function plungeRemovalRate(
-  workMm: number | null,
-  widthMm: number | null,
-  infeedMmPerRev: number | null,
-  workRpm: number | null,
-): Figure {
+export function plungeRemovalRate(plunge: {
+  workMm: number | null;
+  widthMm: number | null;
+  infeedMmPerRev: number | null;
+  workRpm: number | null;
+}): Figure {
   return figure({
     unit: 'mm3/s',
     formula: '{Q} = π {d_w} {T} {f} {n_w} / 60',
     source: 'derived-contact-length',
     terms: [
-      term('d_w', 'diameter of the ground surface', [workMm, 'mm']),
-      term('T', 'width of wheel that cuts', [widthMm, 'mm']),
-      term('f', 'infeed for each turn of the work', [infeedMmPerRev, 'mm/rev']),
-      term('n_w', 'lathe speed', [workRpm, 'rpm']),
+      term('d_w', 'diameter of the ground surface', [plunge.workMm, 'mm']),
+      term('T', 'width of wheel that cuts', [plunge.widthMm, 'mm']),
+      term('f', 'infeed for each turn of the work', [plunge.infeedMmPerRev, 'mm/rev']),
+      term('n_w', 'lathe speed', [plunge.workRpm, 'rpm']),
     ],
     compute: (diameter, width, infeed, rpm) =>
       (Math.PI * diameter * width * infeed * rpm) / SECONDS_PER_MINUTE,
