@@ -1,4 +1,4 @@
-import type { StageCutPlan } from './cut-plan';
+import type { StageCutPlan } from './cut-stage';
 import { figure, stated, term } from './figures';
 import { steadyLag } from './spring';
 import type { Figure } from './types';
@@ -44,15 +44,17 @@ export function infeedFigure(stage: StageCutPlan | null): Figure {
 /** Traverse of a stage per work revolution, from the aim to the feed that is there. */
 export function traverseFigure(stage: StageCutPlan | null, aim: Figure, typed: boolean): Figure {
   if (stage === null) return unknown('mm/rev', 'traverse per work revolution');
-  if (typed) return stated('traverse, chosen', [stage.traverseMm, 'mm/rev']);
+  const { traverseMm } = stage;
+  if (traverseMm === null) return noTraverse();
+  if (typed) return stated('traverse, chosen', [traverseMm, 'mm/rev']);
   return figure({
     unit: 'mm/rev',
     formula: stage.byHand ? '{s}' : "the lathe's largest feed up to {s}",
     source: aim.working.source,
     terms: [term('s', 'traverse aimed at', [aim.value, 'mm/rev'])],
-    compute: () => stage.traverseMm,
+    compute: () => traverseMm,
     note:
-      aim.value !== null && stage.traverseMm < aim.value / 1.5
+      aim.value !== null && traverseMm < aim.value / 1.5
         ? 'Cut below the share of the wheel before the infeed is.'
         : 'A share of the wheel, for each turn of the work.',
   });
@@ -70,5 +72,45 @@ export function lagFigure(stage: StageCutPlan | null): Figure {
     ],
     compute: steadyLag,
     note: 'In the steady state each pass takes the whole infeed; only the first ones take less.',
+  });
+}
+
+/** Where the wheel covers the whole surface there is nothing to traverse. */
+function noTraverse(): Figure {
+  return figure({
+    unit: 'mm/rev',
+    formula: '{s}',
+    source: 'mh31-1318',
+    terms: [term('s', 'traverse', [null, 'mm/rev'])],
+    compute: () => null,
+    note: 'The wheel covers the surface: it plunges, without traverse.',
+  });
+}
+
+/** Infeed for each turn of the work when plunging. */
+export function perTurnFigure(stage: StageCutPlan | null): Figure {
+  return figure({
+    unit: 'mm/rev',
+    formula: '{f}',
+    source: 'mh31-1318',
+    terms: [
+      term('f', 'infeed for each turn of the work', [stage?.plunge?.perTurnMm ?? null, 'mm/rev']),
+    ],
+    compute: (f) => f,
+    note: "The table's, less where spring or power asks for it.",
+  });
+}
+
+/** Seconds to stay at each setting when plunging, until the turns it takes have gone by. */
+export function secondsPerSetting(stage: StageCutPlan | null, latheRpm: Figure): Figure {
+  return figure({
+    unit: 's',
+    formula: '60 {N} / {n_w}',
+    source: 'derived-time',
+    terms: [
+      term('N', 'turns of the work at each setting', [stage?.plunge?.turns ?? null, '1']),
+      term('n_w', 'lathe speed', [latheRpm.value, 'rpm']),
+    ],
+    compute: (turns, rpm) => (60 * turns) / rpm,
   });
 }

@@ -1,5 +1,6 @@
 import type { ShopRules } from '../domain/shop-rules';
-import type { CutPlan, StageCutPlan } from './cut-plan';
+import type { CutPlan } from './cut-plan';
+import type { StageCutPlan } from './cut-stage';
 import { finding } from './findings';
 import { quantity } from './figures';
 import type { Schedule } from './schedule';

@@ -1,42 +1,9 @@
-import type { PlanInput } from '../domain/setups';
-import { dialOf, settle, type Dial, type Setting } from './dial';
-import { finite } from './figures';
-import { balanceCut, infeedCaps, leastCap, type Cap } from './infeed';
-import { cutFraction, cuttingStiffness } from './spring';
-import { positive, type Surface } from './surface';
-import { feedAtMost, traverseAims, type TraverseAims } from './traverse';
-import type { Figure } from './types';
+import { planStage, type CutBasis, type StageCutPlan } from './cut-stage';
+import { dialOf, type Dial } from './dial';
+import { infeedCaps, type Cap } from './infeed';
+import { positive } from './surface';
+import { traverseAims, type TraverseAims } from './traverse';
 import { workRow, type WorkRow } from './work-table';
-
-const SECONDS = 60;
-
-/** What the cut is worked out from, as far as it is known. */
-export interface CutBasis {
-  input: PlanInput;
-  surface: Surface;
-  stockMm: number | null;
-  /** Mean specific energy, J/mm3. */
-  energy: number | null;
-  /** The deepest dry infeed under the burning threshold, mm. */
-  burnMm: number | null;
-  wheelMPerS: number | null;
-  workMPerMin: number | null;
-  latheRpm: number | null;
-  stiffness: Figure;
-}
-
-/** Infeed and traverse of one stage. */
-export interface StageCutPlan {
-  setting: Setting;
-  /** The infeed before it was rounded to the dial, and what set it. */
-  wantedMm: number;
-  by: Cap['by'];
-  typed: boolean;
-  caps: Cap[];
-  traverseMm: number;
-  byHand: boolean;
-  fraction: Figure;
-}
 
 export interface CutPlan {
   dial: Dial | null;
@@ -85,6 +52,7 @@ export function planCut(basis: CutBasis): CutPlan {
     aimMm: aims.rough.value,
     leastMm: Math.min(aims.finish.value, aims.rough.value),
     ceilingMm: row.roughInfeedMm,
+    plungePerTurnMm: row.plungeInfeedMm.rough,
     dial,
   });
   const finishCaps: Cap[] = [
@@ -99,85 +67,8 @@ export function planCut(basis: CutBasis): CutPlan {
     aimMm: aims.finish.value,
     leastMm: aims.finish.value,
     ceilingMm: row.finishInfeedMm.high,
+    plungePerTurnMm: row.plungeInfeedMm.finish,
     dial,
   });
   return { ...known, rough, finish };
-}
-
-interface StageAim {
-  caps: Cap[];
-  typedInfeedMm: number | null;
-  typedTraverseMm: number | null;
-  aimMm: number;
-  leastMm: number;
-  ceilingMm: number;
-  dial: Dial | null;
-}
-
-function planStage(basis: CutBasis, aim: StageAim): StageCutPlan | null {
-  const { input } = basis;
-  const cap: Cap | null =
-    aim.typedInfeedMm === null ? leastCap(aim.caps) : { by: 'typed', valueMm: aim.typedInfeedMm };
-  if (cap === null) return null;
-  const feeds = input.lathe?.feedsMmPerRev ?? [];
-  const asked = aim.typedTraverseMm ?? feedAtMost(feeds, aim.aimMm).mmPerRev;
-  const balanced = balanceCut(
-    cap,
-    { aimMm: asked, leastMm: aim.leastMm, fixed: aim.typedTraverseMm !== null },
-    { ...cutEffects(basis), lagLimitMm: input.rules.lagLimitMm },
-  );
-  const feed =
-    aim.typedTraverseMm === null
-      ? feedAtMost(feeds, balanced.traverseMm)
-      : { mmPerRev: aim.typedTraverseMm, byHand: false };
-  const wantedMm = aim.typedInfeedMm ?? balanced.infeedMm;
-  const setting = settle(wantedMm, aim.ceilingMm, aim.dial);
-  const rounded = setting.compoundAngle !== null && aim.typedInfeedMm === null;
-  return {
-    setting,
-    wantedMm,
-    by: aim.typedInfeedMm !== null ? 'typed' : rounded ? 'dial' : balanced.by,
-    typed: aim.typedInfeedMm !== null,
-    caps: aim.caps,
-    traverseMm: feed.mmPerRev,
-    byHand: feed.byHand,
-    fraction: cutFraction(basis.stiffness, {
-      energy: basis.energy,
-      workMPerS: perSecond(basis.workMPerMin),
-      wheelMPerS: basis.wheelMPerS,
-      traverseMm: feed.mmPerRev,
-      forceRatio: input.rules.forceRatio,
-    }),
-  };
-}
-
-/** Lag and power both grow with infeed times traverse; what they are for one square millimetre of it. */
-function cutEffects(basis: CutBasis) {
-  const { energy, wheelMPerS, workMPerMin, latheRpm, surface, input, stiffness } = basis;
-  const motorW = positive(input.grinder?.motorPowerW ?? null);
-  const work = perSecond(workMPerMin);
-  return {
-    lagPerMm2:
-      energy === null || wheelMPerS === null || work === null || stiffness.value === null
-        ? null
-        : finite(
-            cuttingStiffness({
-              energy,
-              workMPerS: work,
-              wheelMPerS,
-              traverseMm: 1,
-              forceRatio: input.rules.forceRatio,
-            }) / stiffness.value,
-          ),
-    wattsPerMm2:
-      energy === null || latheRpm === null || surface.diameterMm === null
-        ? null
-        : finite((energy * Math.PI * surface.diameterMm * latheRpm) / SECONDS),
-    availableWatts: motorW === null ? null : motorW * input.rules.powerShare,
-    burnMm: basis.burnMm,
-  };
-}
-
-function perSecond(perMin: number | null): number | null {
-  return perMin === null ? null : perMin / SECONDS;
 }

@@ -1,26 +1,22 @@
 import type { PlanInput } from '../domain/setups';
 import { cautionsFor } from './cautions';
-import { clearanceFindings } from './clearance';
 import { equivalentDiameter } from './contact';
 import { unknown } from './cut-figures';
 import { deepestWithoutBurn, specificEnergy } from './energy';
-import { guardFindings } from './guard';
 import { effectiveQuill } from './mandrel';
 import { needsOf } from './needs';
+import { inputFindings } from './plan-checks';
 import { planCutOutcome } from './plan-cut';
+import { planQuill, stiffnessOf } from './plan-quill';
 import { planSpeed } from './plan-speed';
 import { cuttingForce, planPower } from './power-plan';
-import { firstFrequency, quillStiffness, quillTaper, taperFindings, wheelMassKg } from './quill';
-import { rotationFindings, workRotation } from './rotation';
-import { postStiffness, stiffnessAtWheel, workStiffness } from './stiffness';
-import { jawPlanOf, stockFindings, stockOf } from './stock';
-import { notNegative, positive, surfaceOf } from './surface';
+import { workRotation } from './rotation';
+import { jawPlanOf, stockOf } from './stock';
+import { surfaceOf } from './surface';
 import { planTime } from './time';
 import type { Plan } from './types';
-import { unitFindings } from './unit-doubt';
 import { verdictOf } from './verdict';
 import { RULES_VERSION } from './version';
-import { wheelFindings } from './wheel-checks';
 import { planWorkSpeed, workSpeedFindings } from './work-speed';
 import { isSteel } from './work-table';
 
@@ -47,7 +43,7 @@ export { RULES_VERSION } from './version';
  */
 export function planSetup(given: PlanInput): Plan {
   const input = { ...given, quill: effectiveQuill(given.quill, given.wheelData) };
-  const { operation, work, lathe, grinder, quill, wheelData: wheel } = input;
+  const { work, lathe, grinder, quill, wheelData: wheel } = input;
   const surface = surfaceOf(input);
   const speed = planSpeed(input);
   const jaws = jawPlanOf(input);
@@ -59,22 +55,11 @@ export function planSetup(given: PlanInput): Plan {
     lathe,
     typedRpm: input.cut.latheRpm,
   });
-  const ownStiffness = quillStiffness(quill);
-  const stiffness = stiffnessAtWheel({
-    quill: ownStiffness,
-    post: postStiffness(
-      grinder?.postStiffnessNPerMm ?? null,
-      input.rules.assumedPostStiffnessNPerMm,
-    ),
-    work: workStiffness(work, surface),
-  });
   const energy = specificEnergy(work.material);
   const steel = work.material !== null && isSteel(work.material);
-  const contact = equivalentDiameter(
-    wheel?.diameterNowMm ?? null,
-    surface.diameterMm,
-    surface.side,
-  );
+  const wheelMm = wheel?.diameterNowMm ?? null;
+  const contact = equivalentDiameter(wheelMm, surface.diameterMm, surface.side);
+  const stiffness = stiffnessOf(input, surface);
   const outcome = planCutOutcome(
     {
       input,
@@ -87,7 +72,8 @@ export function planSetup(given: PlanInput): Plan {
       wheelMPerS: speed.wheelSpeed.value,
       workMPerMin: turning.workSpeed.value,
       latheRpm: turning.latheRpm.value,
-      stiffness,
+      stiffness: stiffness.atWheel,
+      plungeMm: plungeWidth(surface.lengthMm, wheel?.widthMm ?? null),
     },
     turning.latheRpm,
   );
@@ -97,65 +83,39 @@ export function planSetup(given: PlanInput): Plan {
     wheelSpeed: speed.wheelSpeed,
     forceRatio: input.rules.forceRatio,
   };
-  const roughForce = cuttingForce(load, outcome.infeed.rough.value, outcome.traverse.roughRate);
-  const finishForce = cuttingForce(load, outcome.infeed.finish.value, outcome.traverse.finishRate);
-  const motorW = positive(grinder?.motorPowerW ?? null);
   const power = planPower({
     load,
-    force: roughForce,
-    infeedMm: outcome.infeed.rough.value,
-    wheelMm: wheel?.diameterNowMm ?? null,
+    contact,
+    removal: outcome.removal.rough,
+    infeedMm: (outcome.infeed.perTurn?.rough ?? outcome.infeed.rough).value,
     workMPerMin: turning.workSpeed.value,
-    availableW: motorW === null ? null : motorW * input.rules.powerShare,
+    motorW: grinder?.motorPowerW ?? null,
+    share: input.rules.powerShare,
     steel,
   });
-  const direction = {
+  const bent = planQuill(input, {
+    stiffness,
+    lag: outcome.lag,
+    finishForce: cuttingForce(load, outcome.removal.finish).normal,
+  });
+  const directions = {
     side: surface.side,
     lathe,
     grinder,
     quill,
     workRotation: input.machine.workRotation,
   };
-  const widthMm = wheel?.widthMm ?? null;
-  const taper = quillTaper(quill, finishForce.normal.value, widthMm);
   const findings = [
     ...speed.findings,
-    ...(wheel === null
-      ? []
-      : wheelFindings({
-          wheel,
-          quill,
-          organicBond: null,
-          typed: input.wheel.typed !== null,
-          today: input.today,
-        })),
-    ...guardFindings({
-      operation,
-      grinder,
-      shieldFitted: input.machine.shieldFitted,
-      overrunMm: outcome.traverse.overrun.value,
-      widthMm,
+    ...inputFindings(input, {
+      surface,
+      overrun: outcome.traverse.overrun,
+      turning: directions,
     }),
-    ...rotationFindings(direction),
-    ...(surface.side === 'inside'
-      ? clearanceFindings({
-          boreMm: surface.diameterMm,
-          lengthMm: surface.lengthMm,
-          overrunMm: outcome.traverse.overrun.value,
-          clearDepthMm:
-            operation === 'bore' && work.throughBore !== false
-              ? null
-              : notNegative(work.clearDepthMm),
-          wheel,
-          quill,
-        })
-      : []),
-    ...stockFindings(input),
     ...workSpeedFindings(turning, surface.diameterMm),
     ...outcome.findings,
     ...power.findings,
-    ...taperFindings(taper, work.toleranceMm),
-    ...unitFindings(input),
+    ...bent.findings,
   ];
   const needs = needsOf(input);
   return {
@@ -178,7 +138,7 @@ export function planSetup(given: PlanInput): Plan {
       latheRpm: turning.latheRpm,
       workSpeed: turning.workSpeed,
       steps: turning.steps,
-      rotation: workRotation(direction),
+      rotation: workRotation(directions),
     },
     traverse: outcome.traverse,
     infeed: outcome.infeed,
@@ -190,21 +150,17 @@ export function planSetup(given: PlanInput): Plan {
       finish: outcome.cut.finish?.fraction ?? unknown('1', 'cut fraction'),
     },
     dressing: null,
-    quill: {
-      stiffness: ownStiffness,
-      stiffnessAtWheel: stiffness,
-      lag: outcome.lag,
-      firstFrequency: firstFrequency(quill, wheel === null ? null : wheelMassKg(wheel)),
-      taper: taper,
-    },
+    quill: bent.quill,
     power: power.power,
     time: planTime({
       schedule: outcome.schedule,
-      travel: outcome.traverse.travel,
-      rough: outcome.traverse.roughRate,
-      finish: outcome.traverse.finishRate,
-      strokes: input.cut.strokes,
+      passSeconds: outcome.passSeconds,
       dressing: null,
     }),
   };
+}
+
+/** The wheel plunges where the surface is no wider than the wheel. */
+function plungeWidth(lengthMm: number | null, widthMm: number | null): number | null {
+  return lengthMm !== null && widthMm !== null && lengthMm <= widthMm ? lengthMm : null;
 }

@@ -1,15 +1,24 @@
 import { cutFindings } from './cut-findings';
-import { infeedFigure, lagFigure, traverseFigure } from './cut-figures';
-import { planCut, type CutBasis, type CutPlan, type StageCutPlan } from './cut-plan';
+import { plungeRemovalRate, removalRate } from './contact';
+import {
+  infeedFigure,
+  lagFigure,
+  perTurnFigure,
+  secondsPerSetting,
+  traverseFigure,
+} from './cut-figures';
+import { planCut, type CutPlan } from './cut-plan';
+import type { CutBasis, StageCutPlan } from './cut-stage';
 import { planPasses, type Schedule, type StageFeed } from './schedule';
-import { notNegative } from './surface';
+import { notNegative, positive } from './surface';
+import { secondsPerPass, strokesPerPass } from './time';
 import {
   overrun,
+  overrunOfPlunge,
   secondsPerStroke,
   travel,
   traverseFindings,
   traverseRate,
-  typedTraverse,
 } from './traverse';
 import type { Figure, Finding, Plan } from './types';
 
@@ -22,8 +31,11 @@ export interface CutOutcome {
   schedule: Schedule | null;
   traverse: Plan['traverse'];
   infeed: Plan['infeed'];
+  /** Metal removed each second. */
+  removal: { rough: Figure; finish: Figure };
+  /** Seconds of one pass. */
+  passSeconds: { rough: Figure; finish: Figure };
   lag: Figure;
-  finishLag: Figure;
   findings: Finding[];
 }
 
@@ -37,62 +49,107 @@ export interface CutOutcome {
  * @example planCutOutcome(basis, latheRpm).schedule?.counts.rough
  */
 export function planCutOutcome(basis: CutBasis, latheRpm: Figure): CutOutcome {
-  const { input, surface } = basis;
-  const widthMm = input.wheelData?.widthMm ?? null;
+  const { input, stockMm } = basis;
   const cut = planCut(basis);
-  const rough = traverseFigure(
-    cut.rough,
-    cut.aims.rough,
-    typedTraverse(input.cut.roughTraverseMmPerRev) !== null,
-  );
-  const finish = traverseFigure(
-    cut.finish,
-    cut.aims.finish,
-    typedTraverse(input.cut.finishTraverseMmPerRev) !== null,
-  );
-  const past = overrun(widthMm, notNegative(input.cut.overrunMm));
-  const distance = travel(surface.lengthMm, widthMm, past);
-  const roughRate = traverseRate(rough, latheRpm);
-  const seconds = secondsPerStroke(distance, roughRate);
+  const traverse = traverseOf(basis, cut, latheRpm);
   const schedule = scheduleOf(basis, cut);
   const lag = lagFigure(cut.rough);
+  const strokes = strokesPerPass(input.cut.strokes);
   return {
     cut,
     schedule,
-    traverse: {
-      rough,
-      finish,
-      roughRate,
-      finishRate: traverseRate(finish, latheRpm),
-      overrun: past,
-      travel: distance,
-      secondsPerStroke: seconds,
-      plunge: surface.lengthMm !== null && widthMm !== null && surface.lengthMm <= widthMm,
+    traverse,
+    infeed: infeedOf(basis, cut),
+    removal: {
+      rough: removalOf(basis, cut.rough, traverse.roughRate),
+      finish: removalOf(basis, cut.finish, traverse.finishRate),
     },
-    infeed: {
-      rough: infeedFigure(cut.rough),
-      finish: infeedFigure(cut.finish),
-      roughDivisions: cut.rough?.setting.divisions ?? null,
-      finishDivisions: cut.finish?.setting.divisions ?? null,
-      governedBy: cut.rough?.by ?? null,
-      compoundAngle: cut.finish?.setting.compoundAngle ?? cut.rough?.setting.compoundAngle ?? null,
+    passSeconds: {
+      rough: passSeconds(traverse, traverse.roughRate, { stage: cut.rough, latheRpm, strokes }),
+      finish: passSeconds(traverse, traverse.finishRate, { stage: cut.finish, latheRpm, strokes }),
     },
     lag,
-    finishLag: lagFigure(cut.finish),
     findings: [
       ...traverseFindings({
-        widthMm,
-        inside: surface.side === 'inside',
-        overrun: past,
+        widthMm: input.wheelData?.widthMm ?? null,
+        inside: basis.surface.side === 'inside',
         aims: cut.aims,
-        rough,
-        finish,
         byHand: cut.rough?.byHand ?? false,
-        seconds,
+        traverse,
       }),
-      ...cutFindings({ cut, lag, schedule, stockMm: basis.stockMm, rules: input.rules }),
+      ...cutFindings({ cut, lag, schedule, stockMm, rules: input.rules }),
     ],
   };
+}
+
+function traverseOf(basis: CutBasis, cut: CutPlan, latheRpm: Figure): Plan['traverse'] {
+  const { input, surface, plungeMm } = basis;
+  const widthMm = input.wheelData?.widthMm ?? null;
+  const typed = (mm: number | null) => positive(mm) !== null;
+  const rough = traverseFigure(cut.rough, cut.aims.rough, typed(input.cut.roughTraverseMmPerRev));
+  const finish = traverseFigure(
+    cut.finish,
+    cut.aims.finish,
+    typed(input.cut.finishTraverseMmPerRev),
+  );
+  const past =
+    plungeMm === null
+      ? overrun(widthMm, notNegative(input.cut.overrunMm))
+      : overrunOfPlunge(widthMm, plungeMm);
+  const distance = travel(surface.lengthMm, widthMm, past);
+  const roughRate = traverseRate(rough, latheRpm);
+  return {
+    rough,
+    finish,
+    roughRate,
+    finishRate: traverseRate(finish, latheRpm),
+    overrun: past,
+    travel: distance,
+    secondsPerStroke:
+      plungeMm === null
+        ? secondsPerStroke(distance, roughRate)
+        : secondsPerSetting(cut.rough, latheRpm),
+    plunge: plungeMm !== null,
+  };
+}
+
+function infeedOf({ plungeMm }: CutBasis, { rough, finish }: CutPlan): Plan['infeed'] {
+  return {
+    rough: infeedFigure(rough),
+    finish: infeedFigure(finish),
+    perTurn:
+      plungeMm === null ? null : { rough: perTurnFigure(rough), finish: perTurnFigure(finish) },
+    roughDivisions: rough?.setting.divisions ?? null,
+    finishDivisions: finish?.setting.divisions ?? null,
+    governedBy: rough?.by ?? null,
+    compoundAngle: finish?.setting.compoundAngle ?? rough?.setting.compoundAngle ?? null,
+  };
+}
+
+function removalOf(
+  { surface, plungeMm, latheRpm }: CutBasis,
+  stage: StageCutPlan | null,
+  rate: Figure,
+): Figure {
+  const { diameterMm } = surface;
+  return plungeMm === null
+    ? removalRate(diameterMm, stage?.setting.infeedMm ?? null, rate.value)
+    : plungeRemovalRate({
+        workMm: diameterMm,
+        widthMm: plungeMm,
+        infeedMmPerRev: stage?.plunge?.perTurnMm ?? null,
+        workRpm: latheRpm,
+      });
+}
+
+function passSeconds(
+  { travel: distance, plunge }: Plan['traverse'],
+  rate: Figure,
+  pass: { stage: StageCutPlan | null; latheRpm: Figure; strokes: number },
+): Figure {
+  return plunge
+    ? secondsPerSetting(pass.stage, pass.latheRpm)
+    : secondsPerPass(secondsPerStroke(distance, rate), pass.strokes);
 }
 
 function scheduleOf(basis: CutBasis, cut: CutPlan): Schedule | null {

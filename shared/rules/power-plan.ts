@@ -1,4 +1,4 @@
-import { equivalentDiameter, removalRate } from './contact';
+import { equivalentDiameter } from './contact';
 import { burnFindings, burnThreshold } from './energy';
 import { finding } from './findings';
 import { quantity } from './figures';
@@ -13,8 +13,8 @@ export interface CuttingForce {
   normal: Figure;
 }
 
-/** What one stage's cut is worked out from. */
-export interface StageLoad {
+/** What the forces of a cut are worked out from. */
+export interface CutLoad {
   surface: Surface;
   energy: Figure;
   wheelSpeed: Figure;
@@ -25,14 +25,12 @@ export interface StageLoad {
  * Metal removed, power and forces of one stage in its steady state.
  *
  * @param load - surface, specific energy, wheel speed and force ratio.
- * @param infeedMm - infeed on radius, mm.
- * @param rate - traverse, mm/min.
+ * @param removal - metal removed, mm3/s.
  * @returns the figures; null while something they need is missing.
  * @source kalpakjian-force
- * @example cuttingForce(load, 0.01, rate).normal.value
+ * @example cuttingForce(load, removal).normal.value
  */
-export function cuttingForce(load: StageLoad, infeedMm: number | null, rate: Figure): CuttingForce {
-  const removal = removalRate(load.surface.diameterMm, infeedMm, rate.value);
+export function cuttingForce(load: CutLoad, removal: Figure): CuttingForce {
   const power = grindingPower(load.energy, removal);
   const tangential = tangentialForce(power, load.wheelSpeed);
   return { removal, power, tangential, normal: normalForce(tangential, load.forceRatio) };
@@ -41,25 +39,25 @@ export function cuttingForce(load: StageLoad, infeedMm: number | null, rate: Fig
 /**
  * Force, power and heat of the rough stage, and what speaks against them.
  *
- * @param spec - the stage's load and force, infeed on radius in mm, wheel diameter in mm, work speed in m/min,
- * the power available in W, and whether the burning threshold holds for the material.
+ * @param spec - the load, equivalent diameter, metal removed, infeed on radius in mm, work speed in m/min,
+ * motor power in W and the share of it that may be used, and whether the work is steel.
  * @returns figures and findings.
  * @source malkin-burn
  * @example planPower(spec).findings
  */
 export function planPower(spec: {
-  load: StageLoad;
-  force: CuttingForce;
+  load: CutLoad;
+  contact: Figure;
+  removal: Figure;
   infeedMm: number | null;
-  wheelMm: number | null;
   workMPerMin: number | null;
-  availableW: number | null;
+  motorW: number | null;
+  share: number;
   steel: boolean;
 }): { power: Plan['power']; findings: Finding[] } {
-  const { load, force, infeedMm, availableW } = spec;
-  const contact = equivalentDiameter(spec.wheelMm, load.surface.diameterMm, load.surface.side);
-  const threshold = burnThreshold(contact, infeedMm, spec.workMPerMin);
-  const watts = force.power.value;
+  const { load, infeedMm } = spec;
+  const force = cuttingForce(load, spec.removal);
+  const threshold = burnThreshold(spec.contact, infeedMm, spec.workMPerMin);
   return {
     power: {
       removalRate: force.removal,
@@ -69,14 +67,17 @@ export function planPower(spec: {
       burnThreshold: threshold,
     },
     findings: [
-      ...(watts !== null && availableW !== null && watts > availableW + 1e-9
-        ? [
-            finding('power-above-share', {
-              figures: { power: quantity(watts, 'W'), limit: quantity(availableW, 'W') },
-            }),
-          ]
-        : []),
+      ...powerFindings(force.power.value, spec.motorW === null ? null : spec.motorW * spec.share),
       ...(spec.steel ? burnFindings(load.energy, threshold, infeedMm) : []),
     ],
   };
+}
+
+function powerFindings(watts: number | null, availableW: number | null): Finding[] {
+  if (watts === null || availableW === null || watts <= availableW + 1e-9) return [];
+  return [
+    finding('power-above-share', {
+      figures: { power: quantity(watts, 'W'), limit: quantity(availableW, 'W') },
+    }),
+  ];
 }

@@ -44,7 +44,7 @@ export function tighteningHand(wheel: Rotation): Exclude<ThreadHand, 'none'> {
   return seenFromNut === 'anticlockwise' ? 'right' : 'left';
 }
 
-interface Turning {
+export interface Turning {
   side: 'outside' | 'inside';
   lathe: LatheData | null;
   grinder: GrinderData | null;

@@ -103,3 +103,17 @@ export function sparkOutPasses(springMm: number, leftMm: number, fraction: numbe
   const passes = Math.ceil(Math.log(leftMm / springMm) / Math.log(1 - fraction) - 1e-9);
   return Math.min(Math.max(passes, 0), MOST_SPARK_OUTS);
 }
+
+/** The cut fraction after several turns at one setting: each takes the same share of what is left. */
+export function fractionOverTurns(oneTurn: Figure, turns: number): Figure {
+  return figure({
+    unit: '1',
+    formula: '{K} = 1 - (1 - {K_1})^{N}',
+    source: 'derived-spring',
+    terms: [
+      termOf('K_1', 'cut fraction of one turn, over the whole width', oneTurn),
+      term('N', 'turns of the work at each setting', [turns, '1']),
+    ],
+    compute: (fraction, count) => 1 - (1 - fraction) ** count,
+  });
+}

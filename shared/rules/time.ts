@@ -1,5 +1,5 @@
 import type { PassStrokes } from '../domain/setups';
-import { figure, term } from './figures';
+import { figure, term, termOf } from './figures';
 import type { Schedule } from './schedule';
 import type { DressStage, Figure, Plan } from './types';
 
@@ -10,42 +10,47 @@ export function strokesPerPass(strokes: PassStrokes | null): number {
   return strokes === 'one stroke' ? 1 : 2;
 }
 
+/** Seconds of one pass, from the seconds of one stroke and the strokes in a pass. */
+export function secondsPerPass(stroke: Figure, strokes: number): Figure {
+  return figure({
+    unit: 's',
+    formula: '{n} {t}',
+    source: 'derived-time',
+    terms: [term('n', 'strokes in a pass', [strokes, '1']), termOf('t', 'one stroke', stroke)],
+    compute: (count, seconds) => count * seconds,
+  });
+}
+
 /**
  * How long the wheel is at work: every pass at its stage's traverse, and every dressing pass. Measuring and
  * setting come on top.
  *
- * @param spec - the schedule (null while unknown), travel of one stroke, traverse of each stage, strokes in a
- * pass, and both dressings (null while unknown).
+ * @param spec - the schedule (null while unknown), seconds of a pass in each stage, and both dressings (null
+ * while unknown).
  * @returns minutes, unrounded.
  * @source derived-time
- * @example planTime({ schedule, travel, rough, finish, strokes: 'both strokes', dressing }).total.value
+ * @example planTime({ schedule, passSeconds, dressing }).total.value
  */
 export function planTime(spec: {
   schedule: Schedule | null;
-  travel: Figure;
-  rough: Figure;
-  finish: Figure;
-  strokes: PassStrokes | null;
+  passSeconds: { rough: Figure; finish: Figure };
   dressing: { rough: DressStage; finish: DressStage } | null;
 }): Plan['time'] {
-  const { schedule, dressing } = spec;
+  const { schedule, passSeconds, dressing } = spec;
   const counts = schedule?.counts;
   const rough = counts === undefined ? null : counts.rough + counts['rough spark-out'];
   const finish = counts === undefined ? null : counts.finish + counts['finish spark-out'];
   const grinding = figure({
     unit: 'min',
-    formula: '{n} {travel} ({i_r} / {v_r} + {i_f} / {v_f})',
+    formula: '({i_r} {t_r} + {i_f} {t_f}) / 60',
     source: 'derived-time',
     terms: [
-      term('n', 'strokes in a pass', [strokesPerPass(spec.strokes), '1']),
-      term('travel', 'travel of one stroke', [spec.travel.value, 'mm']),
       term('i_r', 'rough passes with spark-outs', [rough, 'passes']),
-      term('v_r', 'traverse, rough', [spec.rough.value, 'mm/min']),
+      termOf('t_r', 'each', passSeconds.rough),
       term('i_f', 'finish passes with spark-outs', [finish, 'passes']),
-      term('v_f', 'traverse, finish', [spec.finish.value, 'mm/min']),
+      termOf('t_f', 'each', passSeconds.finish),
     ],
-    compute: (strokes, mm, roughs, roughRate, finishes, finishRate) =>
-      strokes * mm * (roughs / roughRate + finishes / finishRate),
+    compute: minutes,
     note: 'Measuring and setting come on top.',
   });
   const dressingTime = figure({
@@ -58,7 +63,7 @@ export function planTime(spec: {
       term('p_f', 'dressing passes, fine', [dressing?.finish.passes ?? null, 'passes']),
       term('t_f', 'each', [dressing?.finish.secondsAcross.value ?? null, 's']),
     ],
-    compute: (roughs, rough1, fines, fine1) => (roughs * rough1 + fines * fine1) / SECONDS,
+    compute: minutes,
   });
   return {
     grinding,
@@ -75,4 +80,8 @@ export function planTime(spec: {
       note: 'The wheel at work; measuring and setting come on top.',
     }),
   };
+}
+
+function minutes(roughs: number, roughSeconds: number, fines: number, fineSeconds: number): number {
+  return (roughs * roughSeconds + fines * fineSeconds) / SECONDS;
 }

@@ -1,8 +1,7 @@
 import type { Material } from '../domain/materials';
 import { finding } from './findings';
 import { assumedTerm, figure, quantity, stated, term, termOf } from './figures';
-import { positive } from './surface';
-import type { Figure, Finding } from './types';
+import type { Figure, Finding, Plan } from './types';
 import { workRow } from './work-table';
 
 const OVERRUN_SHARE = 1 / 3;
@@ -28,6 +27,20 @@ export function overrun(widthMm: number | null, typedMm: number | null): Figure 
         terms: [term('T', 'wheel width', [widthMm, 'mm'])],
         compute: (width) => width * OVERRUN_SHARE,
       });
+}
+
+/** A wheel wider than the surface stands over both ends alike. */
+export function overrunOfPlunge(widthMm: number | null, lengthMm: number): Figure {
+  return figure({
+    unit: 'mm',
+    formula: '({T} - {L}) / 2',
+    source: 'derived-geometry',
+    terms: [
+      term('T', 'wheel width', [widthMm, 'mm']),
+      term('L', 'length of the ground surface', [lengthMm, 'mm']),
+    ],
+    compute: (width, length) => (width - length) / 2,
+  });
 }
 
 /**
@@ -143,53 +156,66 @@ export function secondsPerStroke(distance: Figure, rate: Figure): Figure {
   });
 }
 
-/** What is unusual about the overrun and the traverse. */
+/**
+ * What is unusual about the overrun and the traverse.
+ *
+ * @param spec - wheel width in mm, side, traverse aimed at, whether it is by hand, and the traverse planned.
+ * @returns findings; none where the wheel plunges.
+ * @source practice-overrun
+ * @example traverseFindings({ widthMm: 12, inside: true, aims, byHand: false, traverse })
+ */
 export function traverseFindings(spec: {
   widthMm: number | null;
   inside: boolean;
-  overrun: Figure;
   aims: TraverseAims;
-  rough: Figure;
-  finish: Figure;
   byHand: boolean;
-  seconds: Figure;
+  traverse: Plan['traverse'];
 }): Finding[] {
-  const { widthMm } = spec;
-  const found: Finding[] = [];
-  if (widthMm === null) return found;
-  found.push(...overrunFindings(spec.overrun.value, widthMm, spec.inside));
-  const stages = [
-    ['rough', spec.rough.value, spec.aims.rough.value],
-    ['finish', spec.finish.value, spec.aims.finish.value],
-  ] as const;
-  for (const [stage, traverse, usual] of stages) {
-    if (traverse === null || usual === null) continue;
-    const figures = { traverse: quantity(traverse, 'mm/rev') };
-    if (traverse >= widthMm)
-      found.push(
-        finding('traverse-over-width', {
-          figures: { ...figures, width: quantity(widthMm, 'mm') },
-          names: { stage },
-        }),
-      );
-    else if (traverse > usual + 1e-9)
-      found.push(
-        finding('traverse-above-usual', {
-          figures: { ...figures, usual: quantity(usual, 'mm/rev') },
-          names: { stage },
-        }),
-      );
-  }
-  if (spec.byHand && spec.rough.value !== null && spec.seconds.value !== null)
-    found.push(
-      finding('hand-traverse', {
-        figures: {
-          traverse: quantity(spec.rough.value, 'mm/rev'),
-          seconds: quantity(spec.seconds.value, 's'),
-        },
+  const { widthMm, aims, traverse } = spec;
+  if (widthMm === null || traverse.plunge) return [];
+  return [
+    ...overrunFindings(traverse.overrun.value, widthMm, spec.inside),
+    ...stageFindings('rough', widthMm, [traverse.rough, aims.rough]),
+    ...stageFindings('finish', widthMm, [traverse.finish, aims.finish]),
+    ...(spec.byHand ? byHandFindings(traverse) : []),
+  ];
+}
+
+function stageFindings(
+  stage: string,
+  widthMm: number,
+  [planned, aim]: [Figure, Figure],
+): Finding[] {
+  if (planned.value === null || aim.value === null) return [];
+  const traverse = quantity(planned.value, 'mm/rev');
+  if (planned.value >= widthMm)
+    return [
+      finding('traverse-over-width', {
+        figures: { traverse, width: quantity(widthMm, 'mm') },
+        names: { stage },
       }),
-    );
-  return found;
+    ];
+  return planned.value > aim.value + 1e-9
+    ? [
+        finding('traverse-above-usual', {
+          figures: { traverse, usual: quantity(aim.value, 'mm/rev') },
+          names: { stage },
+        }),
+      ]
+    : [];
+}
+
+function byHandFindings({ rough, secondsPerStroke: seconds }: Plan['traverse']): Finding[] {
+  return rough.value === null || seconds.value === null
+    ? []
+    : [
+        finding('hand-traverse', {
+          figures: {
+            traverse: quantity(rough.value, 'mm/rev'),
+            seconds: quantity(seconds.value, 's'),
+          },
+        }),
+      ];
 }
 
 function overrunFindings(past: number | null, widthMm: number, inside: boolean): Finding[] {
@@ -201,9 +227,4 @@ function overrunFindings(past: number | null, widthMm: number, inside: boolean):
   if (inside && past > widthMm * BELL_MOUTH_SHARE)
     return [finding('overrun-bell-mouths', { figures })];
   return past < widthMm * TIGHT_SHARE ? [finding('overrun-leaves-tight', { figures })] : [];
-}
-
-/** The typed traverse, or null where it is not a traverse at all. */
-export function typedTraverse(typedMm: number | null): Figure | null {
-  return positive(typedMm) === null ? null : stated('traverse, chosen', [typedMm, 'mm/rev']);
 }

@@ -174,6 +174,8 @@ export interface Plan {
   infeed: {
     rough: Figure;
     finish: Figure;
+    /** Where the wheel plunges: infeed for each turn of the work. */
+    perTurn: { rough: Figure; finish: Figure } | null;
     roughDivisions: number | null;
     finishDivisions: number | null;
     /** Which cap set the rough infeed. */

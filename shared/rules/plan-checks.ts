@@ -1,0 +1,56 @@
+import type { PlanInput } from '../domain/setups';
+import { clearanceFindings } from './clearance';
+import { guardFindings } from './guard';
+import { rotationFindings, type Turning } from './rotation';
+import { stockFindings } from './stock';
+import { notNegative, type Surface } from './surface';
+import type { Figure, Finding } from './types';
+import { unitFindings } from './unit-doubt';
+import { wheelFindings } from './wheel-checks';
+import { abrasiveFindings, isOrganic, markingOf } from './wheel-kind';
+
+/** Wheel, guard, directions, room, clean-up and units: all that is judged from the inputs and the overrun. */
+export function inputFindings(
+  input: PlanInput,
+  { surface, overrun, turning }: { surface: Surface; overrun: Figure; turning: Turning },
+): Finding[] {
+  const { operation, work, grinder, quill, wheelData: wheel } = input;
+  const overrunMm = overrun.value;
+  const open = operation === 'bore' && work.throughBore !== false;
+  return [
+    ...(wheel === null ? [] : ownFindings(input, wheel)),
+    ...guardFindings({
+      operation,
+      grinder,
+      shieldFitted: input.machine.shieldFitted,
+      overrunMm,
+      widthMm: wheel?.widthMm ?? null,
+    }),
+    ...rotationFindings(turning),
+    ...(surface.side === 'outside'
+      ? []
+      : clearanceFindings({
+          boreMm: surface.diameterMm,
+          lengthMm: surface.lengthMm,
+          overrunMm,
+          clearDepthMm: open ? null : notNegative(work.clearDepthMm),
+          wheel,
+          quill,
+        })),
+    ...stockFindings(input),
+    ...unitFindings(input),
+  ];
+}
+
+function ownFindings(input: PlanInput, wheel: NonNullable<PlanInput['wheelData']>): Finding[] {
+  return [
+    ...wheelFindings({
+      wheel,
+      quill: input.quill,
+      organicBond: isOrganic(markingOf(wheel.marking)),
+      typed: input.wheel.typed !== null,
+      today: input.today,
+    }),
+    ...abrasiveFindings(wheel.marking, input.work.material),
+  ];
+}
