@@ -61,13 +61,13 @@ export const setupsRepository = (tx: Transaction, shopId: string) => {
       .for('no key update');
 
   const find = async (id: string, lock?: Lock): Promise<Setup | null> => {
-    const query = tx
+    // Alone, before the join: a row that waited for its lock is not joined anew to what it now names.
+    if (lock) await tx.select({ id: setups.id }).from(setups).where(one(id)).for(lock);
+    const [found] = await tx
       .select({ row: setups, updatedByName: persons.name })
       .from(setups)
       .innerJoin(persons, eq(persons.id, setups.updatedBy))
-      .where(one(id))
-      .$dynamic();
-    const [found] = await (lock ? query.for(lock, { of: setups }) : query);
+      .where(one(id));
     return found ? toSetup(found) : null;
   };
 

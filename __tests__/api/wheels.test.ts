@@ -1,0 +1,151 @@
+import { wheel, wheelPage, type Wheel } from '@/shared/contracts/wheels';
+
+import { auditOf, makeShop, startApi, type Api, type TestShop } from '../support/api';
+import { wheelBody } from '../support/bodies';
+import { describeItem, problemOf } from '../support/item-tests';
+
+describeItem({
+  place: 'wheels',
+  subject: 'wheel',
+  contract: wheel,
+  body: () => wheelBody(),
+  edited: (body) => ({ ...body, data: { ...body.data, diameterNowMm: 24.1 } }),
+  wrong: {
+    tag: 'x'.repeat(21),
+    'data.marking': '',
+    'data.diameterNewMm': 0,
+    'data.diameterNowMm': 26,
+    'data.widthMm': -5,
+    'data.holeMm': 24.5,
+    'data.markedRpm': 0,
+    'data.markedSpeedMPerS': 201,
+    'data.markingReadOn': 'memory',
+    'data.mounted': { mandrelDiameterMm: 6 },
+    'data.expiresOn': '2026-02-30',
+    'data.state': 'lost',
+    'data.setAsideReason': 'It looks odd.',
+  },
+});
+
+describe('the wheels of a shop', () => {
+  let api: Api;
+  let shop: TestShop;
+  beforeAll(async () => {
+    api = await startApi();
+    shop = await makeShop(api);
+  });
+  afterAll(() => api.stop());
+
+  const at = (id = '') => `${shop.path}/wheels/${id}`.replace(/\/$/, '');
+  const make = async (change: Partial<ReturnType<typeof wheelBody>> = {}) => {
+    const body = wheelBody(change);
+    await shop.as.lead.post(at()).send(body).expect(201);
+    const { id, ...content } = body;
+    return { id, content };
+  };
+  const list = async (query: Record<string, string | number>) =>
+    wheelPage.parse((await shop.as.apprentice.get(at()).query(query).expect(200)).body);
+
+  it('have tags of their own', async () => {
+    await make({ tag: 'Rack 7' });
+    const answer = await shop.as.lead
+      .post(at())
+      .send(wheelBody({ tag: 'rack 7' }))
+      .expect(409);
+    const { code, errors } = problemOf(answer);
+    expect(code).toBe('name-taken');
+    expect(errors?.map(({ path }) => path)).toEqual(['tag']);
+  });
+
+  it('come page by page by tag, each once', async () => {
+    const other = await makeShop(api);
+    const tags = Array.from({ length: 7 }, (_, index) => `${index % 2 ? 'p' : 'P'}-${index}`);
+    for (const tag of tags)
+      await other.as.lead.post(`${other.path}/wheels`).send(wheelBody({ tag })).expect(201);
+    const seen: Wheel[] = [];
+    let after: string | null = null;
+    do {
+      const query: Record<string, string | number> = after ? { after, limit: 3 } : { limit: 3 };
+      const response = await other.as.lead.get(`${other.path}/wheels`).query(query).expect(200);
+      const page = wheelPage.parse(response.body);
+      seen.push(...page.items);
+      after = page.next;
+    } while (after);
+    expect(seen.map(({ tag }) => tag)).toEqual(tags);
+  });
+
+  it('are found by a part of tag or marking, whatever signs it holds', async () => {
+    const plain = { ...wheelBody().data, marking: 'C 36 J 8 V' };
+    const { id: byMarking } = await make({ tag: 'S1', data: plain });
+    const { id: byTag } = await make({ tag: '50%_off\\' });
+    expect((await list({ search: '36 j' })).items.map(({ id }) => id)).toEqual([byMarking]);
+    expect((await list({ search: '%_OFF\\' })).items.map(({ id }) => id)).toEqual([byTag]);
+    expect((await list({ search: '_' })).items.map(({ id }) => id)).toEqual([byTag]);
+    expect((await list({ search: 'no such wheel' })).items).toEqual([]);
+  });
+
+  it('are not listed for a query that says something else', async () => {
+    for (const query of ['limit=0', 'limit=101', 'limit=many', 'colour=red', 'after=zzz']) {
+      const answer = await shop.as.lead.get(`${at()}?${query}`).expect(400);
+      const { code, errors } = problemOf(answer);
+      expect(code).toBe('invalid-query');
+      expect(errors?.map(({ path }) => path)).toEqual([query.split('=')[0]]);
+    }
+  });
+
+  it('keep the maker’s figures of a mounted wheel', async () => {
+    const mounted = {
+      mandrelDiameterMm: 6,
+      overhangMm: 13,
+      threaded: false,
+      makerMaximumRpm: 34_500,
+    };
+    const { id } = await make({ data: { ...wheelBody().data, holeMm: 0, mounted } });
+    const { body } = await shop.as.lead.get(at(id)).expect(200);
+    expect(wheel.parse(body).data.mounted).toEqual(mounted);
+  });
+
+  it('are set aside by an apprentice, with the reason, and by nothing else changed', async () => {
+    const { id, content } = await make();
+    const setAside = {
+      ...content.data,
+      state: 'set aside' as const,
+      setAsideReason: 'A chip at the edge.',
+    };
+    const edit = (data: typeof content.data) =>
+      shop.as.apprentice.put(at(id)).send({ version: 1, ...content, data });
+    await edit({ ...content.data, diameterNowMm: 20 }).expect(403);
+    await edit({ ...setAside, diameterNowMm: 20 }).expect(403);
+    const unreasoned = await edit({ ...setAside, setAsideReason: null }).expect(400);
+    expect(problemOf(unreasoned).errors?.map(({ path }) => path)).toEqual(['data.setAsideReason']);
+    await edit(setAside).expect(200);
+    expect((await auditOf(api, id)).at(-1)).toMatchObject({
+      person_id: shop.ids.apprentice,
+      action: 'update',
+    });
+  });
+
+  it.each(['set aside', 'scrapped'] as const)('come back from %s by a lead only', async (state) => {
+    const setAsideReason = state === 'set aside' ? 'Rang dull.' : null;
+    const { id, content } = await make({
+      data: { ...wheelBody().data, state, setAsideReason },
+    });
+    const back = {
+      version: 1,
+      ...content,
+      data: { ...content.data, state: 'on the rack', setAsideReason: null },
+    };
+    await shop.as.apprentice.put(at(id)).send(back).expect(403);
+    await shop.as.machinist.put(at(id)).send(back).expect(403);
+    await shop.as.lead.put(at(id)).send(back).expect(200);
+  });
+
+  it('are scrapped by a machinist, also from set aside', async () => {
+    const aside = { state: 'set aside' as const, setAsideReason: 'Cracked.' };
+    const { id, content } = await make({ data: { ...wheelBody().data, ...aside } });
+    const scrapped = { ...content.data, state: 'scrapped', setAsideReason: null };
+    const edit = { version: 1, ...content, data: scrapped };
+    await shop.as.apprentice.put(at(id)).send(edit).expect(403);
+    await shop.as.machinist.put(at(id)).send(edit).expect(200);
+  });
+});
