@@ -199,6 +199,7 @@ const MEMORIES = {
   'memory-grinding-ratio': memory(RECALLED, 'grinding ratio of small dry wheels'),
   'memory-chip-thickness': memory(RECALLED, 'equivalent chip and specific removal'),
   'memory-dress-overlap': memory(RECALLED, 'overlap ratio of dressing'),
+  'memory-dress-depth': memory(RECALLED, 'depth and passes of dressing'),
   'memory-tip-radius': memory(RECALLED, 'tip radius of a dressing diamond'),
   'memory-quill-material': memory(RECALLED, 'steel and carbide, modulus and density'),
   'memory-wheel-density': memory(RECALLED, 'density of a vitrified wheel'),
