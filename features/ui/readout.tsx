@@ -70,11 +70,22 @@ export function ReadoutRow({ children, ruled }: { children: ReactNode; ruled?: b
 }
 
 const styles = StyleSheet.create({
-  readout: { alignItems: 'flex-start', flexShrink: 1 },
-  press: { minHeight: target.base, justifyContent: 'center', borderRadius: radius.control },
+  readout: {
+    alignItems: 'flex-start',
+    justifyContent: 'flex-end',
+    flexShrink: 1,
+    minHeight: target.base,
+  },
+  press: { borderRadius: radius.control },
   pressed: { opacity: 0.65 },
   unit: { fontWeight: '600' },
-  row: { flexDirection: 'row', flexWrap: 'wrap', columnGap: space[8], rowGap: space[3] },
+  row: {
+    flexDirection: 'row',
+    flexWrap: 'wrap',
+    alignItems: 'flex-end',
+    columnGap: space[8],
+    rowGap: space[3],
+  },
   ruled: {
     paddingBottom: space[3],
     borderBottomWidth: stroke.heavy,

@@ -69,7 +69,7 @@ export function Screen({
           </View>
           {actions}
         </View>
-        {header}
+        {header ? <View style={styles.under}>{header}</View> : null}
       </View>
       {both ? (
         <View role="main" style={styles.panes}>
@@ -103,6 +103,7 @@ const styles = StyleSheet.create({
     minHeight: 48,
     paddingHorizontal: space[4],
   },
+  under: { paddingHorizontal: space[4] },
   titles: { flexGrow: 1, flexShrink: 1, flexBasis: 0, minWidth: 0 },
   panes: { flex: 1, flexDirection: 'row' },
   first: {

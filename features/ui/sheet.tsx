@@ -1,6 +1,6 @@
 import { useId } from 'react';
-import type { ReactNode } from 'react';
-import { Modal, Pressable, ScrollView, StyleSheet, View } from 'react-native';
+import type { CSSProperties, ReactNode } from 'react';
+import { Modal, ScrollView, StyleSheet, View } from 'react-native';
 
 import { IconButton } from './button';
 import { Heading } from './text';
@@ -33,12 +33,7 @@ export function Sheet({ open, onClose, title, children, footer, shape = 'panel' 
       aria-labelledby={titleId}
     >
       <View style={[styles.space, wide && (shape === 'panel' ? styles.atRight : styles.inMiddle)]}>
-        <Pressable
-          aria-hidden
-          tabIndex={-1}
-          onPress={onClose}
-          style={[StyleSheet.absoluteFill, styles.scrim]}
-        />
+        <div aria-hidden onClick={onClose} style={SCRIM} />
         <View
           style={[
             styles.sheet,
@@ -61,11 +56,13 @@ export function Sheet({ open, onClose, title, children, footer, shape = 'panel' 
   );
 }
 
+/** Closes by touch; the keyboard has Escape and the close button. */
+const SCRIM: CSSProperties = { position: 'absolute', inset: 0, backgroundColor: colors.scrim };
+
 const styles = StyleSheet.create({
   space: { flex: 1, justifyContent: 'flex-end' },
   atRight: { flexDirection: 'row' },
   inMiddle: { justifyContent: 'center', alignItems: 'center', padding: space[6] },
-  scrim: { backgroundColor: colors.scrim, cursor: 'auto' },
   sheet: { backgroundColor: colors.sheet },
   bottom: {
     maxHeight: '88%',

@@ -11,6 +11,8 @@ export interface Column<Row> {
   cell: (row: Row) => ReactNode;
   /** Numbers stand right, in tabular figures. */
   numeric?: boolean;
+  /** Stays on one line; for short cells only. */
+  whole?: boolean;
 }
 
 interface TableProps<Row> {
@@ -84,11 +86,13 @@ export function Table<Row>({
                       style={cellStyle(column.numeric)}
                     >
                       {dense ? (
-                        <Small tone="text" align={align}>
+                        <Small tone="text" align={align} whole={column.whole}>
                           {column.cell(row)}
                         </Small>
                       ) : (
-                        <Body align={align}>{column.cell(row)}</Body>
+                        <Body align={align} whole={column.whole}>
+                          {column.cell(row)}
+                        </Body>
                       )}
                     </Cell>
                   );

@@ -30,6 +30,8 @@ export interface TextProps {
   align?: 'left' | 'center' | 'right';
   /** Cuts after this many lines; leave out wherever words carry meaning. */
   lines?: number;
+  /** Never breaks: for short words beside others. */
+  whole?: boolean;
   /** Lets a line shrink or grow beside others. */
   flex?: number;
   /** For `aria-labelledby` and `aria-describedby`. */
@@ -43,14 +45,26 @@ interface HeadingProps extends TextProps {
   level?: 1 | 2 | 3 | 4;
 }
 
+// A style of the web that React Native's types do not know.
+const ON_ONE_LINE: object = { whiteSpace: 'nowrap' };
+
 const textOf = (variant: TextStyle, defaultTone: TextTone) =>
-  function Styled({ children, tone = defaultTone, align, lines, flex, id, hidden }: TextProps) {
+  function Styled({
+    children,
+    tone = defaultTone,
+    align,
+    lines,
+    whole,
+    flex,
+    id,
+    hidden,
+  }: TextProps) {
     return (
       <Text
         id={id}
         aria-hidden={hidden}
         numberOfLines={lines}
-        style={[variant, { color: colors[tone], textAlign: align, flex }]}
+        style={[variant, { color: colors[tone], textAlign: align, flex }, whole && ON_ONE_LINE]}
       >
         {children}
       </Text>

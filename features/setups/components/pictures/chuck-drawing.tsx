@@ -1,4 +1,4 @@
-import { Circle, G, Line, Path, Polygon } from 'react-native-svg';
+import { Circle, G, Line, Path } from 'react-native-svg';
 
 import { PictureText, wordsWidth } from '@/features/ui/picture';
 import { colors } from '@/features/ui/tokens';
@@ -25,9 +25,6 @@ interface ChuckDrawingProps {
   width: number;
   textScale: number;
 }
-
-const MOST_FULL_LABELS = 4;
-const ARROW_HEAD = 9;
 
 /** Chuck face, jaws, the wheel's path at the first touch, and the offset of the jaws from the axis. */
 export function ChuckDrawing(props: ChuckDrawingProps) {
@@ -81,26 +78,30 @@ interface OffsetProps {
 
 /** From the spindle axis to the middle of the jaws; its word stands on the other side of the axis. */
 function Offset({ layout: { centre }, length, highSpotDeg, textScale }: OffsetProps) {
-  const tip = polar(centre, length, highSpotDeg);
-  const neck = polar(centre, Math.max(length - ARROW_HEAD, 0), highSpotDeg);
-  const wing = (side: 90 | -90) => polar(neck, ARROW_HEAD / 2, highSpotDeg + side);
-  const head = [tip, wing(90), wing(-90)].map(({ x, y }) => `${x},${y}`).join(' ');
-  const below = Math.cos((highSpotDeg * Math.PI) / 180) >= 0;
+  const middle = polar(centre, length, highSpotDeg);
+  const wordBelow = middle.y <= centre.y;
   return (
     <>
       <Line
         x1={centre.x}
         y1={centre.y}
-        x2={neck.x}
-        y2={neck.y}
+        x2={middle.x}
+        y2={middle.y}
         stroke={colors.metalEdge}
         strokeWidth={2}
       />
-      {length > ARROW_HEAD ? <Polygon points={head} fill={colors.metalEdge} /> : null}
+      <Circle
+        cx={middle.x}
+        cy={middle.y}
+        r={4}
+        fill={colors.page}
+        stroke={colors.metalEdge}
+        strokeWidth={2}
+      />
       <Circle cx={centre.x} cy={centre.y} r={4} fill={colors.metalEdge} />
       <PictureText
         x={centre.x}
-        y={centre.y + (below ? 20 : -11) * textScale}
+        y={centre.y + (wordBelow ? 20 : -11) * textScale}
         anchor="middle"
         color="textSoft"
         size="small"
@@ -120,7 +121,7 @@ interface JawLabelProps extends ChuckDrawingProps {
 /** Beside a jaw that stands up or down, under the end of any other; always inside the drawing. */
 function JawLabel({ plan, contact, layout, units, boreMm, padWidthMm, ...size }: JawLabelProps) {
   const jaws = plan.contacts.length;
-  const full = jaws <= MOST_FULL_LABELS;
+  const full = hasFullLabels(plan);
   const words = full ? jawLabel(contact, jaws, units) : String(contact.jaw);
   const { centre, outerRadius } = layout;
   const angle = (contact.angleDeg * Math.PI) / 180;

@@ -2,9 +2,10 @@ import { arc } from 'd3-shape';
 
 import type { JawContact, JawPlan } from '@/shared/rules/types';
 
-const NICE = [1, 2, 4, 5, 8, 10, 20, 40, 50, 80, 100, 200, 400, 500, 800, 1000, 2000, 5000, 10000];
+const ROUND = [1, 1.5, 2, 3, 4, 5, 6, 8];
+const NICE = [1, 10, 100, 1000].flatMap((decade) => ROUND.map((step) => step * decade));
 /** The largest gap is drawn about this share of the bore's radius. */
-const GAP_SHARE = 0.34;
+const GAP_SHARE = 0.45;
 const FACE_POINTS = 12;
 
 export interface Point {
@@ -41,6 +42,10 @@ export interface ChuckLayout {
   height: number;
 }
 
+/** More jaws than this carry their numbers alone; the list says the rest. */
+const MOST_FULL_LABELS = 4;
+export const hasFullLabels = (plan: JawPlan) => plan.contacts.length <= MOST_FULL_LABELS;
+
 const OUTER_SHARE = 0.43;
 const FACE_SHARE = 0.82;
 const PATH_SHARE = 0.52;
@@ -52,14 +57,14 @@ export function chuckLayout(width: number, plan: JawPlan, textScale: number): Ch
     FACE_SHARE,
     ...plan.contacts.map(({ angleDeg }) => -Math.cos((angleDeg * Math.PI) / 180)),
   );
-  const margin = 8 * textScale;
+  const margin = (hasFullLabels(plan) ? 8 : 18) * textScale;
   const centre = { x: width / 2, y: margin + outerRadius };
   return {
     centre,
     outerRadius,
     faceRadius: outerRadius * FACE_SHARE,
     pathRadius: outerRadius * PATH_SHARE,
-    height: centre.y + outerRadius * lowest + 2 * margin,
+    height: centre.y + outerRadius * lowest + 18 * textScale,
   };
 }
 

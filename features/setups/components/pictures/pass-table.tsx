@@ -35,8 +35,14 @@ export function PassTable({ passes, units }: { passes: readonly Pass[]; units: U
   const of = (cell: (group: PassGroup) => string) => (row: Row) =>
     row === 'between' ? '' : cell(row);
   const columns: Column<Row>[] = [
-    { id: 'passes', label: 'Passes', cell: of(groupName) },
-    { id: 'dial', label: 'Dial', numeric: true, cell: of((group) => dialWords(group, units)) },
+    { id: 'passes', label: 'Passes', whole: true, cell: of(groupName) },
+    {
+      id: 'dial',
+      label: 'Dial',
+      numeric: true,
+      whole: true,
+      cell: of((group) => dialWords(group, units)),
+    },
     {
       id: 'infeed',
       label: `Infeed, ${unit}`,
