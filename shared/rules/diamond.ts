@@ -25,7 +25,7 @@ const STONES: readonly (readonly [index: number, carats: number])[] = [
 const COARSE_UNDER = 46;
 const HARD_ABOVE = 'M';
 const FAST_ABOVE_FT_PER_MIN = 6500;
-/** Doubles must not push an index of exactly 30 into the next row. */
+/** Doubles must not push an index of exactly 30, or a speed of exactly 6 500 ft/min, over the edge. */
 const SLACK = 1e-9;
 
 /** What wears a diamond faster; null where it is not known and does not count. */
@@ -52,7 +52,8 @@ export function diamondSizesUp({ marking, dry, wheelMPerS }: DressingConditions)
     dry,
     conventional !== null && conventional.grain < COARSE_UNDER,
     conventional !== null && conventional.grade > HARD_ABOVE,
-    wheelMPerS !== null && convertUnit(wheelMPerS, 'm/s', 'ft/min') > FAST_ABOVE_FT_PER_MIN,
+    wheelMPerS !== null &&
+      convertUnit(wheelMPerS, 'm/s', 'ft/min') > FAST_ABOVE_FT_PER_MIN * (1 + SLACK),
   ];
   return Math.ceil(reasons.filter(Boolean).length / 2);
 }
