@@ -5,7 +5,12 @@ import type { WheelData } from '../domain/wheels';
 
 const THREE_JAWS = 3;
 
-/** A new setup with nothing answered yet, but three jaws, which most chucks have. */
+/**
+ * A new setup with nothing answered yet, but three jaws, which most chucks have.
+ *
+ * @param operation - which kind of work the setup is for.
+ * @returns inputs with null for everything unanswered.
+ */
 export function emptySetupInputs(operation: Operation): SetupInputs {
   return {
     operation,

@@ -49,7 +49,14 @@ export function planBeltSteps(
   return { rows, suggested: chosenId(suggested) };
 }
 
-/** True and false where that is known; null while the wheel, and so its limit, is not. */
+/**
+ * True and false where that is known; null while the wheel, and so its limit, is not.
+ *
+ * @param rpm - rpm held against the limits; null while unknown.
+ * @param lowest - the lowest limit known.
+ * @param wheelKnown - whether the wheel's own limits are among them.
+ * @returns whether the rpm is within the limits.
+ */
 export function isAllowed(
   rpm: number | null,
   lowest: SpeedLimit | undefined,
@@ -60,7 +67,14 @@ export function isAllowed(
   return wheelKnown ? true : null;
 }
 
-/** Findings about the chosen step, and about a grinder that has no step slow enough. */
+/**
+ * Findings about the chosen step, and about a grinder that has no step slow enough.
+ *
+ * @param steps - the rows of planBeltSteps.
+ * @param chosen - the chosen row; null while none is.
+ * @param governing - the lowest limit known.
+ * @returns a Stop for each.
+ */
 export function beltStepFindings(
   { rows }: BeltSteps,
   chosen: BeltStepPlan | null,
@@ -82,7 +96,12 @@ export function beltStepFindings(
   return found;
 }
 
-/** What the wheel's own speed is like for grinding; never a limit. */
+/**
+ * What the wheel's own speed is like for grinding; never a limit.
+ *
+ * @param speed - wheel speed, m/s.
+ * @returns a note, or a Check where the wheel hardly grinds.
+ */
 export function wheelSpeedFindings(speed: Figure): Finding[] {
   if (speed.value === null) return [];
   const figures = {

@@ -1,5 +1,4 @@
-import type { Operation } from '../domain/setups';
-import type { PlanInput } from '../domain/setups';
+import type { Operation, PlanInput } from '../domain/setups';
 import { GUARDING_CAUTIONS } from './cautions-guarding';
 import { WORKING_CAUTIONS } from './cautions-working';
 import type { Caution } from './caution';

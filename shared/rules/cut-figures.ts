@@ -14,12 +14,23 @@ const CAP_WORDS: Record<StageCutPlan['by'], string> = {
   typed: 'as chosen',
 };
 
-/** A figure that nothing is known about yet. */
+/**
+ * A figure that nothing is known about yet.
+ *
+ * @param unit - unit of the figure.
+ * @param meaning - what it will be.
+ * @returns a figure without a value.
+ */
 export function unknown(unit: Figure['unit'], meaning: string): Figure {
   return stated(meaning, [null, unit]);
 }
 
-/** The infeed of a stage as it will be set, with every cap that it stays under. */
+/**
+ * The infeed of a stage as it will be set, with every cap that it stays under.
+ *
+ * @param stage - the planned stage; null while unknown.
+ * @returns mm on radius.
+ */
 export function infeedFigure(stage: StageCutPlan | null): Figure {
   if (stage === null) return unknown('mm', 'infeed on radius');
   const { setting, wantedMm, by, typed, caps } = stage;
@@ -41,7 +52,14 @@ export function infeedFigure(stage: StageCutPlan | null): Figure {
   });
 }
 
-/** Traverse of a stage per work revolution, from the aim to the feed that is there. */
+/**
+ * Traverse of a stage per work revolution, from the aim to the feed that is there.
+ *
+ * @param stage - the planned stage; null while unknown.
+ * @param aim - traverse aimed at, mm per work revolution.
+ * @param typed - whether the traverse was chosen by hand.
+ * @returns mm per work revolution; null where the wheel plunges.
+ */
 export function traverseFigure(stage: StageCutPlan | null, aim: Figure, typed: boolean): Figure {
   if (stage === null) return unknown('mm/rev', 'traverse per work revolution');
   const { traverseMm } = stage;
@@ -60,7 +78,12 @@ export function traverseFigure(stage: StageCutPlan | null, aim: Figure, typed: b
   });
 }
 
-/** What stays as spring between even passes of a stage. */
+/**
+ * What stays as spring between even passes of a stage.
+ *
+ * @param stage - the planned stage; null while unknown.
+ * @returns mm.
+ */
 export function lagFigure(stage: StageCutPlan | null): Figure {
   return figure({
     unit: 'mm',
@@ -87,7 +110,12 @@ function noTraverse(): Figure {
   });
 }
 
-/** Infeed for each turn of the work when plunging. */
+/**
+ * Infeed for each turn of the work when plunging.
+ *
+ * @param stage - the planned stage; null while unknown.
+ * @returns mm per work revolution; null where the wheel traverses.
+ */
 export function perTurnFigure(stage: StageCutPlan | null): Figure {
   return figure({
     unit: 'mm/rev',
@@ -101,7 +129,13 @@ export function perTurnFigure(stage: StageCutPlan | null): Figure {
   });
 }
 
-/** Seconds to stay at each setting when plunging, until the turns it takes have gone by. */
+/**
+ * Seconds to stay at each setting when plunging, until the turns it takes have gone by.
+ *
+ * @param stage - the planned stage; null while unknown.
+ * @param latheRpm - lathe speed.
+ * @returns seconds; null where the wheel traverses.
+ */
 export function secondsPerSetting(stage: StageCutPlan | null, latheRpm: Figure): Figure {
   return figure({
     unit: 's',

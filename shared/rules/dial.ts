@@ -16,7 +16,12 @@ export interface Dial {
   compoundDivisionMm: number | null;
 }
 
-/** The cross-slide's dial on radius: a dial that reads diameter moves half of what it is marked. */
+/**
+ * The cross-slide's dial on radius: a dial that reads diameter moves half of what it is marked.
+ *
+ * @param lathe - the lathe; null while not chosen.
+ * @returns the dial; null without a lathe.
+ */
 export function dialOf(lathe: LatheData | null): Dial | null {
   const marked = positive(lathe?.crossSlideDivisionMm ?? null);
   if (lathe === null || marked === null) return null;

@@ -15,7 +15,13 @@ export type FindingCode = keyof typeof FINDINGS;
 
 type Details = Partial<Pick<Finding, 'level' | 'figures' | 'names' | 'part'>>;
 
-/** A finding at its usual level unless another is named. */
+/**
+ * A finding at its usual level unless another is named.
+ *
+ * @param code - which finding.
+ * @param details - level, figures and names.
+ * @returns the finding.
+ */
 export function finding(code: FindingCode, details: Details = {}): Finding {
   const { part, levels, source } = FINDINGS[code];
   return { code, part, level: levels[0], figures: {}, names: {}, source, ...details };

@@ -2,6 +2,7 @@ import type { PlanInput } from '../domain/setups';
 import { cautionsFor } from './cautions';
 import { equivalentDiameter } from './contact';
 import { unknown } from './cut-figures';
+import { planDressing } from './dressing';
 import { deepestWithoutBurn, specificEnergy } from './energy';
 import { effectiveQuill } from './mandrel';
 import { needsOf } from './needs';
@@ -17,6 +18,7 @@ import { planTime } from './time';
 import type { Plan } from './types';
 import { verdictOf } from './verdict';
 import { RULES_VERSION } from './version';
+import { markingOf } from './bond';
 import { planWorkSpeed, workSpeedFindings } from './work-speed';
 import { isSteel } from './work-table';
 
@@ -98,6 +100,16 @@ export function planSetup(given: PlanInput): Plan {
     lag: outcome.lag,
     finishForce: cuttingForce(load, outcome.removal.finish).normal,
   });
+  const { rough, finish, diamond, ...dressing } = planDressing({
+    dress: input.dress,
+    rules: input.rules,
+    marking: markingOf(wheel?.marking ?? null),
+    dry: true,
+    wheelMPerS: speed.wheelSpeed.value,
+    diameterMm: wheel?.diameterNewMm ?? null,
+    widthMm: wheel?.widthMm ?? null,
+    spindle: speed.spindleRpm,
+  });
   const directions = {
     side: surface.side,
     lathe,
@@ -116,6 +128,7 @@ export function planSetup(given: PlanInput): Plan {
     ...outcome.findings,
     ...power.findings,
     ...bent.findings,
+    ...dressing.findings,
   ];
   const needs = needsOf(input);
   return {
@@ -149,13 +162,13 @@ export function planSetup(given: PlanInput): Plan {
       rough: outcome.cut.rough?.fraction ?? unknown('1', 'cut fraction'),
       finish: outcome.cut.finish?.fraction ?? unknown('1', 'cut fraction'),
     },
-    dressing: null,
+    dressing: { rough, finish, diamond },
     quill: bent.quill,
     power: power.power,
     time: planTime({
       schedule: outcome.schedule,
       passSeconds: outcome.passSeconds,
-      dressing: null,
+      dressing: { rough, finish },
     }),
   };
 }

@@ -52,7 +52,12 @@ export function infeedCaps(
   ];
 }
 
-/** The least of some caps. */
+/**
+ * The least of some caps.
+ *
+ * @param caps - any number of caps.
+ * @returns the one with the least value; null without any.
+ */
 export function leastCap(caps: readonly Cap[]): Cap | null {
   return caps.reduce<Cap | null>(
     (least, cap) => (least === null || cap.valueMm < least.valueMm ? cap : least),

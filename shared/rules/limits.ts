@@ -160,7 +160,12 @@ export function speedLimits(parts: {
   return limits.sort((a, b) => limitRpm(a) - limitRpm(b));
 }
 
-/** What a limit allows, rpm; 0 where it could not be worked out, since unknown means stop. */
+/**
+ * What a limit allows, rpm; 0 where it could not be worked out, since unknown means stop.
+ *
+ * @param limit - one limit.
+ * @returns whole rpm.
+ */
 export function limitRpm(limit: SpeedLimit): number {
   return limit.rpm.value ?? 0;
 }

@@ -25,7 +25,13 @@ export function leastFlange(diameterMm: number | null): Figure {
   });
 }
 
-/** Mounted wheels have a mandrel, and small wheels for bores a screw: neither takes flanges. */
+/**
+ * Mounted wheels have a mandrel, and small wheels for bores a screw: neither takes flanges.
+ *
+ * @param wheel - the wheel.
+ * @param side - where it grinds.
+ * @returns whether flanges and blotters belong on it.
+ */
 export function takesFlanges(wheel: WheelData, side: 'outside' | 'inside'): boolean {
   return (
     wheel.mounted === null && !(side === 'inside' && wheel.diameterNewMm < INTERNAL_WITHOUT_MM)

@@ -7,9 +7,16 @@ import { notNegative, type Surface } from './surface';
 import type { Figure, Finding } from './types';
 import { unitFindings } from './unit-doubt';
 import { wheelFindings } from './wheel-checks';
-import { abrasiveFindings, isOrganic, markingOf } from './wheel-kind';
+import { isOrganic, markingOf } from './bond';
+import { markFindings } from './recommended-marks';
 
-/** Wheel, guard, directions, room, clean-up and units: all that is judged from the inputs and the overrun. */
+/**
+ * Wheel, guard, directions, room, clean-up and units: all that is judged from the inputs and the overrun.
+ *
+ * @param input - the setup.
+ * @param known - the ground surface, the overrun, and how wheel and work turn.
+ * @returns all findings of these subjects.
+ */
 export function inputFindings(
   input: PlanInput,
   { surface, overrun, turning }: { surface: Surface; overrun: Figure; turning: Turning },
@@ -51,6 +58,6 @@ function ownFindings(input: PlanInput, wheel: NonNullable<PlanInput['wheelData']
       typed: input.wheel.typed !== null,
       today: input.today,
     }),
-    ...abrasiveFindings(wheel.marking, input.work.material),
+    ...markFindings(wheel.marking, input.work.material),
   ];
 }

@@ -10,7 +10,13 @@ export interface PlanStiffness {
   atWheel: Figure;
 }
 
-/** Quill, post and work of a setup, as stiff as they are together. */
+/**
+ * Quill, post and work of a setup, as stiff as they are together.
+ *
+ * @param input - the setup.
+ * @param surface - the ground surface.
+ * @returns N/mm; null inside while a part is unknown.
+ */
 export function stiffnessOf(input: PlanInput, surface: Surface): PlanStiffness {
   const own = quillStiffness(input.quill);
   const atWheel = stiffnessAtWheel({

@@ -1,4 +1,3 @@
-import { equivalentDiameter } from './contact';
 import { burnFindings, burnThreshold } from './energy';
 import { finding } from './findings';
 import { quantity } from './figures';

@@ -64,7 +64,12 @@ function bending(quill: Pick<QuillData, 'segments' | 'material'>): Bending | nul
   return bendingOf(quill.segments, QUILL_MATERIAL[quill.material]);
 }
 
-/** Length of a quill from the wheel end to the bearing, mm. */
+/**
+ * Length of a quill from the wheel end to the bearing, mm.
+ *
+ * @param segments - segments from the wheel end.
+ * @returns mm.
+ */
 export function quillLength(segments: readonly QuillSegment[]): number {
   return segments.reduce((sum, { lengthMm }) => sum + lengthMm, 0);
 }
@@ -104,7 +109,12 @@ export function quillStiffness(quill: QuillData | null): Figure {
   });
 }
 
-/** Mass of a wheel, kg, from its sizes and an assumed density. */
+/**
+ * Mass of a wheel, kg, from its sizes and an assumed density.
+ *
+ * @param wheel - diameter now, width and hole, mm.
+ * @returns kg.
+ */
 export function wheelMassKg(wheel: {
   diameterNowMm: number;
   widthMm: number;
@@ -180,7 +190,13 @@ export function quillTaper(
 /** The share of the tolerance that the quill's taper may take, on diameter, before it is worth a word. */
 const TAPER_SHARE = 0.25;
 
-/** A note when the quill's taper, on diameter, takes a good part of the tolerance. */
+/**
+ * A note when the quill's taper, on diameter, takes a good part of the tolerance.
+ *
+ * @param taper - difference of radius across the wheel, mm.
+ * @param toleranceMm - permitted error of size on diameter, mm.
+ * @returns one note, or none.
+ */
 export function taperFindings(taper: Figure, toleranceMm: number | null): Finding[] {
   if (taper.value === null || toleranceMm === null) return [];
   const onDiameter = 2 * taper.value;

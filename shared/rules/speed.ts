@@ -107,7 +107,12 @@ export function worstRpm(motorRpm: number, step: Pulleys & Pick<BeltStep, 'measu
       });
 }
 
-/** Spindle figures of every belt step, in the order recorded. */
+/**
+ * Spindle figures of every belt step, in the order recorded.
+ *
+ * @param grinder - motor speed and belt steps.
+ * @returns worst and expected rpm of each step.
+ */
 export function stepSpeeds(grinder: GrinderData) {
   return grinder.beltSteps.map((step) => ({
     step,

@@ -78,7 +78,14 @@ export function steadyLag(infeedMm: number, fraction: number): number {
   return (infeedMm * (1 - fraction)) / fraction;
 }
 
-/** One pass: the spring it starts with and what is set in come together; part is cut, the rest springs. */
+/**
+ * One pass: the spring it starts with and what is set in come together; part is cut, the rest springs.
+ *
+ * @param infeedMm - infeed on radius, mm; 0 when sparking out.
+ * @param springMm - spring at the start, mm.
+ * @param fraction - cut fraction.
+ * @returns metal cut on radius and spring left, mm.
+ */
 export function takePass(
   infeedMm: number,
   springMm: number,
@@ -104,7 +111,13 @@ export function sparkOutPasses(springMm: number, leftMm: number, fraction: numbe
   return Math.min(Math.max(passes, 0), MOST_SPARK_OUTS);
 }
 
-/** The cut fraction after several turns at one setting: each takes the same share of what is left. */
+/**
+ * The cut fraction after several turns at one setting: each takes the same share of what is left.
+ *
+ * @param oneTurn - cut fraction of one turn.
+ * @param turns - turns at one setting, 1 or more.
+ * @returns the cut fraction of all of them.
+ */
 export function fractionOverTurns(oneTurn: Figure, turns: number): Figure {
   return figure({
     unit: '1',

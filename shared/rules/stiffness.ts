@@ -56,7 +56,13 @@ export function workStiffness(work: WorkInputs, surface: Surface): Figure | 'sti
   });
 }
 
-/** Stiffness of post and slides: measured, or the shop's assumed value, N/mm. */
+/**
+ * Stiffness of post and slides: measured, or the shop's assumed value, N/mm.
+ *
+ * @param measured - measured stiffness, N/mm; null where it was not measured.
+ * @param assumed - the shop's assumed value, N/mm.
+ * @returns N/mm.
+ */
 export function postStiffness(measured: number | null, assumed: number): Figure {
   return positive(measured) !== null
     ? stated('post and slides as measured', [measured, 'N/mm'])

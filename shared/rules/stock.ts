@@ -93,7 +93,12 @@ export function stockOf(input: PlanInput, jaws: JawPlan | null): Figure {
   });
 }
 
-/** Round work cleans up when its stock on diameter is at least the run-out in the worst plane. */
+/**
+ * Round work cleans up when its stock on diameter is at least the run-out in the worst plane.
+ *
+ * @param input - the setup.
+ * @returns a Check with the shortfall, or nothing.
+ */
 export function stockFindings({ operation, work }: PlanInput): Finding[] {
   const stock = positive(work.stockOnDiameterMm);
   const runOut = notNegative(work.runOutMm);

@@ -5,12 +5,23 @@ import type { DressStage, Figure, Plan } from './types';
 
 const SECONDS = 60;
 
-/** Strokes of the carriage in one pass. */
+/**
+ * Strokes of the carriage in one pass.
+ *
+ * @param strokes - as chosen; null takes both strokes.
+ * @returns 1 or 2.
+ */
 export function strokesPerPass(strokes: PassStrokes | null): number {
   return strokes === 'one stroke' ? 1 : 2;
 }
 
-/** Seconds of one pass, from the seconds of one stroke and the strokes in a pass. */
+/**
+ * Seconds of one pass, from the seconds of one stroke and the strokes in a pass.
+ *
+ * @param stroke - seconds of one stroke.
+ * @param strokes - strokes in a pass.
+ * @returns seconds.
+ */
 export function secondsPerPass(stroke: Figure, strokes: number): Figure {
   return figure({
     unit: 's',

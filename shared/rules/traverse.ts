@@ -29,7 +29,13 @@ export function overrun(widthMm: number | null, typedMm: number | null): Figure 
       });
 }
 
-/** A wheel wider than the surface stands over both ends alike. */
+/**
+ * A wheel wider than the surface stands over both ends alike.
+ *
+ * @param widthMm - wheel width, mm.
+ * @param lengthMm - length of the ground surface, mm, no more than the width.
+ * @returns mm at each end.
+ */
 export function overrunOfPlunge(widthMm: number | null, lengthMm: number): Figure {
   return figure({
     unit: 'mm',
@@ -128,7 +134,13 @@ export function feedAtMost(feeds: readonly number[], wantedMm: number): Feed {
   return best > 0 ? { mmPerRev: best, byHand: false } : { mmPerRev: wantedMm, byHand: true };
 }
 
-/** Traverse in mm a minute, from mm per revolution and the lathe's rpm. */
+/**
+ * Traverse in mm a minute, from mm per revolution and the lathe's rpm.
+ *
+ * @param traverse - mm per work revolution.
+ * @param latheRpm - lathe speed, rpm.
+ * @returns mm/min.
+ */
 export function traverseRate(traverse: Figure, latheRpm: Figure): Figure {
   return figure({
     unit: 'mm/min',
@@ -142,7 +154,13 @@ export function traverseRate(traverse: Figure, latheRpm: Figure): Figure {
   });
 }
 
-/** Seconds for one stroke of the carriage: what to count when traversing by hand. */
+/**
+ * Seconds for one stroke of the carriage: what to count when traversing by hand.
+ *
+ * @param distance - travel of one stroke, mm.
+ * @param rate - traverse, mm/min.
+ * @returns seconds.
+ */
 export function secondsPerStroke(distance: Figure, rate: Figure): Figure {
   return figure({
     unit: 's',

@@ -59,7 +59,13 @@ export function wheelFindings(use: WheelUse): Finding[] {
   ];
 }
 
-/** Unmarked, or marked in two ways that disagree. */
+/**
+ * Unmarked, or marked in two ways that disagree.
+ *
+ * @param wheel - its marking.
+ * @param typed - whether it is being typed in, so that a missing mark is asked for instead.
+ * @returns findings.
+ */
 export function markingFindings(
   wheel: Pick<WheelData, 'markedRpm' | 'markedSpeedMPerS' | 'diameterNewMm' | 'mounted'>,
   typed: boolean,

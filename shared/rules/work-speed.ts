@@ -66,7 +66,13 @@ export function nearestStep(stepsRpm: readonly number[], wantedRpm: number | nul
   return best;
 }
 
-/** Work speed of a turning surface, m/min, from its diameter in mm and rpm. */
+/**
+ * Work speed of a turning surface, m/min, from its diameter in mm and rpm.
+ *
+ * @param diameterMm - diameter of the ground surface, mm.
+ * @param rpm - lathe speed, rpm.
+ * @returns m/min.
+ */
 export function workSpeed(diameterMm: number | null, rpm: number | null): Figure {
   return figure({
     unit: 'm/min',
@@ -80,7 +86,13 @@ export function workSpeed(diameterMm: number | null, rpm: number | null): Figure
   });
 }
 
-/** How many times as fast as the work the wheel runs. */
+/**
+ * How many times as fast as the work the wheel runs.
+ *
+ * @param wheelMPerS - wheel speed, m/s.
+ * @param workMPerMin - work speed, m/min.
+ * @returns the ratio.
+ */
 export function speedRatio(wheelMPerS: number | null, workMPerMin: number | null): Figure {
   return figure({
     unit: '1',
@@ -142,7 +154,13 @@ function latheSteps(
   });
 }
 
-/** What is unusual about the chosen lathe step, with the way out. */
+/**
+ * What is unusual about the chosen lathe step, with the way out.
+ *
+ * @param plan - from planWorkSpeed.
+ * @param diameterMm - diameter of the ground surface, mm.
+ * @returns notes and Checks.
+ */
 export function workSpeedFindings(plan: WorkSpeed, diameterMm: number | null): Finding[] {
   const found: Finding[] = [];
   const rpm = plan.latheRpm.value;

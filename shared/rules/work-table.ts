@@ -91,7 +91,12 @@ export function workRow(material: Material): WorkRow {
   };
 }
 
-/** Whether rules that are known for steel alone hold for a material. */
+/**
+ * Whether rules that are known for steel alone hold for a material.
+ *
+ * @param material - the work's material.
+ * @returns true for steels alone.
+ */
 export function isSteel(material: Material): boolean {
   return !NOT_STEEL.includes(material);
 }
