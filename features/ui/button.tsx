@@ -85,7 +85,6 @@ export function Button({
   role = 'button',
 }: ButtonProps) {
   const paint = PAINTS[kind];
-  const off = disabled || busy;
   return (
     <Pressable
       id={id}
@@ -94,8 +93,8 @@ export function Button({
       aria-busy={busy || undefined}
       aria-expanded={expanded}
       {...(controls === undefined ? null : { 'aria-controls': controls })}
-      disabled={off}
-      onPress={onPress}
+      disabled={disabled}
+      onPress={busy ? undefined : onPress}
       style={({ pressed, hovered }: { pressed: boolean; hovered?: boolean }) => [
         styles.button,
         size === 'machine' && styles.machine,

@@ -1,3 +1,4 @@
+import { StyleSheet } from 'react-native';
 import type { TextStyle } from 'react-native';
 
 /**
@@ -214,7 +215,7 @@ const style = (font: TextStyle, size: number, line: number): TextStyle => ({
 });
 
 /** The type scale. */
-export const type = {
+export const type = StyleSheet.create({
   small: style(fonts.regular, 14, 20),
   body: style(fonts.regular, 16, 24),
   strong: style(fonts.semibold, 16, 24),
@@ -232,7 +233,7 @@ export const type = {
   readout: style(fonts.condensed, 26, 32),
   readoutLarge: style(fonts.condensed, 36, 44),
   numeral: style(fonts.condensed, 64, 68),
-} as const satisfies Record<string, TextStyle>;
+});
 
 /** Sizes of text in pictures, in pixels before the reader's scale. */
 export const pictureType = { small: 13, body: 14 } as const;

@@ -34,7 +34,8 @@ export function useRadioGroup<Value extends string>(
     id: idOf(index),
     role: 'radio' as const,
     'aria-checked': index === chosenIndex,
-    'aria-disabled': options[index]?.locked || undefined,
+    // The primitive says aria-disabled for it; keys still arrive.
+    disabled: options[index]?.locked ?? false,
     onPress: () => chooseAt(index),
     ...web({
       tabIndex: index === Math.max(tabStop, 0) ? 0 : -1,
