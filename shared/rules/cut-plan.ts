@@ -44,6 +44,7 @@ export function planCut(basis: CutBasis): CutPlan {
     interrupted: basis.surface.interrupted,
     rules,
     burnMm: basis.burnMm,
+    stepMm: dial?.stepMm ?? 0,
   });
   const rough = planStage(basis, {
     caps: roughCaps,

@@ -24,10 +24,10 @@ export interface CutEffects {
  *
  * @param row - the table's row for the material.
  * @param spec - rough stock on radius in mm (null while unknown), whether the work is interrupted, the shop's
- * rules and the burning infeed in mm.
+ * rules, the burning infeed and the smallest settable step in mm.
  * @returns the caps, mm on radius, in no order.
  * @source mh31-1318
- * @example infeedCaps(row, { roughStockMm: 0.08, interrupted: true, rules, burnMm: null })
+ * @example infeedCaps(row, { roughStockMm: 0.08, interrupted: true, rules, burnMm: null, stepMm: 0.005 })
  */
 export function infeedCaps(
   row: WorkRow,
@@ -36,6 +36,8 @@ export function infeedCaps(
     interrupted: boolean;
     rules: Pick<ShopRules, 'roughInfeedLimitMm'>;
     burnMm: number | null;
+    /** The smallest infeed that can be set: little stock is no reason for a finer dial. */
+    stepMm: number;
   },
 ): Cap[] {
   const { roughStockMm, burnMm } = spec;
@@ -45,8 +47,8 @@ export function infeedCaps(
       valueMm: spec.interrupted ? Math.min(LOW_END_MM, row.roughInfeedMm) : row.roughInfeedMm,
     },
     { by: 'shop', valueMm: spec.rules.roughInfeedLimitMm },
-    ...(roughStockMm !== null && roughStockMm > 0
-      ? [{ by: 'stock' as const, valueMm: roughStockMm * STOCK_SHARE }]
+    ...(roughStockMm !== null && roughStockMm > spec.stepMm
+      ? [{ by: 'stock' as const, valueMm: Math.max(roughStockMm * STOCK_SHARE, spec.stepMm) }]
       : []),
     ...(burnMm !== null ? [{ by: 'burn' as const, valueMm: burnMm }] : []),
   ];
