@@ -26,9 +26,8 @@ export const ORIGIN = 'http://ringtrue.test';
 /** The whole server on a database of its own, which it reaches as the application role. */
 export async function startApi(options: Partial<ServerOptions> = {}) {
   const copy = await copyTemplate(`test_${randomUUID().replaceAll('-', '')}`);
-  const database = createDatabase(copy.urls.app, { poolSize: 4 });
+  const database = options.database ?? createDatabase(copy.urls.app, { poolSize: 4 });
   const server = composeServer({
-    database,
     publicUrl: new URL(ORIGIN),
     trustProxy: false,
     webRoot: null,
@@ -36,6 +35,7 @@ export async function startApi(options: Partial<ServerOptions> = {}) {
     logger: pino({ level: process.env.LOG_LEVEL ?? 'silent' }),
     limitPoints: NO_LIMITS,
     ...options,
+    database,
   });
   const owner = new Client({ connectionString: copy.urls.owner });
   await owner.connect();

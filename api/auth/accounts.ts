@@ -3,12 +3,12 @@ import type { Role } from '@/shared/domain/people';
 import { DEFAULT_SHOP_RULES } from '@/shared/domain/shop-rules';
 
 import type { AuditTrail } from '../audit/audit-trail';
-import { invalidField, taken } from '../refusals';
+import { invalidField } from '../refusals';
 import type { MembersRepository } from '../shops/members-repository';
 import type { ShopsRepository } from '../shops/shops-repository';
 import { weaknessOf } from './password-policy';
 import { hashPassword, verifyPassword } from './passwords';
-import { EMAIL_TAKEN, type Credentials, type PersonsRepository } from './persons-repository';
+import { emailTaken, type Credentials, type PersonsRepository } from './persons-repository';
 
 /** What becoming a member writes. */
 export interface JoiningScope {
@@ -57,7 +57,7 @@ export const accounts = ({ credentialsOf, sessionOf, withPersonInShop }: Account
       const isRepeated = known.personId === personId;
       if (isRepeated && (await verifyPassword(password, known.passwordHash)))
         return { isNew: false };
-      throw taken('email', EMAIL_TAKEN);
+      throw emailTaken();
     }
     const passwordHash = await hashPassword(password);
     await withPersonInShop({ personId, shopId }, async ({ persons, shop, members, audit }) => {

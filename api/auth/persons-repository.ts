@@ -4,7 +4,8 @@ import type { Transaction } from '@/db/client';
 import { memberships, persons, shops } from '@/db/schema';
 import type { Session } from '@/shared/contracts/session';
 
-import { keepingUnique } from '../unique-names';
+import { idReused, taken } from '../refusals';
+import { keepingUnique } from '../unique';
 
 export interface Credentials {
   personId: string;
@@ -45,13 +46,13 @@ export const personsRepository = (tx: Transaction) => ({
 
   async insert(person: NewPerson): Promise<void> {
     await keepingUnique(tx.insert(persons).values(person), {
-      index: 'persons_email',
-      path: 'email',
-      message: EMAIL_TAKEN,
+      persons_email: emailTaken(),
+      persons_pkey: idReused(),
     });
   },
 });
 
 export type PersonsRepository = ReturnType<typeof personsRepository>;
 
-export const EMAIL_TAKEN = 'This address has an account already. Sign in with it instead.';
+export const emailTaken = () =>
+  taken('email', 'This address has an account already. Sign in with it instead.');

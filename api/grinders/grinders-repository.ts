@@ -4,8 +4,9 @@ import type { Transaction } from '@/db/client';
 import { beltSteps, grinders, quills } from '@/db/schema';
 import type { CreateGrinderRequest, Grinder } from '@/shared/contracts/machines';
 
+import { taken } from '../refusals';
 import type { Lock } from '../stored-items';
-import { keepingUnique } from '../unique-names';
+import { keepingUnique } from '../unique';
 import {
   beltStepRows,
   columnsOf,
@@ -134,7 +135,5 @@ export type GrindersRepository = ReturnType<typeof grindersRepository>;
 
 const nameFree = <T>(write: Promise<T>) =>
   keepingUnique(write, {
-    index: 'grinders_name',
-    path: 'name',
-    message: 'Another grinder of this shop has this name.',
+    grinders_name: taken('name', 'Another grinder of this shop has this name.'),
   });

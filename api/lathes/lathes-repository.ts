@@ -4,8 +4,9 @@ import type { Transaction } from '@/db/client';
 import { lathes } from '@/db/schema';
 import type { CreateLatheRequest, Lathe } from '@/shared/contracts/machines';
 
+import { taken } from '../refusals';
 import type { Lock } from '../stored-items';
-import { keepingUnique } from '../unique-names';
+import { keepingUnique } from '../unique';
 
 type Content = Omit<CreateLatheRequest, 'id'>;
 
@@ -66,11 +67,7 @@ export const lathesRepository = (tx: Transaction, shopId: string) => {
 export type LathesRepository = ReturnType<typeof lathesRepository>;
 
 const nameFree = <T>(write: Promise<T>) =>
-  keepingUnique(write, {
-    index: 'lathes_name',
-    path: 'name',
-    message: 'Another lathe of this shop has this name.',
-  });
+  keepingUnique(write, { lathes_name: taken('name', 'Another lathe of this shop has this name.') });
 
 const columnsOf = ({ name, data, typed }: Content) => ({ name, ...data, typed });
 

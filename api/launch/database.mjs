@@ -1,4 +1,5 @@
-import { openCluster } from '../../db/local-server.mjs';
+import { clusterHolder, openCluster } from '../../db/local-server.mjs';
+import { Trouble } from '../../db/local/trouble.mjs';
 import { say } from './launcher.mjs';
 import { typescript } from './server.mjs';
 
@@ -12,6 +13,7 @@ export async function openDatabase(launcher, kind) {
   say('Starting PostgreSQL');
   const { adminUrl, close } = await openCluster(kind);
   launcher.defer(close);
+  launcher.goOn();
   say('Preparing the database');
   const answer = await launcher.run(typescript('db/prepare.ts'), {
     name: 'database',
@@ -22,8 +24,22 @@ export async function openDatabase(launcher, kind) {
   return { env: { DATABASE_URL: databaseUrl, SEED_DEMO: 'true' }, signIns };
 }
 
-/** The database of DATABASE_URL; its schema is brought up to date where the owner's address is given too. */
-export async function useGivenDatabase(launcher) {
+/** Fails in words when another command runs on this folder's own cluster. */
+export function requireIdleCluster() {
+  const holder = process.env.DATABASE_URL ? null : clusterHolder();
+  if (!holder) return;
+  throw new Trouble(
+    `Ringtrue runs from this folder already (process ${holder}). Stop it with Ctrl-C first.`,
+  );
+}
+
+/** The database of DATABASE_URL where it is set, and the private cluster's otherwise. */
+export function everydayDatabase(launcher) {
+  return process.env.DATABASE_URL ? givenDatabase(launcher) : openDatabase(launcher, 'main');
+}
+
+/** The schema of a given database is brought up to date where its owner's address is given too. */
+async function givenDatabase(launcher) {
   if (process.env.DATABASE_OWNER_URL) {
     say('Bringing the database’s schema up to date');
     await launcher.run(typescript('db/prepare.ts'), {

@@ -9,7 +9,7 @@ export const ROOT = fileURLToPath(new URL('../../', import.meta.url));
 export const LOCAL = path.join(ROOT, '.local');
 
 const SIGNALS = { SIGINT: 130, SIGTERM: 143, SIGHUP: 129 };
-const GRACE_MS = 15_000;
+const NOTHING_TO_LOSE_MS = 2_000;
 const TAIL_LINES = 30;
 
 export function say(words) {
@@ -39,6 +39,11 @@ class Launcher {
     return this.#ending !== null;
   }
 
+  /** Leaves off here once the end has begun: what follows would be started in vain. */
+  goOn() {
+    if (this.ending) throw new Trouble('Stopped.');
+  }
+
   async #closeAll() {
     for (let close = this.#closers.pop(); close; close = this.#closers.pop()) {
       await close().catch((error) => process.stderr.write(`${error.message}\n`));
@@ -51,8 +56,11 @@ class Launcher {
    * @param {string[]} command
    * @param {import('node:child_process').SpawnOptions} [options]
    */
-  start([program, ...args], { env = {}, stdio = ['ignore', 'inherit', 'inherit'] } = {}) {
-    if (this.ending) throw new Trouble('Stopped.');
+  start(
+    [program, ...args],
+    { env, stdio = ['ignore', 'inherit', 'inherit'], graceMs = 15_000 } = {},
+  ) {
+    this.goOn();
     const child = spawn(program, args, {
       cwd: ROOT,
       env: { ...process.env, ...env },
@@ -65,7 +73,7 @@ class Launcher {
     });
     const stop = async () => {
       signalGroup(child, 'SIGTERM');
-      const hard = setTimeout(() => signalGroup(child, 'SIGKILL'), GRACE_MS);
+      const hard = setTimeout(() => signalGroup(child, 'SIGKILL'), graceMs);
       await ended;
       clearTimeout(hard);
       signalGroup(child, 'SIGKILL');
@@ -82,8 +90,12 @@ class Launcher {
   async run(command, { name, trouble, env }) {
     const log = path.join(LOCAL, 'logs', `${name}.log`);
     fs.mkdirSync(path.dirname(log), { recursive: true });
-    const file = fs.openSync(log, 'w');
-    const { child, ended } = this.start(command, { env, stdio: ['ignore', 'pipe', file] });
+    const file = fs.openSync(log, 'w', 0o600);
+    const { child, ended } = this.start(command, {
+      env,
+      stdio: ['ignore', 'pipe', file],
+      graceMs: NOTHING_TO_LOSE_MS,
+    });
     let answer = '';
     child.stdout.setEncoding('utf8').on('data', (text) => {
       answer += text;
@@ -91,7 +103,8 @@ class Launcher {
     const code = await ended;
     fs.writeSync(file, answer);
     fs.closeSync(file);
-    if (code === 0 || this.ending) return answer;
+    this.goOn();
+    if (code === 0) return answer;
     const tail = fs.readFileSync(log, 'utf8').trimEnd().split('\n').slice(-TAIL_LINES).join('\n');
     throw new Trouble(`${tail}\n\n${trouble} (all of it: ${path.relative(ROOT, log)})`);
   }

@@ -4,7 +4,7 @@ import path from 'node:path';
 import { randomBytes } from 'node:crypto';
 
 import { Trouble } from '../../db/local/trouble.mjs';
-import { LOCAL } from './launcher.mjs';
+import { LOCAL, say } from './launcher.mjs';
 
 const READY_WITHIN_MS = 60_000;
 const ASK_EVERY_MS = 150;
@@ -20,13 +20,7 @@ export const typescript = (file) => [process.execPath, '--import', 'tsx', file];
 export async function startServer(launcher, { port, env, stdio }) {
   const server = launcher.start(typescript('api/main.ts'), {
     stdio,
-    env: {
-      NODE_ENV: 'production',
-      LOG_LEVEL: process.env.LOG_LEVEL ?? 'warn',
-      SESSION_SECRET: sessionSecret(),
-      PORT: String(port),
-      ...env,
-    },
+    env: { NODE_ENV: 'production', ...serverEnvironment(port), ...env },
   });
   const address = `http://localhost:${port}`;
   const ended = server.ended.then(() => true);
@@ -36,6 +30,22 @@ export async function startServer(launcher, { port, env, stdio }) {
     if (over || Date.now() > deadline) throw new Trouble('The server did not start.');
   }
   return { address, ended: server.ended, stop: server.stop };
+}
+
+/** What the server needs to be told, beside its database. */
+export function serverEnvironment(port) {
+  return {
+    LOG_LEVEL: process.env.LOG_LEVEL ?? 'warn',
+    SESSION_SECRET: sessionSecret(),
+    PORT: String(port),
+  };
+}
+
+/** Says where to look, and who can sign in. */
+export function welcome(address, signIns) {
+  say(`\nRingtrue is at ${address}`);
+  for (const { role, email, password } of signIns) say(`  ${role.padEnd(12)}${email}  ${password}`);
+  say('Ctrl-C stops it.');
 }
 
 async function isReady(address) {

@@ -4,7 +4,9 @@ import type { Transaction } from '@/db/client';
 import { shops } from '@/db/schema';
 import type { Shop } from '@/shared/contracts/shops';
 
+import { idReused } from '../refusals';
 import type { Lock } from '../stored-items';
+import { keepingUnique } from '../unique';
 
 type Content = Pick<Shop, 'name' | 'units' | 'timeZone'>;
 
@@ -16,10 +18,13 @@ export const shopsRepository = (tx: Transaction, shopId: string) => ({
   },
 
   async insert(shop: Content & Pick<Shop, 'rules'>): Promise<Shop> {
-    const [row] = await tx
-      .insert(shops)
-      .values({ id: shopId, ...shop })
-      .returning();
+    const [row] = await keepingUnique(
+      tx
+        .insert(shops)
+        .values({ id: shopId, ...shop })
+        .returning(),
+      { shops_pkey: idReused() },
+    );
     if (!row) throw new Error(`shop ${shopId} was not stored`);
     return toShop(row);
   },

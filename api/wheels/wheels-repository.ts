@@ -6,8 +6,9 @@ import type { CreateWheelRequest, Wheel } from '@/shared/contracts/wheels';
 import type { WheelData } from '@/shared/domain/wheels';
 
 import { containing, keyOf, pageOf } from '../paging';
+import { taken } from '../refusals';
 import type { Lock } from '../stored-items';
-import { keepingUnique } from '../unique-names';
+import { keepingUnique } from '../unique';
 
 type Content = Omit<CreateWheelRequest, 'id'>;
 type Row = InferSelectModel<typeof wheels>;
@@ -89,11 +90,7 @@ export const wheelsRepository = (tx: Transaction, shopId: string) => {
 export type WheelsRepository = ReturnType<typeof wheelsRepository>;
 
 const tagFree = <T>(write: Promise<T>) =>
-  keepingUnique(write, {
-    index: 'wheels_tag',
-    path: 'tag',
-    message: 'Another wheel of this shop has this tag.',
-  });
+  keepingUnique(write, { wheels_tag: taken('tag', 'Another wheel of this shop has this tag.') });
 
 function columnsOf({ tag, data: { mounted, ...columns }, typed }: Content) {
   return {
