@@ -79,7 +79,7 @@ export function emptySetupInputs(operation: Operation): SetupInputs {
  * @param typed - what was typed so far, mm, rpm and m/s.
  * @returns the wheel, not held by the rack; null until diameter when new, width and hole are known.
  * @source entered
- * @example typedWheelData({ ...typed, diameterNewMm: 25, widthMm: 12, holeMm: 6 })?.diameterNowMm // 25
+ * @example typedWheelData({ ...wheel, diameterNewMm: 25, diameterNowMm: null })?.diameterNowMm // 25
  */
 export function typedWheelData(typed: TypedWheel): WheelData | null {
   const { diameterNewMm, widthMm, holeMm } = typed;
@@ -115,7 +115,7 @@ export interface Found {
  * @param found - machines and wheel by the ids in the inputs, the shop's rules and date.
  * @returns all that the rules read; a typed wheel goes before one from the rack.
  * @source entered
- * @example assemblePlanInput(inputs, { lathe, grinder, quill, wheel: null, rules, today: '2026-03-02' })
+ * @example assemblePlanInput(planInput, { lathe, grinder, quill, wheel, rules, today: '2026-03-02' }).wheelData?.marking // 'A 60 K 7 V'
  */
 export function assemblePlanInput(inputs: SetupInputs, found: Found): PlanInput {
   const { typed } = inputs.wheel;

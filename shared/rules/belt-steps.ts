@@ -21,7 +21,7 @@ export interface BeltSteps {
  * @param limits - the limits in force, lowest first, and whether the wheel's own are among them.
  * @returns the rows in the order recorded, and the fastest one that breaks no limit.
  * @source osha-1910-215-d1
- * @example planBeltSteps(grinder, 25, { all, wheelKnown: true }).suggested // 'b'
+ * @example planBeltSteps(grinder, 25, { all: [{ kind: 'marked rpm', rpm: stated('marked', [16000, 'rpm']) }], wheelKnown: true }).suggested // 'b'
  */
 export function planBeltSteps(
   grinder: GrinderData | null,

@@ -30,7 +30,7 @@ interface Circumstances {
  * @param input - the setup with its wheel.
  * @returns ids into CAUTIONS, in their order there.
  * @source none: which belongs where follows from each caution's own source
- * @example cautionsFor(input).includes('jaws-fixed') // for jaws
+ * @example cautionsFor(planInput).includes('jaws-fixed') // true
  */
 export function cautionsFor(input: PlanInput): CautionId[] {
   const circumstances: Circumstances = {

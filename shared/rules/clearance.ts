@@ -29,7 +29,7 @@ interface Inside {
  * @param inside - bore, length, overrun and free depth in mm, wheel and quill; each null while unknown.
  * @returns findings; nothing is said of what is not known yet.
  * @source practice-clearance
- * @example clearanceFindings({ boreMm: 40, lengthMm: 30, overrunMm: 4, clearDepthMm: 20, wheel, quill })
+ * @example clearanceFindings({ boreMm: 40, lengthMm: 30, overrunMm: 4, clearDepthMm: 20, wheel, quill }) // []
  */
 export function clearanceFindings(inside: Inside): Finding[] {
   return [...boreFindings(inside), ...reachFindings(inside), ...depthFindings(inside)];

@@ -1,5 +1,5 @@
 import type { CompoundZero } from '../domain/machines';
-import { toDegrees, toRadians } from './angles';
+import { toRadians } from './angles';
 import { figure, term, termOf } from './figures';
 import type { Figure } from './types';
 
@@ -34,30 +34,6 @@ export function compoundReading(half: Figure, zero: CompoundZero | null): Figure
     note: across
       ? 'The scale reads zero with the slide across the bed.'
       : 'The scale reads zero with the slide along the bed.',
-  });
-}
-
-/**
- * The angle of the compound slide to the spindle axis at which one of its divisions feeds a wanted infeed.
- *
- * @param infeedMm - infeed on radius for one division, mm, over 0.
- * @param divisionMm - what one division moves the slide, mm.
- * @returns degrees from the spindle axis, unrounded; null when the division is finer than the infeed.
- * @source lautard
- * @example compoundForTenths(0.00254, 0.0254).value // 5.739 degrees: 5 degrees 44 minutes
- */
-export function compoundForTenths(infeedMm: number | null, divisionMm: number | null): Figure {
-  return figure({
-    unit: 'deg',
-    formula: '{A} = asin({a} / {s})',
-    source: 'lautard',
-    terms: [
-      term('a', 'infeed for one division', [infeedMm, 'mm']),
-      term('s', 'one division of the compound slide', [divisionMm, 'mm']),
-    ],
-    compute: (infeed, division) =>
-      infeed > 0 && infeed <= division ? toDegrees(Math.asin(infeed / division)) : null,
-    note: 'While the compound slide traverses a taper it cannot also feed tenths.',
   });
 }
 

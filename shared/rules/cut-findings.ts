@@ -14,7 +14,7 @@ const DOUBT = 1e-9;
  * @param spec - the cut, its rough lag, the schedule (null while unknown), stock in mm and the shop's rules.
  * @returns findings.
  * @source mh31-1318
- * @example cutFindings({ cut, lag, schedule, stockMm: 0.1, rules })
+ * @example cutFindings({ cut: planCut(basis), lag: stated('lag', [0.02, 'mm']), schedule: null, stockMm: 0.1, rules })[0]?.code // 'lag-above-limit'
  */
 export function cutFindings(spec: {
   cut: CutPlan;

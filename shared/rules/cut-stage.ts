@@ -62,7 +62,7 @@ export interface StageAim {
  * @param aim - caps, typed values and traverse aimed at, mm.
  * @returns the stage; null when nothing caps it.
  * @source derived-spring
- * @example planStage(basis, aim)?.setting.infeedMm
+ * @example planStage(basis, { caps: [{ by: 'shop', valueMm: 0.0125 }], typedInfeedMm: null, typedTraverseMm: null, aimMm: 1, leastMm: 0.5, ceilingMm: 0.05, plungePerTurnMm: 0.001, dial: dialOf(lathe) })?.setting.infeedMm // 0.0125 mm
  */
 export function planStage(basis: CutBasis, aim: StageAim): StageCutPlan | null {
   const cap: Cap | null =

@@ -53,7 +53,7 @@ export interface Setting {
  * @param dial - the lathe's dial; null sets the wanted infeed itself.
  * @returns the setting; its divisions are null where neither slide can set it, or no dial is known.
  * @source practice-dial
- * @example settle(0.0125, 0.05, dial).divisions // 1 on a 0.01 mm dial: 0.010
+ * @example settle(0.0125, 0.05, dialOf(lathe)).infeedMm // 0.0125 mm
  */
 export function settle(wantedMm: number, ceilingMm: number, dial: Dial | null): Setting {
   if (dial === null)

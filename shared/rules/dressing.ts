@@ -159,7 +159,7 @@ export interface DressingPlan {
  * @param input - what was chosen, the shop's usual values, wheel and spindle speed.
  * @returns both stages and what speaks against them; figures are null while the wheel is unknown.
  * @source derived-dressing
- * @example planDressing(input).rough.secondsAcross.value
+ * @example planDressing({ dress: planInput.dress, rules, diameterMm: 25, widthMm: 12, spindle: stated('spindle speed', [15000, 'rpm']), marking: null, dry: true, wheelMPerS: 20 }).diamond.value // 0.35 ct
  */
 export function planDressing(input: DressingInput): DressingPlan {
   const rough = dressStage('rough', input);

@@ -34,7 +34,7 @@ export function finding(code: FindingCode, details: Details = {}): Finding {
  * @param format - writes a quantity in the reader's unit and digits.
  * @returns what was found, and what to do next.
  * @source none: the words are our own
- * @example findingWords(plan.findings[0], (q) => `${q.value} ${q.unit}`).title
+ * @example findingWords(finding('unmarked-wheel'), ({ value }) => String(value)).title // 'No speed is marked for this wheel, so it must not run.'
  */
 export function findingWords(
   found: Finding,

@@ -136,7 +136,7 @@ function quillLimits(
  * @param parts - wheel, quill and grinder, each null while unknown, and the shop's rules.
  * @returns limits in whole rpm, rounded down.
  * @source miosha-408-10174
- * @example speedLimits({ wheel, quill, grinder, rules })[0] // the one that governs
+ * @example speedLimits({ wheel, quill, grinder, rules })[0]?.kind // 'marked rpm'
  */
 export function speedLimits(parts: {
   wheel: WheelData | null;

@@ -9,7 +9,7 @@ import type { WheelData } from '../domain/wheels';
  * @param wheel - the wheel; null while not chosen.
  * @returns the same quill, or one with the mandrel's overhang and the head's width as a first segment.
  * @source derived-beam
- * @example effectiveQuill(quill, mountedWheel)?.segments[0]?.diameterMm // the mandrel's
+ * @example effectiveQuill(quill, wheel) === quill // true
  */
 export function effectiveQuill(quill: QuillData | null, wheel: WheelData | null): QuillData | null {
   if (quill === null || wheel === null || wheel.mounted === null) return quill;

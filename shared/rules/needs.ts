@@ -57,7 +57,7 @@ const TYPED_WHEEL: readonly Asked<TypedWheel>[] = [
  * @param input - the setup with its machines and wheel filled in.
  * @returns an empty list when nothing is missing.
  * @source none: what is asked follows from the other rules
- * @example needsOf(planInput)[0]?.label // 'run-out near the chuck'
+ * @example needsOf({ ...planInput, work: { ...planInput.work, nearRunOutMm: null } })[0]?.label // 'run-out near the chuck'
  */
 export function needsOf(input: PlanInput): Need[] {
   return [...workNeeds(input), ...machineNeeds(input), ...wheelNeeds(input)];

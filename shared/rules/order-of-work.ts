@@ -137,7 +137,7 @@ const STEPS: readonly Step[] = [
  * @param input - what it was made from.
  * @returns the steps; a figure is left out of `figures` while it is unknown.
  * @source practice-schedule
- * @example orderOfWork(plan, input).map(({ title }) => title)
+ * @example orderOfWork(plan, planInput)[0]?.title // 'Survey'
  */
 export function orderOfWork(plan: Plan, input: PlanInput): WorkStep[] {
   return STEPS.map(({ id, title, words, figures }) => ({

@@ -46,7 +46,7 @@ export interface CutOutcome {
  * @param latheRpm - lathe speed.
  * @returns figures, schedule and findings; null inside while something they need is missing.
  * @source mh31-1318
- * @example planCutOutcome(basis, latheRpm).schedule?.counts.rough
+ * @example planCutOutcome(basis, plan.work.latheRpm).schedule?.counts.rough // 14
  */
 export function planCutOutcome(basis: CutBasis, latheRpm: Figure): CutOutcome {
   const { input, stockMm } = basis;

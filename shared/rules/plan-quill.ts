@@ -37,7 +37,7 @@ export function stiffnessOf(input: PlanInput, surface: Surface): PlanStiffness {
  * @param from - stiffness, rough lag, and the normal force while finishing.
  * @returns the quill's figures, and a note when its taper takes a good part of the tolerance.
  * @source derived-beam
- * @example planQuill(input, { stiffness, lag, finishForce }).quill.lag.value
+ * @example planQuill(planInput, { stiffness: stiffnessOf(planInput, surfaceOf(planInput)), lag: stated('lag', [0.002, 'mm']), finishForce: stated('force', [5, 'N']) }).findings // []
  */
 export function planQuill(
   { quill, wheelData: wheel, work }: PlanInput,

@@ -22,7 +22,7 @@ export interface SpeedPlan {
  * @param input - the setup.
  * @returns the chosen step (also when it is too fast), all steps, the limits lowest first, and findings.
  * @source osha-1910-215-d1
- * @example planSpeed(input).limits.governing?.kind
+ * @example planSpeed(planInput).limits.governing?.kind // 'marked rpm'
  */
 export function planSpeed(input: PlanInput): SpeedPlan {
   const { grinder, quill, wheelData: wheel, rules } = input;

@@ -27,7 +27,7 @@ export interface CutLoad {
  * @param removal - metal removed, mm3/s.
  * @returns the figures; null while something they need is missing.
  * @source kalpakjian-force
- * @example cuttingForce(load, removal).normal.value
+ * @example cuttingForce({ surface: surfaceOf(planInput), energy: specificEnergy('tool-hardened'), wheelSpeed: wheelSpeed(27, 15000), forceRatio: 0.4 }, stated('removal', [1, 'mm3/s'])).normal.value // 4.53 N
  */
 export function cuttingForce(load: CutLoad, removal: Figure): CuttingForce {
   const power = grindingPower(load.energy, removal);
@@ -42,7 +42,7 @@ export function cuttingForce(load: CutLoad, removal: Figure): CuttingForce {
  * motor power in W and the share of it that may be used, and whether the work is steel.
  * @returns figures and findings.
  * @source malkin-burn
- * @example planPower(spec).findings
+ * @example planPower({ load: { surface: surfaceOf(planInput), energy: specificEnergy('tool-hardened'), wheelSpeed: wheelSpeed(27, 15000), forceRatio: 0.4 }, contact: equivalentDiameter(27, 40, 'inside'), removal: stated('removal', [1, 'mm3/s']), infeedMm: 0.005, workMPerMin: 15, motorW: 370, share: 0.8, steel: true }).findings // []
  */
 export function planPower(spec: {
   load: CutLoad;

@@ -80,7 +80,7 @@ export function quillLength(segments: readonly QuillSegment[]): number {
  * @param quill - segments from the wheel end, mm, material, and the measured stiffness, N/mm.
  * @returns stiffness, N/mm, unrounded; optimistic where computed, since the bearing gives way too.
  * @source derived-beam
- * @example quillStiffness(steppedQuill).value // 100 N bend it 0.0188926 mm: 5293 N/mm
+ * @example quillStiffness({ ...quill, segments: [{ lengthMm: 30, diameterMm: 10 }, { lengthMm: 50, diameterMm: 20 }] }).value // 5293 N/mm
  */
 export function quillStiffness(quill: QuillData | null): Figure {
   if (quill !== null && quill.measuredStiffnessNPerMm !== null)
@@ -131,7 +131,7 @@ export function wheelMassKg(wheel: {
  * @param wheelKg - mass of wheel and nut, kg, 0 or more.
  * @returns frequency, Hz, unrounded; null while quill or wheel is unknown.
  * @source derived-beam
- * @example firstFrequency(quill, 1).value // 31.3 Hz for 200 mm of 10 mm steel without mass of its own
+ * @example firstFrequency(quill, 0.015).value // 2499 Hz
  */
 export function firstFrequency(quill: QuillData | null, wheelKg: number | null): Figure {
   if (quill !== null && quill.measuredFrequencyHz !== null)
@@ -163,7 +163,7 @@ export function firstFrequency(quill: QuillData | null, wheelKg: number | null):
  * @returns difference of radius across the wheel, mm: 1.5 times the quill's own bend times width over length
  * for a plain quill.
  * @source derived-beam
- * @example quillTaper(plainQuill, 10, 12).value
+ * @example quillTaper(quill, 10, 12).value // 0.00033 mm
  */
 export function quillTaper(
   quill: QuillData | null,

@@ -22,7 +22,7 @@ export function opposite(rotation: Rotation): Rotation {
  * @param wheel - which way the wheel turns, seen from the tailstock.
  * @returns the work's direction, seen from the tailstock.
  * @source derived-directions
- * @example requiredWorkRotation('inside', 'clockwise') // 'anticlockwise', the lathe's normal way
+ * @example requiredWorkRotation('inside', 'clockwise') // 'anticlockwise'
  */
 export function requiredWorkRotation(side: 'outside' | 'inside', wheel: Rotation): Rotation {
   return side === 'outside' ? wheel : opposite(wheel);
@@ -85,7 +85,7 @@ export function workRotation(turning: Turning): Plan['work']['rotation'] {
  * are not chosen yet raise nothing.
  * @returns findings.
  * @source practice-rotation
- * @example rotationFindings({ side: 'inside', lathe, grinder, quill, workRotation: null })
+ * @example rotationFindings({ side: 'inside', lathe, grinder, quill, workRotation: null }) // []
  */
 export function rotationFindings(turning: Turning): Finding[] {
   const { side, lathe, grinder, quill } = turning;

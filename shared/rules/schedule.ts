@@ -42,7 +42,7 @@ export interface Schedule {
  * @param spec - stock and finish stock in mm on radius, infeed, settable step and cut fraction of each stage.
  * @returns the passes (empty when there are over 400), how many of each stage, and the sum of infeeds in mm.
  * @source derived-spring
- * @example planPasses({ stockMm: 0.1, finishStockMm: 0.02, ... }).counts.rough // 8 at 0.01
+ * @example planPasses({ stockMm: 0.1, finishStockMm: 0.02, rough: { infeedMm: 0.01, stepMm: 0.005, divisionMm: 0.01, cutFraction: 0.8 }, finish: { infeedMm: 0.005, stepMm: 0.005, divisionMm: 0.01, cutFraction: 0.9 }, springLeftMm: 0.0005, sparkOuts: null }).counts.rough // 8
  */
 export function planPasses(spec: ScheduleSpec): Schedule {
   const roughMm = floorTo(Math.max(spec.stockMm - spec.finishStockMm, 0), spec.rough.stepMm);

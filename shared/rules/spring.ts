@@ -44,7 +44,7 @@ export interface StageCut {
  * @param cut - what the stage cuts with.
  * @returns a share over 0 and under 1.
  * @source derived-spring
- * @example cutFraction(stiffness, { energy: 38, workMPerS: 0.25, wheelMPerS: 20, traverseMm: 1.5, forceRatio: 0.4 })
+ * @example cutFraction(stated('stiffness', [5000, 'N/mm']), { energy: 38, workMPerS: 0.25, wheelMPerS: 20, traverseMm: 1.5, forceRatio: 0.4 }).value // 0.737
  */
 export function cutFraction(stiffness: Figure, cut: StageCut): Figure {
   return figure({

@@ -31,7 +31,7 @@ function workModulus(material: Material): number {
  * @param surface - the ground surface; its diameter stands in for the shaft's where that is not given.
  * @returns stiffness, N/mm; 'stiff' inside; null while something is missing.
  * @source derived-beam
- * @example workStiffness(work, surface) // 200 mm of 40 mm steel between centres: 155 300 N/mm
+ * @example workStiffness(planInput.work, surfaceOf(planInput)) // 'stiff'
  */
 export function workStiffness(work: WorkInputs, surface: Surface): Figure | 'stiff' {
   if (surface.side === 'inside') return 'stiff';
@@ -82,7 +82,7 @@ export function postStiffness(measured: number | null, assumed: number): Figure 
  * @param parts - stiffness of quill, post and work, N/mm; 'stiff' leaves the work out.
  * @returns stiffness, N/mm, below the least of them; null while a part is unknown.
  * @source derived-spring
- * @example stiffnessAtWheel({ quill, post, work: 'stiff' }).value // 1 800 and 5 000: 1 324 N/mm
+ * @example stiffnessAtWheel({ quill: stated('quill', [1800, 'N/mm']), post: stated('post', [5000, 'N/mm']), work: 'stiff' }).value // 1324 N/mm
  */
 export function stiffnessAtWheel(parts: {
   quill: Figure;

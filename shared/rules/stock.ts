@@ -15,7 +15,7 @@ const PAD_BACK_MM = 0;
  * @param input - the setup; only its work is read.
  * @returns null while the operation is another, or something is missing.
  * @source derived-jaw-contact
- * @example jawPlanOf(input)?.cleanUp.value
+ * @example jawPlanOf(planInput)?.contacts[0]?.order // 2
  */
 export function jawPlanOf(input: Pick<PlanInput, 'operation' | 'work'>): JawPlan | null {
   const { work } = input;
@@ -61,7 +61,7 @@ function plane(distance: number | null, runOut: number | null, highSpot: number 
  * @param jaws - the jaws' plan, null for round work or while unknown.
  * @returns mm on radius, unrounded.
  * @source practice-jaw-clean-up
- * @example stockOf(input, jaws).value
+ * @example stockOf(planInput, jawPlanOf(planInput)).value // 0.1232 mm
  */
 export function stockOf(input: PlanInput, jaws: JawPlan | null): Figure {
   if (input.operation !== 'jaws')

@@ -40,7 +40,7 @@ export function secondsPerPass(stroke: Figure, strokes: number): Figure {
  * while unknown).
  * @returns minutes, unrounded.
  * @source derived-time
- * @example planTime({ schedule, passSeconds, dressing }).total.value
+ * @example planTime({ schedule: planCutOutcome(basis, plan.work.latheRpm).schedule, passSeconds: { rough: stated('pass', [20, 's']), finish: stated('pass', [40, 's']) }, dressing: plan.dressing }).total.value // 8.8 min
  */
 export function planTime(spec: {
   schedule: Schedule | null;

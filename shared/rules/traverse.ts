@@ -180,7 +180,7 @@ export function secondsPerStroke(distance: Figure, rate: Figure): Figure {
  * @param spec - wheel width in mm, side, traverse aimed at, whether it is by hand, and the traverse planned.
  * @returns findings; none where the wheel plunges.
  * @source practice-overrun
- * @example traverseFindings({ widthMm: 12, inside: true, aims, byHand: false, traverse })
+ * @example traverseFindings({ widthMm: 12, inside: true, aims: traverseAims(12, 'tool-hardened', { rough: 1 / 8, finish: 1 / 16 }), byHand: false, traverse: plan.traverse }) // []
  */
 export function traverseFindings(spec: {
   widthMm: number | null;

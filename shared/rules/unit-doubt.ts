@@ -19,19 +19,20 @@ interface Neighbours {
  * 25 inches.
  *
  * @param input - the setup.
- * @returns a note for each such pair, one at most for each field.
+ * @returns a note for each such pair; a size is asked about once.
  * @source derived-units
- * @example unitFindings(input).length // 0 when sizes go together
+ * @example unitFindings(planInput) // []
  */
 export function unitFindings(input: PlanInput): Finding[] {
   const asked = new Set<string>();
   return neighbours(input).flatMap((pair) => {
     const [firstLabel, first] = pair.first;
     const [secondLabel, second] = pair.second;
-    if (first === null || second === null || asked.has(firstLabel)) return [];
+    if (first === null || second === null) return [];
+    if (asked.has(firstLabel) || asked.has(secondLabel)) return [];
     const unit = unitMistaken(first / second, pair);
     if (unit === null) return [];
-    asked.add(firstLabel);
+    asked.add(firstLabel).add(secondLabel);
     return [
       finding('unit-doubt', {
         figures: { first: quantity(first, 'mm'), second: quantity(second, 'mm') },
@@ -73,8 +74,8 @@ function neighbours({ operation, work, wheelData, quill }: PlanInput): Neighbour
       ? (['bore at the jaws', positive(work.jawBoreMm)] as const)
       : (['diameter of the bore', positive(work.diameterMm)] as const);
   const inside: Neighbours[] = [
-    ...wheelOwn,
     { first: wheel, second: bore, low: 0.15, high: 1.5 },
+    ...wheelOwn,
     { first: length, second: reach, low: 0.05, high: 2.5 },
   ];
   if (operation === 'bore') return inside;

@@ -36,7 +36,7 @@ export interface WheelUse {
  * @param use - wheel, quill, bond and the shop's date.
  * @returns findings, none when nothing speaks against the wheel.
  * @source osha-1910-215-d1
- * @example wheelFindings({ wheel, quill, organicBond: false, typed: false, today: '2026-03-02' })
+ * @example wheelFindings({ wheel, quill, organicBond: false, typed: false, today: '2026-03-02' }) // []
  */
 export function wheelFindings(use: WheelUse): Finding[] {
   const { wheel, quill, typed, today } = use;

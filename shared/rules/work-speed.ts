@@ -112,7 +112,7 @@ export function speedRatio(wheelMPerS: number | null, workMPerMin: number | null
  * @param spec - material, diameter in mm, wheel speed in m/s, the lathe, and the rpm typed in; each may be null.
  * @returns the figures, and every step of the lathe with what it would give.
  * @source mh31-1318
- * @example planWorkSpeed({ material: 'tool-hardened', diameterMm: 40, wheelMPerS: 20, lathe, typedRpm: null })
+ * @example planWorkSpeed({ material: 'tool-hardened', diameterMm: 40, wheelMPerS: 20, lathe, typedRpm: null }).latheRpm.value // 115 rpm
  */
 export function planWorkSpeed(spec: {
   material: Material | null;

@@ -1,11 +1,6 @@
 import fc from 'fast-check';
 
-import {
-  compoundForTenths,
-  compoundReading,
-  handFedWorkSpeed,
-  slantTravel,
-} from '@/shared/rules/compound';
+import { compoundReading, handFedWorkSpeed, slantTravel } from '@/shared/rules/compound';
 import { shrinkage } from '@/shared/rules/cooling';
 import { stated } from '@/shared/rules/figures';
 import {
@@ -56,22 +51,6 @@ describe('the compound slide', () => {
     expect(compoundReading(degrees(30), 'cross-slide').value).toBe(60);
     expect(compoundReading(degrees(30), 'spindle-axis').value).toBe(30);
     expect(compoundReading(degrees(30), null).value).toBeNull();
-  });
-
-  it('cannot feed more than it moves', () => {
-    expect(compoundForTenths(0.0254, 0.0254).value).toBeCloseTo(90, 9);
-    expect(compoundForTenths(0.0255, 0.0254).value).toBeNull();
-    expect(compoundForTenths(0, 0.0254).value).toBeNull();
-  });
-
-  it('set to that angle, moves in by what was wanted', () => {
-    const share = fc.double({ min: 0.001, max: 1, noNaN: true });
-    fc.assert(
-      fc.property(share, (part) => {
-        const angle = ((compoundForTenths(part * 0.02, 0.02).value ?? NaN) * Math.PI) / 180;
-        return Math.abs(0.02 * Math.sin(angle) - part * 0.02) < 1e-12;
-      }),
-    );
   });
 
   it('travels the side of the cone and the overrun at both ends', () => {
