@@ -20,7 +20,7 @@ export interface CutPlan {
  * @param basis - the setup and what was worked out before; null where unknown.
  * @returns rough and finish, null while material or wheel is unknown.
  * @source mh31-1318
- * @example planCut(basis).rough?.setting.divisions
+ * @example planCut(basis).rough?.setting.divisions // 1.5
  */
 export function planCut(basis: CutBasis): CutPlan {
   const { input, stockMm } = basis;

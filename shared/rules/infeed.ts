@@ -27,7 +27,7 @@ export interface CutEffects {
  * rules, the burning infeed and the smallest settable step in mm.
  * @returns the caps, mm on radius, in no order.
  * @source mh31-1318
- * @example infeedCaps(row, { roughStockMm: 0.08, interrupted: true, rules, burnMm: null, stepMm: 0.005 })
+ * @example leastCap(infeedCaps(workRow('tool-hardened'), { roughStockMm: 0.08, interrupted: true, rules, burnMm: null, stepMm: 0.005 })) // { by: 'table', valueMm: 0.0075 }
  */
 export function infeedCaps(
   row: WorkRow,
@@ -76,7 +76,7 @@ export function leastCap(caps: readonly Cap[]): Cap | null {
  * @param limits - what lag and power allow.
  * @returns infeed in mm, traverse in mm per revolution, and the cap that governs.
  * @source derived-spring
- * @example balanceCut({ by: 'shop', valueMm: 0.0125 }, { aimMm: 1.5, leastMm: 0.75, fixed: false }, limits)
+ * @example balanceCut({ by: 'shop', valueMm: 0.0125 }, { aimMm: 1.5, leastMm: 0.75, fixed: false }, { lagPerMm2: 1, lagLimitMm: 0.0125, wattsPerMm2: null, availableWatts: null, burnMm: null }) // { infeedMm: 0.0125, traverseMm: 1, by: 'shop' }
  */
 export function balanceCut(
   cap: Cap,
