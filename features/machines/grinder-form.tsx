@@ -23,7 +23,10 @@ export function GrinderForm({ grinder, backTo }: { grinder: Grinder | null; back
   const router = useRouter();
   const client = useQueryClient();
   const save = useSaveGrinder(shop.id);
-  const [start] = useState(() => (grinder ? grinderValuesOf(grinder, units) : newGrinder(units)));
+  const [fresh] = useState(() => newGrinder(units));
+  const start = grinder
+    ? { values: grinderValuesOf(grinder, units), version: grinder.version }
+    : { values: fresh, version: null };
   return (
     <PlanReader units={units}>
       <RecordForm<GrinderValues, Grinder>
@@ -32,7 +35,6 @@ export function GrinderForm({ grinder, backTo }: { grinder: Grinder | null; back
         noun="grinder"
         subject={`grinder:${grinder?.id ?? 'new'}`}
         start={start}
-        version={grinder?.version ?? null}
         isValues={isGrinderValues}
         schema={grinderSchema}
         inUnits={grinderInUnits}

@@ -19,7 +19,10 @@ export function LatheForm({ lathe, backTo }: { lathe: Lathe | null; backTo: Href
   const router = useRouter();
   const client = useQueryClient();
   const save = useSaveLathe(shop.id);
-  const [start] = useState(() => (lathe ? latheValuesOf(lathe, units) : newLathe(units)));
+  const [fresh] = useState(() => newLathe(units));
+  const start = lathe
+    ? { values: latheValuesOf(lathe, units), version: lathe.version }
+    : { values: fresh, version: null };
   return (
     <RecordForm<LatheValues, Lathe>
       title={lathe ? lathe.name : 'Add a lathe'}
@@ -27,7 +30,6 @@ export function LatheForm({ lathe, backTo }: { lathe: Lathe | null; backTo: Href
       noun="lathe"
       subject={`lathe:${lathe?.id ?? 'new'}`}
       start={start}
-      version={lathe?.version ?? null}
       isValues={isLatheValues}
       schema={latheSchema}
       inUnits={latheInUnits}

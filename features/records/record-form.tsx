@@ -43,19 +43,26 @@ export interface Stored<Values> {
   version: number;
 }
 
+/** What a form starts from; no version is a record that the server has not seen. */
+export interface Start<Values> {
+  values: Values;
+  version: number | null;
+}
+
 interface RecordFormProps<Values extends RecordValues, Item> {
   title: string;
-  backTo: Href;
+  /** Where "back" leads; without it `actions` hold the way out. */
+  backTo?: Href;
+  actions?: ReactNode;
   /** "wheel", "lathe": names the record in the words around the form. */
   noun: string;
   /** Tells this form's local draft from others of the shop: "wheel:new". */
   subject: string;
-  start: Values;
-  /** Null for a record that the server has not seen. */
-  version: number | null;
+  start: Start<Values>;
   isValues: (value: unknown) => value is Values;
   schema: (values: Values) => AnySchema;
-  inUnits: (values: Values, units: UnitSystem) => Values;
+  /** Left out by forms without quantities. */
+  inUnits?: (values: Values, units: UnitSystem) => Values;
   /** The facts of two versions, to be compared. */
   parts: (versions: readonly Values[]) => Part<Values>[];
   save: (values: Values, version: number | null) => Promise<Item>;
@@ -96,6 +103,13 @@ export function RecordForm<Values extends RecordValues & FormikValues, Item>(
 /** The server counts in its own shape: what the form holds flat stands under `data` there. */
 const formPath = (path: string) => path.replace(/(^|\.)data\./g, '$1');
 
+const unchanged = <Values,>(values: Values): Values => values;
+
+const UNIT_OPTIONS = [
+  { value: 'mm', label: 'mm' },
+  { value: 'inch', label: 'inch' },
+] as const;
+
 interface Refused<Values> {
   values: Values;
   errors: Record<string, string>;
@@ -107,13 +121,16 @@ function KeptForm<Values extends RecordValues & FormikValues, Item>({
   ...props
 }: RecordFormProps<Values, Item> & { draftKey: string; onDiscard: () => void }) {
   const { shop, units, setUnits } = useShop();
+  const inUnits = props.inUnits ?? unchanged;
+  // The record may be fetched anew while it is edited; the form stands on what it started from.
+  const [start] = useState(props.start);
   const [draft] = useState(() => readDraft(key, props.isValues));
-  const [initialValues] = useState(() => props.inUnits(draft ? draft.values : props.start, units));
-  const [version, setVersion] = useState(draft ? draft.version : props.version);
+  const [initialValues] = useState(() => inUnits(draft ? draft.values : start.values, units));
+  const [version, setVersion] = useState(draft ? draft.version : start.version);
   const [problem, setProblem] = useState<unknown>(null);
   const [theirs, setTheirs] = useState<Stored<Values> | null>(null);
   const refused = useRef<Refused<Values> | null>(null);
-  const base = version === props.version ? props.inUnits(props.start, units) : null;
+  const base = version === start.version ? inUnits(start.values, units) : null;
   const keeper = useRef<{ forget: () => void }>(null);
 
   /** The server's word on a field holds until that field is changed. */
@@ -180,6 +197,7 @@ function KeptForm<Values extends RecordValues & FormikValues, Item>({
           title={props.title}
           over={shop.name}
           backTo={props.backTo}
+          actions={props.actions}
           width="form"
           pane={props.pane?.(values)}
           strip={
@@ -208,19 +226,18 @@ function KeptForm<Values extends RecordValues & FormikValues, Item>({
           ) : null}
           <FormErrors />
           <FormProblem error={problem} />
-          <Segmented
-            name="units"
-            label="Units"
-            value={values.units}
-            options={[
-              { value: 'mm', label: 'mm' },
-              { value: 'inch', label: 'inch' },
-            ]}
-            onChange={(next) => {
-              setUnits(next);
-              void setValues(props.inUnits(values, next), false);
-            }}
-          />
+          {props.inUnits ? (
+            <Segmented
+              name="units"
+              label="Units"
+              value={values.units}
+              options={UNIT_OPTIONS}
+              onChange={(next) => {
+                setUnits(next);
+                void setValues(inUnits(values, next), false);
+              }}
+            />
+          ) : null}
           {props.children(values)}
           {theirs ? (
             <ConflictSheet

@@ -1,6 +1,12 @@
 import type { Material } from '@/shared/domain/materials';
-import type { Holding, Operation, PassStrokes, Preload, SetupPart } from '@/shared/domain/setups';
-import type { LookResult, MarkingPlace, RingResult } from '@/shared/domain/wheels';
+import type {
+  Holding,
+  Operation,
+  PassStrokes,
+  Preload,
+  SetupPart,
+  SetupState,
+} from '@/shared/domain/setups';
 
 export const OPERATION_WORDS: Record<Operation, string> = {
   jaws: 'Chuck jaws',
@@ -53,21 +59,11 @@ export const STROKE_WORDS: Record<PassStrokes, string> = {
   'one stroke': 'One stroke',
   'both strokes': 'There and back',
 };
-
-export const LOOK_WORDS: Record<LookResult, string> = {
-  sound: 'Looked at, no fault seen',
-  damaged: 'Damaged',
+export const STATE_WORDS: Record<SetupState, string> = {
+  draft: 'Draft',
+  'for review': 'For review',
+  cleared: 'Cleared',
+  retired: 'Retired',
 };
 
-export const RING_WORDS: Record<RingResult, string> = {
-  clear: 'Rings clear',
-  dull: 'Dull',
-  silent: 'Does not ring',
-};
-
-export const MARKING_PLACE_WORDS: Record<MarkingPlace, string> = {
-  wheel: 'on the wheel',
-  blotter: 'on the blotter',
-  box: 'on the box',
-  tag: 'on a tag',
-};
+export { LOOK_WORDS, MARKING_PLACE_WORDS, RING_WORDS } from '@/features/wheels';

@@ -29,7 +29,10 @@ export function WheelForm({ wheel, backTo }: WheelFormProps) {
   const router = useRouter();
   const client = useQueryClient();
   const save = useSaveWheel(shop.id);
-  const [start] = useState(() => (wheel ? valuesOf(wheel, units) : newWheel(units)));
+  const [fresh] = useState(() => newWheel(units));
+  const start = wheel
+    ? { values: valuesOf(wheel, units), version: wheel.version }
+    : { values: fresh, version: null };
   return (
     <PlanReader units={units}>
       <RecordForm<WheelValues, Wheel>
@@ -38,7 +41,6 @@ export function WheelForm({ wheel, backTo }: WheelFormProps) {
         noun="wheel"
         subject={`wheel:${wheel?.id ?? 'new'}`}
         start={start}
-        version={wheel?.version ?? null}
         isValues={isWheelValues}
         schema={wheelSchema}
         inUnits={inUnits}

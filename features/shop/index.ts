@@ -1,0 +1,1 @@
+export { RailSwitch } from './components/rail-switch';
