@@ -6,7 +6,7 @@ import { Screen } from '@/features/ui/screen';
 import { Reading, Small } from '@/features/ui/text';
 
 import { sourceLine, Subject } from './components/subject';
-import { cautionsOn, SIGNED_SUBJECTS } from './subjects';
+import { cautionsOn, FURTHER_SUBJECTS } from './subjects';
 
 /** The cautions of the trade, by subject and with their sources. */
 export function BoardScreen() {
@@ -22,7 +22,7 @@ export function BoardScreen() {
         ))}
       </Card>
       <Row gap={8} align="flex-start">
-        {SIGNED_SUBJECTS.map((subject) => (
+        {FURTHER_SUBJECTS.map((subject) => (
           <Cell key={subject} least={400}>
             <Subject subject={subject} />
           </Cell>

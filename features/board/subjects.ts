@@ -1,24 +1,5 @@
-import type { CautionIcon } from '@/features/ui/caution-icon';
 import { CAUTION_SUBJECTS, type Caution, type CautionSubject } from '@/shared/rules/caution';
 import { CAUTIONS, type CautionId } from '@/shared/rules/cautions';
-import type { ComponentProps } from 'react';
-
-type Sign = ComponentProps<typeof CautionIcon>['subject'];
-
-/** The sign over each subject; what comes first of all stands above the signs. */
-export const SUBJECT_SIGNS: Record<Exclude<CautionSubject, 'First of all'>, Sign> = {
-  'Wheel soundness': 'ring',
-  Speed: 'clear',
-  'Mounting and flanges': 'mount',
-  'Guards and clearance': 'guard',
-  Rotation: 'rotation',
-  Dressing: 'isolate',
-  Grinding: 'holding',
-  'Dust and mist': 'dust',
-  Fire: 'sparks',
-  'Hands and clothing': 'hands',
-  'The lathe': 'ways',
-};
 
 export interface PostedCaution extends Caution {
   id: CautionId;
@@ -33,8 +14,8 @@ export const cautionsOn = (subject: CautionSubject): PostedCaution[] =>
     (caution) => caution.subject === subject,
   );
 
-/** Every subject but the first, which is no sign's. */
-export const SIGNED_SUBJECTS = CAUTION_SUBJECTS.filter((subject) => subject !== 'First of all');
+/** Every subject but the first, which stands above the others. */
+export const FURTHER_SUBJECTS = CAUTION_SUBJECTS.filter((subject) => subject !== 'First of all');
 
 /** For which work a caution holds; empty where it always does. */
 export function belongsWords({ operations, materials, mounted }: Caution): string {

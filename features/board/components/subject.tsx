@@ -4,15 +4,15 @@ import { sourceWords } from '@/features/plan';
 import { CautionIcon } from '@/features/ui/caution-icon';
 import { Heading, Reading, Small } from '@/features/ui/text';
 import { space } from '@/features/ui/tokens';
+import type { CautionSubject } from '@/shared/rules/caution';
 
-import { belongsWords, cautionsOn, SUBJECT_SIGNS } from '../subjects';
-import type { PostedCaution } from '../subjects';
+import { belongsWords, cautionsOn, type PostedCaution } from '../subjects';
 
 /** The cautions on one subject under its sign, each with where it comes from. */
-export function Subject({ subject }: { subject: keyof typeof SUBJECT_SIGNS }) {
+export function Subject({ subject }: { subject: CautionSubject }) {
   return (
     <View style={styles.subject}>
-      <CautionIcon subject={SUBJECT_SIGNS[subject]} size={56} />
+      <CautionIcon subject={subject} size={56} />
       <View style={styles.cautions}>
         <Heading>{subject}</Heading>
         {cautionsOn(subject).map((caution) => (
