@@ -25,15 +25,18 @@ launch(async (launcher) => {
   );
   const expo = path.join(ROOT, 'node_modules/.bin/expo');
   const metro = launcher.start([expo, 'start', '--localhost', '--port', String(port)], {
+    // Expo draws menus and codes for native apps on a terminal; through a pipe it does not.
+    stdio: ['ignore', 'pipe', 'inherit'],
     env: {
       API_URL: `http://127.0.0.1:${apiPort}`,
       BROWSER: 'none',
       EXPO_NO_TELEMETRY: '1',
       EXPO_OFFLINE: '1',
       // With CI set, Metro would not watch.
-      CI: '',
+      CI: 'false',
     },
   });
+  metro.child.stdout.pipe(process.stdout);
   welcome(`http://localhost:${port}`, signIns);
   return Promise.race([api.ended, metro.ended]);
 });
