@@ -92,27 +92,33 @@ function QuickCheckForm() {
     <PlanReader units={values.units}>
       <Stack>
         <Heading>May this wheel run at this speed?</Heading>
-        <Segmented
-          name="units"
-          label="Sizes in"
-          options={[
-            { value: 'mm', label: 'mm' },
-            { value: 'inch', label: 'inch' },
-          ]}
-          value={values.units}
-          onChange={(units) => void setValues(inUnits(values, units))}
-        />
+        <Row align="flex-start">
+          <Cell least={120}>
+            <Segmented
+              name="units"
+              label="Sizes in"
+              options={[
+                { value: 'mm', label: 'mm' },
+                { value: 'inch', label: 'inch' },
+              ]}
+              value={values.units}
+              onChange={(units) => void setValues(inUnits(values, units))}
+            />
+          </Cell>
+          <Cell least={190}>
+            <Segmented
+              name="markingUnit"
+              label="The marking says"
+              options={MARKING_UNITS.map((unit) => ({ value: unit, label: unit }))}
+              value={values.markingUnit}
+              onChange={(unit) => void setFieldValue('markingUnit', unit)}
+            />
+          </Cell>
+        </Row>
         <Row align="flex-start">
           <Cell>{quantity('diameter')}</Cell>
           <Cell>{quantity('marking')}</Cell>
         </Row>
-        <Segmented
-          name="markingUnit"
-          label="The marking says"
-          options={MARKING_UNITS.map((unit) => ({ value: unit, label: unit }))}
-          value={values.markingUnit}
-          onChange={(unit) => void setFieldValue('markingUnit', unit)}
-        />
         <Segmented
           name="spindleWay"
           label="Spindle"

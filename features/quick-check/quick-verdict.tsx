@@ -20,7 +20,7 @@ export function QuickVerdict({ check }: { check: QuickCheck }) {
     <Stack>
       <VerdictAnnouncer verdict={verdict} count={count} />
       {verdict === 'stop' ? null : <VerdictBadge verdict={verdict} count={count} />}
-      <FindingList findings={findings} />
+      <FindingList findings={findings} {...(verdict === 'stop' ? { headline: 'too fast' } : {})} />
       <Card>
         {verdict === 'incomplete' ? (
           <Body tone="textSoft">{`Still needed: ${needs.map(({ label }) => label).join(', ')}.`}</Body>

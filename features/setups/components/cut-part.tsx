@@ -5,6 +5,7 @@ import { List } from '@/features/ui/list-row';
 import { RadioRows } from '@/features/ui/radio-row';
 import { Segmented } from '@/features/ui/segmented';
 import { Small } from '@/features/ui/text';
+import { useLayout } from '@/features/ui/use-layout';
 import { PASS_STROKES } from '@/shared/domain/setups';
 import type { Plan } from '@/shared/rules';
 import { formatQuantity } from '@/shared/units/format';
@@ -28,6 +29,7 @@ const GOVERNOR_WORDS: Record<NonNullable<Plan['infeed']['governedBy']>, string> 
 /** Work speed, infeed and traverse: suggested, each can be overruled. */
 export function CutPart() {
   const { values, setInput, plan } = usePlanner();
+  const { wide } = useLayout();
   const { cut } = values.inputs;
   const { infeed, traverse } = plan;
   return (
@@ -39,7 +41,9 @@ export function CutPart() {
       {infeed.governedBy ? (
         <Small>{`Rough infeed: ${GOVERNOR_WORDS[infeed.governedBy]}.`}</Small>
       ) : null}
-      {plan.passes.length > 0 ? <InfeedPasses passes={plan.passes} units={values.units} /> : null}
+      {!wide && plan.passes.length > 0 ? (
+        <InfeedPasses passes={plan.passes} units={values.units} />
+      ) : null}
       <LatheSteps />
       <Fold
         label="Traverse and overrun"

@@ -1,4 +1,4 @@
-import { FigureReadout, FindingList } from '@/features/plan';
+import { FigureReadout, figureText, FindingList } from '@/features/plan';
 import { Stack } from '@/features/ui/card';
 import { Fold } from '@/features/ui/fold';
 import { ReadoutRow } from '@/features/ui/readout';
@@ -12,7 +12,7 @@ import { CautionList } from './caution-list';
 import { Needs } from './findings-sheet';
 import { OrderOfWork } from './order-of-work';
 import { InfeedPasses } from './pictures/infeed-passes';
-import { JawContact } from './pictures/jaw-contact';
+import { JawContactPicture } from './pictures/jaw-contact';
 
 /** The plan beside the form on a wide screen. */
 export function PlanPane({ onPart }: { onPart: (part: SetupPart) => void }) {
@@ -30,7 +30,7 @@ export function PlanPane({ onPart }: { onPart: (part: SetupPart) => void }) {
           label="Spindle step"
           figure={speed.spindleRpm}
           value={step ? step.name : null}
-          {...(step?.rpm.value ? { unit: `${Math.round(step.rpm.value)} rpm` } : {})}
+          unit={figureText(speed.spindleRpm, values.units)}
         />
         <FigureReadout label="Wheel speed" figure={speed.wheelSpeed} />
         <FigureReadout label="Work" figure={work.latheRpm} />
@@ -42,11 +42,11 @@ export function PlanPane({ onPart }: { onPart: (part: SetupPart) => void }) {
         <FigureReadout label="Stock, on radius" figure={stock} options={{ rounding: 'up' }} />
         <FigureReadout label="Time" figure={time.total} options={{ digits: 0, rounding: 'up' }} />
       </ReadoutRow>
-      {plan.jaws ? (
+      {plan.jaws && jawBoreMm !== null && padWidthMm !== null ? (
         <>
           <Subheading>Where each jaw starts to touch</Subheading>
-          <JawContact
-            jaws={plan.jaws}
+          <JawContactPicture
+            plan={plan.jaws}
             boreMm={jawBoreMm}
             padWidthMm={padWidthMm}
             units={values.units}

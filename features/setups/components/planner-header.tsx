@@ -25,9 +25,9 @@ export function PlannerTitle({ name, saved, onBack, onMenu }: PlannerHeaderProps
         <Title tone="onEnamel" lines={1}>
           {name || 'Without a name'}
         </Title>
-      </View>
-      <View role="status" aria-live="polite">
-        <Small tone="onEnamelSoft">{saved}</Small>
+        <View role="status" aria-live="polite">
+          <Small tone="onEnamelSoft">{saved}</Small>
+        </View>
       </View>
       <IconButton label="Name, units, copy" icon="edit" color="onEnamel" onPress={onMenu} />
     </View>

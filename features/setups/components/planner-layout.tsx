@@ -106,7 +106,8 @@ function PhoneBody({ title, problem }: BodyProps) {
   const [part, setPart] = useState<SetupPart>('work');
   const [findings, setFindings] = useState(false);
   const Part = PARTS[part];
-  const first = plan.findings[0];
+  // Notes wait behind the verdict: the first view stays calm.
+  const first = plan.findings.find(({ level }) => level !== 'note');
   return (
     <>
       <View role="banner" style={styles.header}>

@@ -6,13 +6,14 @@ import { List } from '@/features/ui/list-row';
 import { Segmented } from '@/features/ui/segmented';
 import { Select } from '@/features/ui/select';
 import { Engraved } from '@/features/ui/text';
+import { useLayout } from '@/features/ui/use-layout';
 import { MATERIALS } from '@/shared/domain/materials';
 import { HOLDINGS, OPERATIONS, PRELOADS } from '@/shared/domain/setups';
 
 import { usePlanner } from '../planner-context';
 import { HOLDING_WORDS, MATERIAL_WORDS, OPERATION_WORDS, PRELOAD_WORDS } from '../words';
 import { PlannerQuantity, QuantityRow } from './planner-fields';
-import { JawContact } from './pictures/jaw-contact';
+import { JawContactPicture } from './pictures/jaw-contact';
 
 /** What is ground, of what, and how it runs now. */
 export function WorkPart() {
@@ -49,6 +50,7 @@ export function WorkPart() {
 
 function JawFields() {
   const { values, plan, setInput } = usePlanner();
+  const { wide } = useLayout();
   const { work } = values.inputs;
   return (
     <>
@@ -67,9 +69,9 @@ function JawFields() {
         <PlannerQuantity path="work.farRunOutMm" />
         <PlannerQuantity path="work.farHighSpotDeg" />
       </QuantityRow>
-      {plan.jaws ? (
-        <JawContact
-          jaws={plan.jaws}
+      {!wide && plan.jaws && work.jawBoreMm !== null && work.padWidthMm !== null ? (
+        <JawContactPicture
+          plan={plan.jaws}
           boreMm={work.jawBoreMm}
           padWidthMm={work.padWidthMm}
           units={values.units}

@@ -7,6 +7,7 @@ import type { JawContact, JawPlan } from '@/shared/rules/types';
 
 import {
   chuckLayout,
+  hasFullLabels,
   jawOutline,
   pixelsPerMm,
   polar,

@@ -55,7 +55,7 @@ export function groupName({ first, last, stage }: PassGroup): string {
 export function dialWords(group: PassGroup, units: UnitSystem): string {
   if (isSparkOut(group.stage)) return 'leave';
   const each = group.first === group.last ? '' : ' each';
-  if (group.divisions === null) return `+${lengthWords(group.infeedMm, units)}${each}`;
+  if (group.divisions === null) return `+${infeedWords(group, units)}${each}`;
   return `+${formatQuantity({ value: group.divisions, unit: 'div' }, units, { digits: 1 })}${each}`;
 }
 

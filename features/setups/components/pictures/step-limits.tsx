@@ -8,7 +8,7 @@ import { useLayout } from '@/features/ui/use-layout';
 import type { UnitSystem } from '@/shared/domain/people';
 import type { BeltStepPlan, Plan } from '@/shared/rules/types';
 
-import { limitWords, lockedBecause, stepRpm, stepSpeed } from './step-words';
+import { limitWords, lockedBecause, stepRpm, stepSpeed, stepSpoken } from './step-words';
 
 interface StepLimitsProps {
   speed: Plan['speed'];
@@ -39,19 +39,23 @@ export function StepLimits({ speed, limits, units, onChoose }: StepLimitsProps) 
         value={speed.chosen}
         readOnly={onChoose === undefined}
         onChange={(id) => onChoose?.(id)}
-        options={speed.steps.map((step) => ({
-          value: step.id,
-          locked: step.allowed === false,
-          face: (
-            <StepFace
-              step={step}
-              units={units}
-              reason={lockedBecause(step, limits.governing, units)}
-              barShare={share(step.rpm.value ?? 0)}
-              limitAt={limitAt}
-            />
-          ),
-        }))}
+        options={speed.steps.map((step) => {
+          const reason = lockedBecause(step, limits.governing, units);
+          return {
+            value: step.id,
+            locked: step.allowed === false,
+            spoken: stepSpoken(step, reason, units),
+            face: (
+              <StepFace
+                step={step}
+                units={units}
+                reason={reason}
+                barShare={share(step.rpm.value ?? 0)}
+                limitAt={limitAt}
+              />
+            ),
+          };
+        })}
       />
     </View>
   );
