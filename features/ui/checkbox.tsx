@@ -46,7 +46,7 @@ export function Checkbox({ name, label, checked, onChange, hint, error, disabled
           {checked ? (
             <Svg width={18} height={18} viewBox="0 0 18 18">
               <Path
-                d="M3.500 9.500l3.700 3.700 7.300-8"
+                d="M3.5 9.5l3.7 3.7 7.3-8"
                 fill="none"
                 stroke={colors.onChosen}
                 strokeWidth={2.4}

@@ -33,6 +33,7 @@ export function Fold({ label, value, children, startOpen = false, open, onToggle
     <View style={styles.fold}>
       <Pressable
         role="button"
+        aria-label={value ? `${label}: ${value}` : label}
         aria-expanded={shown}
         onPress={toggle}
         style={({ pressed }) => [styles.title, pressed && styles.pressed]}

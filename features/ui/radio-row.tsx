@@ -14,7 +14,7 @@ export interface RadioRowOption<Value extends string> {
   detail?: string;
   /** Why it cannot be chosen; such a row can still be read. */
   lockedBecause?: string;
-  /** Stands at the right edge. */
+  /** Stands at the right edge, and is not spoken: say it in the detail too. */
   aside?: ReactNode;
 }
 
@@ -50,6 +50,7 @@ export function RadioRows<Value extends string>({
         options={options.map((option) => ({
           value: option.value,
           locked: Boolean(option.lockedBecause),
+          spoken: [option.label, option.detail, option.lockedBecause].filter(Boolean).join(', '),
           face: <RadioFace option={option} chosen={option.value === value} />,
         }))}
       />
