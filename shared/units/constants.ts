@@ -6,7 +6,6 @@ export const MM_PER_INCH = 25.4;
 export const MM_PER_FOOT = convert(1).from('ft').to('in') * MM_PER_INCH;
 export const MM_PER_M = convert(1).from('m').to('mm');
 export const SECONDS_PER_MINUTE = convert(1).from('min').to('s');
-export const RADIANS_PER_DEGREE = convert(1).from('deg').to('rad');
 
 /** Exact by definition. */
 export const NEWTONS_PER_POUND_FORCE = 4.4482216152605;
