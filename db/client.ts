@@ -1,5 +1,6 @@
 import { sql } from 'drizzle-orm';
-import { drizzle } from 'drizzle-orm/node-postgres';
+import { drizzle, type NodePgQueryResultHKT } from 'drizzle-orm/node-postgres';
+import type { PgDatabase } from 'drizzle-orm/pg-core';
 import { Pool } from 'pg';
 
 import * as schema from './schema';
@@ -68,6 +69,4 @@ export function createDatabase(url: string, options: DatabaseOptions = {}) {
 }
 
 export type Database = ReturnType<typeof createDatabase>;
-export type Transaction = Parameters<
-  Parameters<ReturnType<typeof drizzle<typeof schema, Pool>>['transaction']>[0]
->[0];
+export type Transaction = PgDatabase<NodePgQueryResultHKT, typeof schema>;
