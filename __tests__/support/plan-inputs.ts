@@ -2,7 +2,7 @@ import type { GrinderData, LatheData, QuillData } from '@/shared/domain/machines
 import type { Operation, PlanInput, SetupInputs } from '@/shared/domain/setups';
 import { DEFAULT_SHOP_RULES } from '@/shared/domain/shop-rules';
 import type { WheelData } from '@/shared/domain/wheels';
-import { assemblePlanInput, emptySetupInputs } from '@/shared/rules';
+import { assemblePlanInput, emptySetupInputs, type FindingCode, type Plan } from '@/shared/rules';
 
 /** Invented machines and wheels of ordinary sizes, for tests that need a whole plan. */
 export const LATHE: LatheData = {
@@ -137,7 +137,7 @@ export const LARGE_WHEEL: WheelData = {
 
 export const TODAY = '2026-03-02';
 
-const found = { lathe: LATHE, rules: DEFAULT_SHOP_RULES, today: TODAY };
+const shop = { lathe: LATHE, rules: DEFAULT_SHOP_RULES, today: TODAY };
 const machine = { latheId: 'lathe', grinderId: 'grinder', quillId: 'quill', workRotation: null };
 
 /** Jaws of a 160 mm chuck that indicate 0.11 mm, ground under a ring, with a shield. */
@@ -164,7 +164,7 @@ export const jawsInput = (): PlanInput => {
       machine: { ...machine, beltStepId: 'b', shieldFitted: true },
       wheel: { wheelId: 'wheel', typed: null },
     },
-    { ...found, grinder: BORE_GRINDER, quill: QUILL, wheel: SMALL_WHEEL },
+    { ...shop, grinder: BORE_GRINDER, quill: QUILL, wheel: SMALL_WHEEL },
   );
 };
 
@@ -187,7 +187,7 @@ export const boreInput = (): PlanInput => {
       machine: { ...machine, beltStepId: 'b', shieldFitted: false },
       wheel: { wheelId: 'wheel', typed: null },
     },
-    { ...found, grinder: BORE_GRINDER, quill: QUILL, wheel: SMALL_WHEEL },
+    { ...shop, grinder: BORE_GRINDER, quill: QUILL, wheel: SMALL_WHEEL },
   );
 };
 
@@ -211,7 +211,7 @@ export const outsideInput = (): PlanInput => {
       machine: { ...machine, beltStepId: 'b', shieldFitted: false },
       wheel: { wheelId: 'wheel', typed: null },
     },
-    { ...found, grinder: SHAFT_GRINDER, quill: ARBOR, wheel: LARGE_WHEEL },
+    { ...shop, grinder: SHAFT_GRINDER, quill: ARBOR, wheel: LARGE_WHEEL },
   );
 };
 
@@ -220,3 +220,19 @@ export const GOOD_INPUTS: Record<Operation, () => PlanInput> = {
   bore: boreInput,
   outside: outsideInput,
 };
+
+export const codes = (plan: Plan) => plan.findings.map(({ code }) => code);
+export const found = (plan: Plan, code: FindingCode) =>
+  plan.findings.find((entry) => entry.code === code);
+export const withWork = (input: PlanInput, work: Partial<PlanInput['work']>): PlanInput => ({
+  ...input,
+  work: { ...input.work, ...work },
+});
+export const withCut = (input: PlanInput, cut: Partial<PlanInput['cut']>): PlanInput => ({
+  ...input,
+  cut: { ...input.cut, ...cut },
+});
+export const withStep = (input: PlanInput, beltStepId: string | null): PlanInput => ({
+  ...input,
+  machine: { ...input.machine, beltStepId },
+});

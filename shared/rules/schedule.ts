@@ -74,7 +74,7 @@ export function planPasses(spec: ScheduleSpec): Schedule {
 }
 
 function passCount(totalMm: number, infeedMm: number): number {
-  return infeedMm > 0 ? Math.ceil(totalMm / infeedMm - 1e-6) : 0;
+  return infeedMm > 0 ? Math.max(Math.ceil(totalMm / infeedMm - 1e-6), 0) : 0;
 }
 
 /** Writes passes down while it follows dial, metal and spring. */
