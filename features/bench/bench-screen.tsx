@@ -1,7 +1,7 @@
 import { useInfiniteQuery, useQuery } from '@tanstack/react-query';
 
 import { machineQueries } from '@/features/machines';
-import { LoadProblem, shopDay } from '@/features/records';
+import { LinkRow, LoadProblem, shopDay, whenWords } from '@/features/records';
 import { useShop } from '@/features/session';
 import { NewSetup, SetupList, setupQueries } from '@/features/setups';
 import { Cell, Row, Stack } from '@/features/ui/card';
@@ -72,11 +72,11 @@ export function BenchScreen() {
               <Stack gap={2}>
                 <Heading>Clear, changed lately</Heading>
                 <List label="Clear, changed lately">
-                  {recent.slice(0, MOST_SHOWN).map(({ id, name, updatedByName }) => (
+                  {recent.slice(0, MOST_SHOWN).map(({ id, name, updatedAt, updatedByName }) => (
                     <ListRow
                       key={id}
                       label={name}
-                      detail={updatedByName}
+                      detail={`${whenWords(updatedAt, shop.timeZone)}, ${updatedByName}`}
                       href={{
                         pathname: '/shops/[shopId]/setups/[setupId]',
                         params: { shopId: shop.id, setupId: id },
@@ -93,15 +93,16 @@ export function BenchScreen() {
                 <Heading>Wheels that must not run</Heading>
                 <List label="Wheels that must not run">
                   {out.slice(0, MOST_SHOWN).map(({ wheel, standing }) => (
-                    <ListRow
+                    <LinkRow
                       key={wheel.id}
                       label={[wheel.tag, wheel.data.marking].filter(Boolean).join(' · ')}
-                      aside={<StandingWords {...standing} />}
                       href={{
                         pathname: '/shops/[shopId]/wheels/[wheelId]',
                         params: { shopId: shop.id, wheelId: wheel.id },
                       }}
-                    />
+                    >
+                      <StandingWords {...standing} />
+                    </LinkRow>
                   ))}
                 </List>
               </Stack>

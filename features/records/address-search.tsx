@@ -1,7 +1,9 @@
 import { useLocalSearchParams, useRouter } from 'expo-router';
 import { useEffect, useState } from 'react';
+import { StyleSheet, View } from 'react-native';
 
 import { Field } from '@/features/ui/field';
+import { measure } from '@/features/ui/tokens';
 
 const PAUSE_MS = 300;
 
@@ -43,15 +45,19 @@ export function SearchField({ label, hint, maxLength }: SearchFieldProps) {
     return () => clearTimeout(timer);
   });
   return (
-    <Field
-      name="search"
-      label={label}
-      hint={hint}
-      value={text}
-      onChangeText={setText}
-      onSubmit={() => send(text.trim())}
-      inputMode="search"
-      maxLength={maxLength}
-    />
+    <View style={styles.search}>
+      <Field
+        name="search"
+        label={label}
+        hint={hint}
+        value={text}
+        onChangeText={setText}
+        onSubmit={() => send(text.trim())}
+        inputMode="search"
+        maxLength={maxLength}
+      />
+    </View>
   );
 }
+
+const styles = StyleSheet.create({ search: { width: '100%', maxWidth: measure.form } });

@@ -2,6 +2,7 @@ export { SearchField, useAddressPart } from './address-search';
 export { ChoiceField, knownOrNull, UNKNOWN } from './choice-field';
 export { DateField, dateText, readDate } from './date-field';
 export { FormFold } from './form-fold';
+export { LinkRow } from './link-row';
 export { LoadProblem, MorePages } from './more-pages';
 export { Facts, keyPart, NOT_GIVEN, rowParts, type Part } from './parts';
 export { RecordForm, type RecordValues, type Stored } from './record-form';

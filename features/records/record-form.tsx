@@ -7,7 +7,7 @@ import {
   type FormikValues,
 } from 'formik';
 import type { Href } from 'expo-router';
-import { useImperativeHandle, useMemo, useRef, useState, type ReactNode, type Ref } from 'react';
+import { useRef, useState, type ReactNode } from 'react';
 import { ValidationError, type AnySchema } from 'yup';
 
 import {
@@ -17,7 +17,6 @@ import {
   FormProblem,
   readDraft,
   removeDraft,
-  useLocalDraft,
 } from '@/features/forms';
 import { useShop } from '@/features/session';
 import { isRefusal, problemOf } from '@/features/transport';
@@ -26,9 +25,11 @@ import { FieldScopeProvider } from '@/features/ui/field-ids';
 import { Notice } from '@/features/ui/notice';
 import { Screen } from '@/features/ui/screen';
 import { Segmented } from '@/features/ui/segmented';
+import { useLayout } from '@/features/ui/use-layout';
 import type { UnitSystem } from '@/shared/domain/people';
 
 import { ConflictSheet } from './conflict-sheet';
+import { DraftKeeper, type Keeper } from './draft-keeper';
 import type { Part } from './parts';
 import { SaveStrip } from './save-strip';
 
@@ -71,6 +72,7 @@ interface RecordFormProps<Values extends RecordValues, Item> {
   /** Fetches what an earlier, unanswered attempt to create has stored. */
   fetchCurrent: (id: string) => Promise<unknown>;
   onSaved: (item: Item) => void;
+  /** What follows from the values: beside the fields on a wide screen, over them on a phone. */
   pane?: (values: Values) => ReactNode;
   children: (values: Values) => ReactNode;
 }
@@ -121,6 +123,7 @@ function KeptForm<Values extends RecordValues & FormikValues, Item>({
   ...props
 }: RecordFormProps<Values, Item> & { draftKey: string; onDiscard: () => void }) {
   const { shop, units, setUnits } = useShop();
+  const { wide } = useLayout();
   const inUnits = props.inUnits ?? unchanged;
   // The record may be fetched anew while it is edited; the form stands on what it started from.
   const [start] = useState(props.start);
@@ -131,7 +134,7 @@ function KeptForm<Values extends RecordValues & FormikValues, Item>({
   const [theirs, setTheirs] = useState<Stored<Values> | null>(null);
   const refused = useRef<Refused<Values> | null>(null);
   const base = version === start.version ? inUnits(start.values, units) : null;
-  const keeper = useRef<{ forget: () => void }>(null);
+  const keeper = useRef<Keeper>(null);
 
   /** The server's word on a field holds until that field is changed. */
   const withRefused = (values: Values, errors: FormikErrors<Values>) =>
@@ -192,19 +195,19 @@ function KeptForm<Values extends RecordValues & FormikValues, Item>({
       validateOnChange={false}
       onSubmit={(values, { setErrors }) => send(values, version, setErrors)}
     >
-      {({ values, setValues, setErrors, submitForm, isSubmitting }) => (
+      {({ values, dirty, setValues, setErrors, submitForm, isSubmitting }) => (
         <Screen
           title={props.title}
           over={shop.name}
           backTo={props.backTo}
           actions={props.actions}
           width="form"
-          pane={props.pane?.(values)}
+          pane={wide ? props.pane?.(values) : undefined}
           strip={
             <SaveStrip
               label={`Save the ${props.noun}`}
               busy={isSubmitting}
-              kept={values !== initialValues || draft !== null}
+              kept={dirty || draft !== null}
               onSave={() => {
                 refused.current = null;
                 void submitForm();
@@ -215,9 +218,8 @@ function KeptForm<Values extends RecordValues & FormikValues, Item>({
           <DraftKeeper
             handle={keeper}
             draftKey={key}
-            values={values}
-            version={version}
-            keep={draft !== null || values !== initialValues}
+            draft={{ values, version }}
+            keep={dirty || draft !== null}
           />
           {draft ? (
             <Notice action={<Button label="Discard them" kind="quiet" onPress={onDiscard} />}>
@@ -238,6 +240,7 @@ function KeptForm<Values extends RecordValues & FormikValues, Item>({
               }}
             />
           ) : null}
+          {wide ? null : props.pane?.(values)}
           {props.children(values)}
           {theirs ? (
             <ConflictSheet
@@ -257,26 +260,4 @@ function KeptForm<Values extends RecordValues & FormikValues, Item>({
       )}
     </Formik>
   );
-}
-
-interface DraftKeeperProps<Values> {
-  handle: Ref<{ forget: () => void }>;
-  draftKey: string;
-  values: Values;
-  version: number | null;
-  keep: boolean;
-}
-
-/** Writes the values to the device as they change; stands inside Formik, where they are known. */
-function DraftKeeper<Values>({
-  handle,
-  draftKey: key,
-  values,
-  version,
-  keep,
-}: DraftKeeperProps<Values>) {
-  const draft = useMemo(() => ({ values, version }), [values, version]);
-  const { forget } = useLocalDraft(key, draft, keep);
-  useImperativeHandle(handle, () => ({ forget }), [forget]);
-  return null;
 }

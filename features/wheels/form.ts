@@ -1,11 +1,7 @@
-import * as yup from 'yup';
-
 import {
   collectTexts,
-  dateText,
   EMPTY_ENTRY,
   entryInUnits,
-  entryRules,
   knownOrNull,
   mapEntries,
   readDate,
@@ -19,7 +15,6 @@ import {
 } from '@/features/records';
 import { newId } from '@/features/transport';
 import type { CreateWheelRequest, Wheel } from '@/shared/contracts/wheels';
-import { TEXT_LIMITS } from '@/shared/domain/limits';
 import { UNIT_SYSTEMS, type UnitSystem } from '@/shared/domain/people';
 import type {
   LookResult,
@@ -28,10 +23,9 @@ import type {
   WheelData,
   WheelState,
 } from '@/shared/domain/wheels';
-import { formatQuantity } from '@/shared/units/format';
 
 import { MANDREL_FIELDS, WHEEL_FIELDS, type MandrelField, type WheelField } from './fields';
-import { SPEED_UNITS, speedRule, storedSpeed, typedSpeed, type SpeedUnit } from './marked-speed';
+import { SPEED_UNITS, storedSpeed, typedSpeed, type SpeedUnit } from './marked-speed';
 
 interface MandrelValues extends Entries<MandrelField> {
   threaded: boolean;
@@ -141,17 +135,33 @@ export const withSpeedUnit = (values: WheelValues, speedUnit: SpeedUnit): WheelV
 
 /** The wheel as far as it is typed; null while a size is missing or cannot be read. */
 export function wheelDataOf(values: WheelValues): WheelData | null {
-  const { diameterNewMm, diameterNowMm, widthMm, holeMm, mounted, isMounted } = values;
-  const hole = holeMm.si ?? (isMounted ? 0 : null);
-  if (diameterNewMm.si === null || widthMm.si === null || hole === null) return null;
+  const { mounted, isMounted } = values;
+  const { diameterNewMm, widthMm, holeMm, ...plate } = plateOf(values);
+  if (diameterNewMm === null || widthMm === null || holeMm === null) return null;
   if (isMounted && (mounted.mandrelDiameterMm.si === null || mounted.overhangMm.si === null))
     return null;
   return {
+    ...plate,
+    diameterNewMm,
+    diameterNowMm: values.diameterNowMm.si ?? diameterNewMm,
+    widthMm,
+    holeMm,
+    looked: knownOrNull(values.looked),
+    rung: knownOrNull(values.rung),
+    expiresOn: readDate(values.expiresOn),
+    state: values.state,
+    setAsideReason: values.state === 'set aside' ? values.setAsideReason.trim() : null,
+  };
+}
+
+/** What stands on the wheel's plate while it is typed; null where a size is missing. */
+export function plateOf(values: WheelValues) {
+  const { mounted, isMounted } = values;
+  return {
     marking: values.marking.trim() || null,
-    diameterNewMm: diameterNewMm.si,
-    diameterNowMm: diameterNowMm.si ?? diameterNewMm.si,
-    widthMm: widthMm.si,
-    holeMm: hole,
+    diameterNewMm: values.diameterNewMm.si,
+    widthMm: values.widthMm.si,
+    holeMm: values.holeMm.si ?? (isMounted ? 0 : null),
     markedRpm: values.markedRpm.si,
     markedSpeedMPerS: values.markedSpeedMPerS.si,
     markingReadOn: knownOrNull(values.markingReadOn),
@@ -163,11 +173,6 @@ export function wheelDataOf(values: WheelValues): WheelData | null {
           makerMaximumRpm: mounted.makerMaximumRpm.si,
         }
       : null,
-    looked: knownOrNull(values.looked),
-    rung: knownOrNull(values.rung),
-    expiresOn: readDate(values.expiresOn),
-    state: values.state,
-    setAsideReason: values.state === 'set aside' ? values.setAsideReason.trim() : null,
   };
 }
 
@@ -180,62 +185,6 @@ export function toRequest(values: WheelValues): CreateWheelRequest {
   const typed = collectTexts(values.units, (change) => changed(values, change));
   typed[SPEED_UNIT_KEY] = values.speedUnit;
   return { id: values.id, tag: values.tag.trim(), data, typed };
-}
-
-const notLarger = (units: UnitSystem) =>
-  yup.mixed<TypedEntry>().test('not larger', (now, { parent, createError }) => {
-    const fresh = (parent as WheelValues).diameterNewMm.si;
-    if (!now || now.si === null || fresh === null || now.si <= fresh) return true;
-    const limit = formatQuantity({ value: fresh, unit: 'mm' }, units, { rounding: 'down' });
-    return createError({ message: `Diameter now is at most ${limit}, the diameter when new.` });
-  });
-
-const holeFits = (units: UnitSystem) =>
-  yup.mixed<TypedEntry>().test('hole fits', (hole, { parent, createError }) => {
-    const { diameterNewMm, diameterNowMm, isMounted } = parent as WheelValues;
-    const outer = diameterNowMm.si ?? diameterNewMm.si;
-    if (!hole) return true;
-    if (hole.text.trim() === '' && !isMounted)
-      return createError({ message: 'Enter the hole; 0 where there is none.' });
-    if (hole.si === null || outer === null || hole.si < outer) return true;
-    const limit = formatQuantity({ value: outer, unit: 'mm' }, units, { rounding: 'down' });
-    return createError({ message: `Hole is smaller than the wheel, ${limit}.` });
-  });
-
-export function wheelSchema({ units, speedUnit, isMounted, state }: WheelValues) {
-  const rules = entryRules(WHEEL_FIELDS, units, ['diameterNewMm', 'widthMm']);
-  return yup.object({
-    tag: yup
-      .string()
-      .trim()
-      .required('Enter the tag: the name under which the wheel hangs on the rack.')
-      .max(TEXT_LIMITS.tag, `The tag has at most ${TEXT_LIMITS.tag} characters.`),
-    marking: yup
-      .string()
-      .trim()
-      .max(TEXT_LIMITS.marking, `The marking has at most ${TEXT_LIMITS.marking} characters.`),
-    ...rules,
-    diameterNowMm: rules.diameterNowMm.concat(notLarger(units)),
-    holeMm: rules.holeMm.concat(holeFits(units)),
-    markedSpeedMPerS: speedRule(speedUnit),
-    ...(isMounted
-      ? {
-          mounted: yup.object(
-            entryRules(MANDREL_FIELDS, units, ['mandrelDiameterMm', 'overhangMm']),
-          ),
-        }
-      : {}),
-    expiresOn: dateText('Expires on'),
-    ...(state === 'set aside'
-      ? {
-          setAsideReason: yup
-            .string()
-            .trim()
-            .required('Enter why the wheel is set aside.')
-            .max(TEXT_LIMITS.note, `The reason has at most ${TEXT_LIMITS.note} characters.`),
-        }
-      : {}),
-  });
 }
 
 /** Guards what comes back from the device's storage. */

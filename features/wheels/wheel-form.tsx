@@ -3,7 +3,7 @@ import { useRouter, type Href } from 'expo-router';
 import { useState } from 'react';
 
 import { FindingList, PlanReader } from '@/features/plan';
-import { RecordForm } from '@/features/records';
+import { RecordForm, shopDay } from '@/features/records';
 import { useShop } from '@/features/session';
 import { Stack } from '@/features/ui/card';
 import { wheel as wheelContract, type Wheel } from '@/shared/contracts/wheels';
@@ -11,10 +11,12 @@ import type { UnitSystem } from '@/shared/domain/people';
 import { markingFindings } from '@/shared/rules/wheel-checks';
 
 import { Nameplate } from './components/nameplate';
-import { MarkingFields, SizeFields, StateFields } from './components/wheel-fields';
-import { inUnits, isWheelValues, newWheel, toRequest, valuesOf, wheelSchema } from './form';
-import type { WheelValues } from './form';
+import { WhereItMayRun } from './components/where-it-may-run';
+import { MarkingFields, SizeFields, SpeedFields, StateFields } from './components/wheel-fields';
+import { isWheelValues, newWheel, plateOf, valuesOf, wheelDataOf, type WheelValues } from './form';
+import { inUnits, toRequest } from './form';
 import { wheelParts } from './parts';
+import { wheelSchema } from './schema';
 import { useSaveWheel, wheelQueries } from './queries';
 
 interface WheelFormProps {
@@ -63,6 +65,7 @@ export function WheelForm({ wheel, backTo }: WheelFormProps) {
           <>
             <MarkingFields />
             <SizeFields />
+            <SpeedFields />
             <StateFields before={wheel?.data.state ?? null} />
           </>
         )}
@@ -76,26 +79,11 @@ function storedWheel(current: unknown, units: UnitSystem) {
   return success ? { values: valuesOf(data, units), version: data.version } : null;
 }
 
-/** The wheel's own label as it comes out of what is typed. */
+/** The wheel's own label as it comes out of what is typed, and where such a wheel may run. */
 function Plate({ values }: { values: WheelValues }) {
-  const { isMounted, mounted } = values;
-  const plate = {
-    marking: values.marking.trim() || null,
-    diameterNewMm: values.diameterNewMm.si,
-    widthMm: values.widthMm.si,
-    holeMm: values.holeMm.si,
-    markedRpm: values.markedRpm.si,
-    markedSpeedMPerS: values.markedSpeedMPerS.si,
-    markingReadOn: values.markingReadOn === 'unknown' ? null : values.markingReadOn,
-    mounted: isMounted
-      ? {
-          mandrelDiameterMm: mounted.mandrelDiameterMm.si ?? 0,
-          overhangMm: mounted.overhangMm.si ?? 0,
-          threaded: mounted.threaded,
-          makerMaximumRpm: mounted.makerMaximumRpm.si,
-        }
-      : null,
-  };
+  const { shop } = useShop();
+  const plate = plateOf(values);
+  const whole = wheelDataOf(values);
   const { diameterNewMm } = plate;
   return (
     <Stack>
@@ -109,6 +97,7 @@ function Plate({ values }: { values: WheelValues }) {
       {diameterNewMm === null ? null : (
         <FindingList findings={markingFindings({ ...plate, diameterNewMm }, true)} />
       )}
+      {whole === null ? null : <WhereItMayRun wheel={whole} today={shopDay(shop.timeZone)} />}
     </Stack>
   );
 }

@@ -1,15 +1,14 @@
-import { Link } from 'expo-router';
-import { useState } from 'react';
+import { useState, type ReactNode } from 'react';
 import { StyleSheet, View } from 'react-native';
 
-import { whenWords } from '@/features/records';
+import { LinkRow, whenWords } from '@/features/records';
 import { useShop } from '@/features/session';
 import { IconButton } from '@/features/ui/button';
 import { TextLink } from '@/features/ui/link';
 import { List } from '@/features/ui/list-row';
 import { Table, type Column } from '@/features/ui/table';
-import { Body, Small, Strong } from '@/features/ui/text';
-import { colors, space, stroke, target } from '@/features/ui/tokens';
+import { Body, Small } from '@/features/ui/text';
+import { space } from '@/features/ui/tokens';
 import { useLayout } from '@/features/ui/use-layout';
 import { VerdictBadge } from '@/features/ui/verdict';
 import type { SetupSummary } from '@/shared/contracts/setups';
@@ -48,7 +47,7 @@ export function SetupList({ setups }: SetupListProps) {
 }
 
 interface RowsProps extends SetupListProps {
-  menuOf: (setup: SetupSummary) => React.ReactNode;
+  menuOf: (setup: SetupSummary) => ReactNode;
 }
 
 const usePlace = () => {
@@ -93,46 +92,19 @@ function SetupRows({ setups, menuOf }: RowsProps) {
   return (
     <List label="Setups">
       {setups.map((setup) => (
-        <View key={setup.id} role="listitem" style={styles.item}>
-          <Link href={placeOf(setup.id)} asChild>
-            <View style={styles.face}>
-              <Strong>{setup.name}</Strong>
-              <View style={styles.facts}>
-                <VerdictBadge verdict={setup.verdict} count={setup.count} size="small" />
-                <Body>{OPERATION_WORDS[setup.operation]}</Body>
-                {setup.state === 'draft' ? null : <Body>{STATE_WORDS[setup.state]}</Body>}
-              </View>
-              <Small>
-                {`${whenWords(setup.updatedAt, shop.timeZone)}, ${setup.updatedByName}`}
-              </Small>
-            </View>
-          </Link>
-          {menuOf(setup)}
-        </View>
+        <LinkRow key={setup.id} label={setup.name} href={placeOf(setup.id)} beside={menuOf(setup)}>
+          <View style={styles.facts}>
+            <VerdictBadge verdict={setup.verdict} count={setup.count} size="small" />
+            <Body>{OPERATION_WORDS[setup.operation]}</Body>
+            {setup.state === 'draft' ? null : <Body>{STATE_WORDS[setup.state]}</Body>}
+          </View>
+          <Small>{`${whenWords(setup.updatedAt, shop.timeZone)}, ${setup.updatedByName}`}</Small>
+        </LinkRow>
       ))}
     </List>
   );
 }
 
 const styles = StyleSheet.create({
-  item: {
-    flexDirection: 'row',
-    alignItems: 'center',
-    gap: space[2],
-    paddingRight: space[1],
-    backgroundColor: colors.sheet,
-    borderBottomWidth: stroke.hairline,
-    borderBottomColor: colors.rule,
-  },
-  face: {
-    flexGrow: 1,
-    flexShrink: 1,
-    flexBasis: 0,
-    minWidth: 0,
-    minHeight: target.machine,
-    gap: space[1],
-    paddingVertical: space[3],
-    paddingLeft: space[4],
-  },
   facts: { flexDirection: 'row', flexWrap: 'wrap', alignItems: 'center', gap: space[3] },
 });

@@ -4,7 +4,6 @@ import { LoadProblem } from '@/features/records';
 import { useShop } from '@/features/session';
 import { List, ListRow } from '@/features/ui/list-row';
 import { Skeleton } from '@/features/ui/skeleton';
-import { Label } from '@/features/ui/text';
 
 import { shopQueries } from '../queries';
 import { ROLE_WORDS } from '../words';
@@ -21,7 +20,7 @@ export function Members() {
         <ListRow
           key={personId}
           label={personId === person.personId ? `${name} (you)` : name}
-          aside={<Label>{ROLE_WORDS[role]}</Label>}
+          detail={ROLE_WORDS[role]}
         />
       ))}
     </List>

@@ -5,7 +5,6 @@ import { useShop } from '@/features/session';
 import { Button } from '@/features/ui/button';
 import { List, ListRow } from '@/features/ui/list-row';
 import { Sheet } from '@/features/ui/sheet';
-import { Label } from '@/features/ui/text';
 
 import { ROLE_WORDS } from '../words';
 
@@ -25,7 +24,7 @@ export function ShopSwitch({ kind = 'secondary' }: { kind?: 'secondary' | 'onEna
               key={shopId}
               label={shopName}
               current={shopId === shop.id}
-              aside={<Label>{ROLE_WORDS[role]}</Label>}
+              detail={ROLE_WORDS[role]}
               onPress={() => {
                 setOpen(false);
                 router.replace({ pathname: '/shops/[shopId]', params: { shopId } });

@@ -49,7 +49,7 @@ export function Nameplate({ tag, wheel, speedUnit, units, typing = false }: Name
         <Readout
           label="New"
           size="small"
-          value={sizes.length === 0 ? null : sizeWords(sizes, units)}
+          value={sizes.length === 0 ? null : sizeWords(sizes, { units })}
         />
         <Readout label="Marked" size="small" value={markedWords(wheel, speedUnit)} />
         <Limit wheel={wheel} typing={typing} />

@@ -1,5 +1,3 @@
-import { View } from 'react-native';
-
 import { readDraft, draftKey } from '@/features/forms';
 import { FindingList } from '@/features/plan';
 import { Facts } from '@/features/records';
@@ -11,9 +9,10 @@ import type { Wheel } from '@/shared/contracts/wheels';
 
 import { isWheelValues, speedUnitOf, valuesOf } from '../form';
 import { wheelParts } from '../parts';
-import { wheelFindingsOn } from '../standing';
+import { standingOf, wheelFindingsOn } from '../standing';
 import { Nameplate } from './nameplate';
 import { SetAside } from './set-aside';
+import { WhereItMayRun } from './where-it-may-run';
 
 interface WheelDetailProps {
   wheel: Wheel;
@@ -51,9 +50,10 @@ export function WheelDetail({ wheel, today }: WheelDetailProps) {
           Changes to this wheel are kept on this device and not saved yet.
         </Notice>
       ) : null}
-      <View>
-        <FindingList findings={wheelFindingsOn(wheel.data, today)} sourced />
-      </View>
+      <FindingList findings={wheelFindingsOn(wheel.data, today)} sourced />
+      {standingOf(wheel.data, today).usable ? (
+        <WhereItMayRun wheel={wheel.data} today={today} />
+      ) : null}
       <Facts
         label={`Facts of ${wheel.tag}`}
         parts={wheelParts.filter(({ key }) => !shown.has(key))}

@@ -39,7 +39,7 @@ function MandrelQuantity({ name, required }: { name: MandrelField; required?: bo
   );
 }
 
-/** What is marked: the specification and the speeds, and where they were read. */
+/** Under which name it hangs, and what it is. */
 export function MarkingFields() {
   return (
     <Stack>
@@ -62,6 +62,14 @@ export function MarkingFields() {
           />
         </Cell>
       </Row>
+    </Stack>
+  );
+}
+
+/** The speeds that are marked, and where they were read. */
+export function SpeedFields() {
+  return (
+    <Stack>
       <Heading>Marked speed</Heading>
       <MarkedSpeed />
       <Row align="flex-start">

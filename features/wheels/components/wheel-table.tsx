@@ -1,10 +1,11 @@
 import { StyleSheet, View } from 'react-native';
 
+import { LinkRow } from '@/features/records';
 import { useShop } from '@/features/session';
 import { TextLink } from '@/features/ui/link';
-import { List, ListRow } from '@/features/ui/list-row';
+import { List } from '@/features/ui/list-row';
 import { Table, type Column } from '@/features/ui/table';
-import { Strong } from '@/features/ui/text';
+import { Small, Strong } from '@/features/ui/text';
 import { stroke, space, colors } from '@/features/ui/tokens';
 import type { Wheel } from '@/shared/contracts/wheels';
 import type { UnitSystem } from '@/shared/domain/people';
@@ -31,8 +32,8 @@ function limitWords({ data }: Wheel): string {
   });
 }
 
-const sizesNow = ({ data }: Wheel, units: UnitSystem) =>
-  sizeWords([data.diameterNowMm, data.widthMm], units);
+const sizesNow = ({ data }: Wheel, units: UnitSystem, withUnit = true) =>
+  sizeWords([data.diameterNowMm, data.widthMm], { units, withUnit });
 
 /** The rack on a phone. */
 export function WheelList({ wheels, today }: WheelRowsProps) {
@@ -40,16 +41,17 @@ export function WheelList({ wheels, today }: WheelRowsProps) {
   return (
     <List label="Wheels">
       {wheels.map((wheel) => (
-        <ListRow
+        <LinkRow
           key={wheel.id}
           label={[wheel.tag, wheel.data.marking].filter(Boolean).join(' · ')}
-          detail={`${sizesNow(wheel, units)}, limit ${limitWords(wheel)}\u00a0rpm`}
-          aside={<StandingWords {...standingOf(wheel.data, today)} />}
           href={{
             pathname: '/shops/[shopId]/wheels/[wheelId]',
             params: { shopId: shop.id, wheelId: wheel.id },
           }}
-        />
+        >
+          <Small>{`${sizesNow(wheel, units)}, limit ${limitWords(wheel)}\u00a0rpm`}</Small>
+          <StandingWords {...standingOf(wheel.data, today)} />
+        </LinkRow>
       ))}
     </List>
   );
@@ -78,20 +80,18 @@ export function WheelTable({ wheels, today, current }: WheelRowsProps & { curren
     {
       id: 'marking',
       label: 'Marking',
-      cell: ({ id, data }) =>
-        id === current ? (
-          <Strong>{data.marking ?? 'not legible'}</Strong>
-        ) : (
-          (data.marking ?? 'not legible')
-        ),
+      cell: ({ id, data }) => {
+        const words = (data.marking ?? 'not legible').replaceAll(' ', '\u00a0');
+        return id === current ? <Strong>{words}</Strong> : words;
+      },
     },
     {
       id: 'size',
-      label: `Size now, ${unitLabel('mm', units)}`,
+      label: `Size\u00a0now,\u00a0${unitLabel('mm', units)}`,
       numeric: true,
-      cell: (wheel) => sizesNow(wheel, units).replace(/\u00a0\D+$/, ''),
+      cell: (wheel) => sizesNow(wheel, units, false),
     },
-    { id: 'limit', label: 'Limit, rpm', numeric: true, cell: limitWords },
+    { id: 'limit', label: 'Limit,\u00a0rpm', numeric: true, cell: limitWords },
     {
       id: 'state',
       label: 'State',

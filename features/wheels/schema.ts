@@ -1,0 +1,66 @@
+import * as yup from 'yup';
+
+import { dateText, entryRules, type TypedEntry } from '@/features/records';
+import { TEXT_LIMITS } from '@/shared/domain/limits';
+import type { UnitSystem } from '@/shared/domain/people';
+import { formatQuantity } from '@/shared/units/format';
+
+import { MANDREL_FIELDS, WHEEL_FIELDS } from './fields';
+import type { WheelValues } from './form';
+import { speedRule } from './marked-speed';
+
+const notLarger = (units: UnitSystem) =>
+  yup.mixed<TypedEntry>().test('not larger', (now, { parent, createError }) => {
+    const fresh = (parent as WheelValues).diameterNewMm.si;
+    if (!now || now.si === null || fresh === null || now.si <= fresh) return true;
+    const limit = formatQuantity({ value: fresh, unit: 'mm' }, units, { rounding: 'down' });
+    return createError({ message: `Diameter now is at most ${limit}, the diameter when new.` });
+  });
+
+const holeFits = (units: UnitSystem) =>
+  yup.mixed<TypedEntry>().test('hole fits', (hole, { parent, createError }) => {
+    const { diameterNewMm, diameterNowMm, isMounted } = parent as WheelValues;
+    const outer = diameterNowMm.si ?? diameterNewMm.si;
+    if (!hole) return true;
+    if (hole.text.trim() === '' && !isMounted)
+      return createError({ message: 'Enter the hole; 0 where there is none.' });
+    if (hole.si === null || outer === null || hole.si < outer) return true;
+    const limit = formatQuantity({ value: outer, unit: 'mm' }, units, { rounding: 'down' });
+    return createError({ message: `Hole is smaller than the wheel, ${limit}.` });
+  });
+
+export function wheelSchema({ units, speedUnit, isMounted, state }: WheelValues) {
+  const rules = entryRules(WHEEL_FIELDS, units, ['diameterNewMm', 'widthMm']);
+  return yup.object({
+    tag: yup
+      .string()
+      .trim()
+      .required('Enter the tag: the name under which the wheel hangs on the rack.')
+      .max(TEXT_LIMITS.tag, `The tag has at most ${TEXT_LIMITS.tag} characters.`),
+    marking: yup
+      .string()
+      .trim()
+      .max(TEXT_LIMITS.marking, `The marking has at most ${TEXT_LIMITS.marking} characters.`),
+    ...rules,
+    diameterNowMm: rules.diameterNowMm.concat(notLarger(units)),
+    holeMm: rules.holeMm.concat(holeFits(units)),
+    markedSpeedMPerS: speedRule(speedUnit),
+    ...(isMounted
+      ? {
+          mounted: yup.object(
+            entryRules(MANDREL_FIELDS, units, ['mandrelDiameterMm', 'overhangMm']),
+          ),
+        }
+      : {}),
+    expiresOn: dateText('Expires on'),
+    ...(state === 'set aside'
+      ? {
+          setAsideReason: yup
+            .string()
+            .trim()
+            .required('Enter why the wheel is set aside.')
+            .max(TEXT_LIMITS.note, `The reason has at most ${TEXT_LIMITS.note} characters.`),
+        }
+      : {}),
+  });
+}
