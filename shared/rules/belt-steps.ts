@@ -49,15 +49,8 @@ export function planBeltSteps(
   return { rows, suggested: chosenId(suggested) };
 }
 
-/**
- * True and false where that is known; null while the wheel, and so its limit, is not.
- *
- * @param rpm - rpm held against the limits; null while unknown.
- * @param lowest - the lowest limit known.
- * @param wheelKnown - whether the wheel's own limits are among them.
- * @returns whether the rpm is within the limits.
- */
-export function isAllowed(
+/** True and false where that is known; null while the wheel, and so its limit, is not. */
+function isAllowed(
   rpm: number | null,
   lowest: SpeedLimit | undefined,
   wheelKnown: boolean,

@@ -37,10 +37,10 @@ export const MACHINE_FINDINGS = {
     remedy: 'Fit a guard that leaves at most half of the wheel open, and record it on the machine.',
     source: 'osha-1910-215-a1',
   },
-  'wheel-leaves-bore': {
+  'wheel-leaves-work': {
     part: 'machine',
     levels: ['stop'],
-    title: 'The overrun of {overrun} takes the {width} wheel out of the bore, with no shield.',
+    title: 'The overrun of {overrun} takes the {width} wheel out of the work, with no shield.',
     remedy: 'Shorten the overrun, or stand a fixed shield around the opening and sign for it.',
     source: 'wac-296-806-40506',
   },
@@ -123,12 +123,5 @@ export const MACHINE_FINDINGS = {
     title: 'At the end of the stroke only {gap} is left between the grinder and the work.',
     remedy: 'Set a carriage stop, and try one full stroke by hand with the power off.',
     source: 'practice-clearance',
-  },
-  'bending-speed-near': {
-    part: 'machine',
-    levels: ['note'],
-    title: 'The quill itself sets the limit: it would begin to whirl near {critical}.',
-    remedy: 'A shorter or thicker quill allows more.',
-    source: 'memory-quill-share',
   },
 } as const satisfies FindingCatalogue;

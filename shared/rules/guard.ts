@@ -27,12 +27,11 @@ export function guardFindings(spec: {
   if (operation === 'outside')
     return grinder !== null && grinder.guard === 'none' ? [finding('guard-missing')] : [];
   if (shieldFitted) return [];
-  if (operation === 'jaws') return [finding('jaws-open')];
-  return overrunMm !== null && widthMm !== null && overrunMm >= widthMm
-    ? [
-        finding('wheel-leaves-bore', {
-          figures: { overrun: quantity(overrunMm, 'mm'), width: quantity(widthMm, 'mm') },
-        }),
-      ]
-    : [];
+  if (overrunMm !== null && widthMm !== null && overrunMm >= widthMm)
+    return [
+      finding('wheel-leaves-work', {
+        figures: { overrun: quantity(overrunMm, 'mm'), width: quantity(widthMm, 'mm') },
+      }),
+    ];
+  return operation === 'jaws' ? [finding('jaws-open')] : [];
 }

@@ -16,16 +16,16 @@ import { jawPlanOf, stockOf } from './stock';
 import { surfaceOf } from './surface';
 import { planTime } from './time';
 import type { Plan } from './types';
-import { verdictOf } from './verdict';
+import { byGravity, verdictOf } from './verdict';
 import { RULES_VERSION } from './version';
 import { markingOf } from './bond';
 import { planWorkSpeed, workSpeedFindings } from './work-speed';
 import { isSteel } from './work-table';
 
-export { assemblePlanInput, emptySetupInputs, typedWheelData, type Found } from './assemble';
-export { CAUTIONS, type CautionId } from './cautions';
+export { assemblePlanInput, emptySetupInputs, typedWheelData } from './assemble';
+export { CAUTIONS } from './cautions';
 export { FINDINGS, findingWords, type FindingCode } from './findings';
-export { orderOfWork, type WorkStep } from './order-of-work';
+export { orderOfWork } from './order-of-work';
 export { quickCheck, type QuickCheck, type QuickCheckInput } from './quick-check';
 export type * from './types';
 export type { PlanInput } from '../domain/setups';
@@ -117,7 +117,7 @@ export function planSetup(given: PlanInput): Plan {
     quill,
     workRotation: input.machine.workRotation,
   };
-  const findings = [
+  const findings = byGravity([
     ...speed.findings,
     ...inputFindings(input, {
       surface,
@@ -129,7 +129,7 @@ export function planSetup(given: PlanInput): Plan {
     ...power.findings,
     ...bent.findings,
     ...dressing.findings,
-  ];
+  ]);
   const needs = needsOf(input);
   return {
     rulesVersion: RULES_VERSION,

@@ -1,4 +1,6 @@
 import type { Operation, PlanInput } from '../domain/setups';
+import { leastFlange, takesFlanges } from './mounting';
+import { surfaceOf } from './surface';
 import type { DressStage, Figure, PassStage, Plan, Quantity } from './types';
 
 /** One step of the work, its `{figures}` to be set into its words. */
@@ -9,7 +11,7 @@ export interface WorkStep {
   figures: Record<string, Quantity>;
 }
 
-type Words = Record<Operation, string> | string;
+type Words = string | ((input: PlanInput) => string);
 
 interface Step {
   id: string;
@@ -34,18 +36,29 @@ const SURVEY: Record<Operation, string> = {
 };
 
 const STEPS: readonly Step[] = [
-  { id: 'survey', title: 'Survey', words: SURVEY, figures: ({ stock }) => ({ stock }) },
+  {
+    id: 'survey',
+    title: 'Survey',
+    words: ({ operation }) => SURVEY[operation],
+    figures: ({ stock }) => ({ stock }),
+  },
   {
     id: 'holding',
     title: 'Hold',
-    words: HOLDING,
+    words: ({ operation }) => HOLDING[operation],
     figures: (_, { work }) => ({ bore: work.jawBoreMm }),
   },
   {
     id: 'wheel',
     title: 'Wheel',
-    words: 'Machine isolated: look at the wheel, ring it, mount it, and set the belt to {rpm}.',
-    figures: ({ speed }) => ({ rpm: speed.spindleRpm }),
+    words: (input) =>
+      flanged(input)
+        ? 'Machine isolated: look at the wheel and ring it, mount it between flanges of {flange} or more with new blotters, and set the belt to {rpm}.'
+        : 'Machine isolated: look at the wheel and ring it, mount it, and set the belt to {rpm}.',
+    figures: ({ speed }, { wheelData }) => ({
+      rpm: speed.spindleRpm,
+      flange: leastFlange(wheelData?.diameterNewMm ?? null),
+    }),
   },
   {
     id: 'clearance',
@@ -143,7 +156,7 @@ export function orderOfWork(plan: Plan, input: PlanInput): WorkStep[] {
   return STEPS.map(({ id, title, words, figures }) => ({
     id,
     title,
-    words: typeof words === 'string' ? words : words[input.operation],
+    words: typeof words === 'string' ? words : words(input),
     figures: quantities(figures(plan, input)),
   }));
 }
@@ -177,4 +190,8 @@ function dressFigures(stage: DressStage | undefined): ReturnType<Step['figures']
   return stage === undefined
     ? {}
     : { passes: stage.passes, depth: stage.depth, seconds: stage.secondsAcross };
+}
+
+function flanged(input: PlanInput): boolean {
+  return input.wheelData !== null && takesFlanges(input.wheelData, surfaceOf(input).side);
 }

@@ -2,13 +2,7 @@ import type { GrinderData, LatheData, QuillData, Rotation, ThreadHand } from '..
 import { finding } from './findings';
 import type { Finding, Plan } from './types';
 
-/**
- * The other way round.
- *
- * @param rotation - a direction of turning.
- * @returns the other direction.
- */
-export function opposite(rotation: Rotation): Rotation {
+function opposite(rotation: Rotation): Rotation {
   return rotation === 'clockwise' ? 'anticlockwise' : 'clockwise';
 }
 

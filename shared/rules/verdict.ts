@@ -15,3 +15,15 @@ export function verdictOf(findings: readonly Finding[], needs: readonly Need[]):
   if (needs.length > 0) return 'incomplete';
   return findings.some(({ level }) => level === 'check') ? 'check' : 'clear';
 }
+
+const GRAVITY: readonly Finding['level'][] = ['stop', 'check', 'note'];
+
+/**
+ * Findings with the gravest first, and otherwise in the order in which they were found.
+ *
+ * @param findings - in any order.
+ * @returns a new list.
+ */
+export function byGravity(findings: readonly Finding[]): Finding[] {
+  return GRAVITY.flatMap((level) => findings.filter((finding) => finding.level === level));
+}

@@ -66,14 +66,8 @@ export function nearestStep(stepsRpm: readonly number[], wantedRpm: number | nul
   return best;
 }
 
-/**
- * Work speed of a turning surface, m/min, from its diameter in mm and rpm.
- *
- * @param diameterMm - diameter of the ground surface, mm.
- * @param rpm - lathe speed, rpm.
- * @returns m/min.
- */
-export function workSpeed(diameterMm: number | null, rpm: number | null): Figure {
+/** Work speed of a turning surface, m/min, from its diameter in mm and rpm. */
+function workSpeed(diameterMm: number | null, rpm: number | null): Figure {
   return figure({
     unit: 'm/min',
     formula: '{v_w} = π {d} {n_w} / 1000',
@@ -86,14 +80,8 @@ export function workSpeed(diameterMm: number | null, rpm: number | null): Figure
   });
 }
 
-/**
- * How many times as fast as the work the wheel runs.
- *
- * @param wheelMPerS - wheel speed, m/s.
- * @param workMPerMin - work speed, m/min.
- * @returns the ratio.
- */
-export function speedRatio(wheelMPerS: number | null, workMPerMin: number | null): Figure {
+/** How many times as fast as the work the wheel runs. */
+function speedRatio(wheelMPerS: number | null, workMPerMin: number | null): Figure {
   return figure({
     unit: '1',
     formula: '{q} = 60 {v_s} / {v_w}',

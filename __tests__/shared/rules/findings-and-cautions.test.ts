@@ -2,7 +2,7 @@ import { CAUTION_SUBJECTS } from '@/shared/rules/caution';
 import { CAUTIONS, cautionsFor } from '@/shared/rules/cautions';
 import { FINDINGS, finding, findingWords } from '@/shared/rules/findings';
 import { SOURCES } from '@/shared/rules/sources';
-import { verdictOf } from '@/shared/rules/verdict';
+import { byGravity, verdictOf } from '@/shared/rules/verdict';
 
 import { jawsInput, SMALL_WHEEL } from '../../support/plan-inputs';
 
@@ -46,6 +46,10 @@ describe('the verdict', () => {
     expect(verdictOf([note, check], [need])).toBe('incomplete');
     expect(verdictOf([note, check], [])).toBe('check');
     expect(verdictOf([], [])).toBe('clear');
+  });
+
+  it('finds the gravest first', () => {
+    expect(byGravity([note, check, stop, note])).toEqual([stop, check, note, note]);
   });
 
   it('is not coloured by notes', () => {

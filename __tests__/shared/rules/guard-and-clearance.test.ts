@@ -22,13 +22,14 @@ describe('the guard', () => {
 
   it('is the bore itself, as long as the wheel does not leave it', () => {
     expect(guard({ overrunMm: 11.99 })).toEqual([]);
-    expect(guard({ overrunMm: 12 })).toEqual(['stop wheel-leaves-bore']);
+    expect(guard({ overrunMm: 12 })).toEqual(['stop wheel-leaves-work']);
     expect(guard({ overrunMm: 12, shieldFitted: true })).toEqual([]);
   });
 
   it('is missing between jaws until a shield stands', () => {
     expect(guard({ operation: 'jaws' })).toEqual(['check jaws-open']);
     expect(guard({ operation: 'jaws', shieldFitted: true })).toEqual([]);
+    expect(guard({ operation: 'jaws', overrunMm: 12 })).toEqual(['stop wheel-leaves-work']);
   });
 });
 
