@@ -88,7 +88,7 @@ async function jest(launcher, { projects, patterns = [], env }) {
   const { ended } = launcher.start(
     [...program, '--selectProjects', ...projects, ...output, '--', ...patterns],
     // Reports go to stderr while the JSON is written; both belong to one stream of words here.
-    { env, stdio: ['ignore', 'ignore', 1] },
+    { env, stdio: ['ignore', 1, 1] },
   );
   const code = await ended;
   if (!fs.existsSync(report)) return { passed: 0, failed: 1 };
