@@ -16,6 +16,9 @@ const FLAGS = [
   '--disable-sync',
 ];
 
+/** Long enough for a busy machine, short enough to name the step that failed. */
+const ACTION_WITHIN_MS = 15_000;
+
 /** The two sizes that every screen is looked at in. */
 export const SIZES = {
   phone: { width: 390, height: 844 },
@@ -58,6 +61,7 @@ export async function openVisitor(browser: Browser, size: Size) {
     isMobile: phone,
     hasTouch: phone,
   });
+  context.setDefaultTimeout(ACTION_WITHIN_MS);
   const complaints: string[] = [];
   context.on('console', (message) => {
     if (['error', 'warning'].includes(message.type())) complaints.push(message.text());

@@ -1,0 +1,84 @@
+import type { Browser } from 'playwright-core';
+
+import { inspect, launchBrowser, openVisitor, served, type Size } from '../support/browser';
+import { signIn, type Role } from './planner-page';
+
+jest.setTimeout(300_000);
+
+let browser: Browser;
+beforeAll(async () => {
+  browser = await launchBrowser();
+});
+afterAll(() => browser.close());
+
+const SIZES: Size[] = ['phone', 'wide'];
+const ROLES: Role[] = ['lead', 'machinist', 'apprentice'];
+
+/** Below the shop's address. */
+const SCREENS: Record<string, string> = {
+  bench: '',
+  setups: '/setups',
+  rack: '/wheels',
+  board: '/board',
+  shop: '/shop',
+  machines: '/machines',
+};
+
+const FORMS: Record<string, string> = {
+  'new-wheel': '/wheels/new',
+  'new-lathe': '/machines/lathes/new',
+  'new-grinder': '/machines/grinders/new',
+};
+
+describe.each(SIZES)('on a %s screen', (size) => {
+  it.each(['/', '/sign-in', '/sign-up', '/nowhere'])('%s is clean to a visitor', async (path) => {
+    const { context, page, complaints } = await openVisitor(browser, size);
+    await page.goto(path);
+    await page.getByRole('heading').first().waitFor();
+    const name = path === '/' ? 'home' : path.slice(1);
+    expect(await inspect(page, `${name}-${size}`)).toEqual([]);
+    expect(complaints).toEqual([]);
+    await context.close();
+  });
+
+  it.each(ROLES)('every screen is clean to the %s, and fits 320 px', async (role) => {
+    const { context, page, complaints } = await openVisitor(browser, size);
+    await page.goto('/sign-in');
+    await signIn(page, role);
+    await page.waitForURL(/\/shops\//);
+    const shop = new URL(page.url()).pathname;
+    const setups = await page.evaluate(
+      async (path) => (await (await fetch(`/api${path}/setups`)).json()).items,
+      shop,
+    );
+    const screens = {
+      ...SCREENS,
+      ...(role === 'apprentice' ? {} : FORMS),
+      ...Object.fromEntries(
+        setups.map(({ id, operation }: { id: string; operation: string }) => [
+          `setup-${operation}`,
+          `/setups/${id}`,
+        ]),
+      ),
+    };
+    for (const [name, path] of Object.entries(screens)) {
+      await page.goto(`${served().baseUrl}${shop}${path}`);
+      await page.getByRole('heading').first().waitFor();
+      await page.waitForLoadState('networkidle');
+      expect({ name, found: await inspect(page, `${name}-${role}-${size}`) }).toEqual({
+        name,
+        found: [],
+      });
+      if (size === 'phone') {
+        await page.setViewportSize({ width: 320, height: 700 });
+        const sideways = await page.evaluate(
+          () => document.documentElement.scrollWidth > window.innerWidth,
+        );
+        expect({ name, sideways }).toEqual({ name, sideways: false });
+        await page.setViewportSize({ width: 390, height: 844 });
+      }
+    }
+    expect(complaints).toEqual([]);
+    await context.close();
+  });
+});
