@@ -15,6 +15,7 @@ import { grindersRepository } from './grinders/grinders-repository';
 import { grindersRoutes } from './grinders/grinders-routes';
 import { grindersService } from './grinders/grinders-service';
 import { healthRoutes } from './http/health';
+import { loggableError } from './http/loggable-error';
 import { LIMIT_POINTS, rateLimits, type LimitPoints } from './http/rate-limits';
 import { lathesRepository } from './lathes/lathes-repository';
 import { lathesRoutes } from './lathes/lathes-routes';
@@ -103,7 +104,8 @@ export function composeServer(options: ServerOptions) {
   const store = new SessionStore({
     pool: database.pool,
     tableName: 'sessions',
-    errorLog: (...details: unknown[]) => logger.error({ details }, 'session store'),
+    errorLog: (...details: unknown[]) =>
+      logger.error({ details: details.map(loggableError) }, 'session store'),
   });
   const signedIn = sessions({
     store,

@@ -1,7 +1,7 @@
 import { Refusal } from './refusals';
 
 /** The last row's sort key as the client carries it back. */
-export const cursorOf = (...key: string[]): string =>
+const cursorOf = (...key: string[]): string =>
   Buffer.from(JSON.stringify(key)).toString('base64url');
 
 /**

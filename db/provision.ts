@@ -16,16 +16,6 @@ const ROLE_NAMES: readonly RoleName[] = ['owner', 'app', 'backup'];
 export type Passwords = Readonly<Record<RoleName, string>>;
 export type DatabaseUrls = Readonly<Record<RoleName, string>>;
 
-async function withAdmin<T>(adminUrl: string, work: (client: Client) => Promise<T>): Promise<T> {
-  const client = new Client({ connectionString: adminUrl });
-  await client.connect();
-  try {
-    return await work(client);
-  } finally {
-    await client.end();
-  }
-}
-
 /** Creates the three roles where they are missing, and sets their passwords and attributes. */
 async function createRoles(client: Client, passwords: Passwords): Promise<void> {
   await client.query("set password_encryption = 'scram-sha-256'");
@@ -42,7 +32,7 @@ async function createRoles(client: Client, passwords: Passwords): Promise<void> 
   await client.query(`alter role ${ROLES.backup.role} set default_transaction_read_only = on`);
 }
 
-/** Lets in only the three roles; not copied from a template, so each database needs it. */
+/** Lets in only the three roles. */
 async function closeToOthers(client: Client, database: string): Promise<void> {
   const name = client.escapeIdentifier(database);
   await client.query(`revoke all on database ${name} from public`);
@@ -62,10 +52,14 @@ export async function provision(
   database: string,
   passwords: Passwords,
 ): Promise<DatabaseUrls> {
-  await withAdmin(adminUrl, async (client) => {
+  const client = new Client({ connectionString: adminUrl });
+  await client.connect();
+  try {
     await createRoles(client, passwords);
     await createDatabase(client, database);
-  });
+  } finally {
+    await client.end();
+  }
   return urlsFor(adminUrl, database, passwords);
 }
 
@@ -80,27 +74,8 @@ async function createDatabase(client: Client, database: string): Promise<void> {
   await closeToOthers(client, database);
 }
 
-/** A copy of a migrated database nobody is connected to: how each test file gets its own. */
-export async function cloneDatabase(
-  adminUrl: string,
-  template: string,
-  database: string,
-): Promise<void> {
-  await withAdmin(adminUrl, async (client) => {
-    const [from, to] = [template, database].map((name) => client.escapeIdentifier(name));
-    await client.query(`create database ${to} owner ${ROLES.owner.role} template ${from}`);
-    await closeToOthers(client, database);
-  });
-}
-
-export async function dropDatabase(adminUrl: string, database: string): Promise<void> {
-  await withAdmin(adminUrl, async (client) => {
-    await client.query(`drop database if exists ${client.escapeIdentifier(database)} with (force)`);
-  });
-}
-
 /** The address of a database in the admin's cluster, for each of the three roles. */
-export function urlsFor(adminUrl: string, database: string, passwords: Passwords): DatabaseUrls {
+function urlsFor(adminUrl: string, database: string, passwords: Passwords): DatabaseUrls {
   const urlOf = (name: RoleName) => {
     const url = new URL(adminUrl);
     url.username = ROLES[name].role;

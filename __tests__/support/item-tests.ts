@@ -77,6 +77,16 @@ export function describeItem<B extends { id: string }>(kind: ItemKind<B>): void 
       ]);
     });
 
+    it('makes one row of the same request sent many times at once', async () => {
+      const request = body();
+      const answers = await Promise.all(
+        Array.from({ length: 6 }, () => shop.as.lead.post(all()).send(request)),
+      );
+      expect(answers.map(({ status }) => status).sort()).toEqual([200, 200, 200, 200, 200, 201]);
+      expect(new Set(answers.map((answer) => JSON.stringify(answer.body))).size).toBe(1);
+      expect(await auditOf(api, request.id)).toHaveLength(1);
+    });
+
     it('refuses the same id with another body', async () => {
       const { request } = await made();
       const response = await shop.as.lead.post(all()).send(edited(request)).expect(409);

@@ -3,6 +3,7 @@ import type { ErrorRequestHandler, RequestHandler } from 'express';
 import type { ProblemCode } from '@/shared/contracts/problem';
 
 import { Refusal } from '../refusals';
+import { loggableError } from './loggable-error';
 import { sendProblem } from './problem';
 
 /** What the body parser's errors are called, and what they are here. */
@@ -38,7 +39,7 @@ export const errorHandler: ErrorRequestHandler = (error: unknown, req, res, next
     sendProblem(res, code);
     return;
   }
-  req.log.error({ err: error }, 'request failed');
+  req.log.error({ err: loggableError(error) }, 'request failed');
   if (isPassing(error)) {
     res.set('Retry-After', '2');
     sendProblem(res, 'unavailable', { detail: 'The database does not answer. Try again.' });

@@ -1,4 +1,5 @@
 import { Refusal } from '../refusals';
+import { loggableError } from './loggable-error';
 import { ok, openRoute, type Route } from './route';
 
 interface Health {
@@ -16,7 +17,7 @@ export const healthRoutes = ({ checkDatabase, isStopping }: Health): Route[] => 
     act: async (_input, req) => {
       if (isStopping()) throw new Refusal('unavailable', { detail: 'The server is stopping.' });
       await checkDatabase().catch((error: unknown) => {
-        req.log.error({ err: error }, 'not ready');
+        req.log.error({ err: loggableError(error) }, 'not ready');
         throw new Refusal('unavailable', { detail: 'The database does not answer.' });
       });
       return ok({ status: 'ready' });

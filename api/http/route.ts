@@ -34,7 +34,7 @@ interface Answer {
 }
 
 export const ok = (body: unknown): Answer => ({ status: 200, body });
-export const created = (body: unknown): Answer => ({ status: 201, body });
+const created = (body: unknown): Answer => ({ status: 201, body });
 export const nothing: Answer = { status: 204 };
 
 /** 201 for the request that made it, 200 when the same request comes again. */
