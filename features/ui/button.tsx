@@ -1,12 +1,12 @@
 import { Pressable, StyleSheet, Text, View } from 'react-native';
 import type { Role } from 'react-native';
 
+import { buttonStyles, PAINTS } from './button-paint';
+import type { ButtonKind } from './button-paint';
 import { Icon } from './icon';
 import type { IconName } from './icon-paths';
-import { colors, radius, space, stroke, target, type } from './tokens';
+import { colors, radius, stroke, target, type } from './tokens';
 import type { ColorRole } from './tokens';
-
-export type ButtonKind = 'primary' | 'secondary' | 'quiet' | 'danger' | 'dangerFilled' | 'onEnamel';
 
 export interface ButtonProps {
   /** What it does, in words; also what is spoken. */
@@ -31,42 +31,6 @@ export interface ButtonProps {
   id?: string;
   role?: Extract<Role, 'button' | 'link' | 'tab' | 'switch' | 'menuitem'>;
 }
-
-interface Paint {
-  ground: string;
-  pressed: string;
-  text: ColorRole;
-  edge: string;
-}
-
-const PAINTS: Record<ButtonKind, Paint> = {
-  primary: {
-    ground: colors.accent,
-    pressed: colors.accentPressed,
-    text: 'onAccent',
-    edge: colors.accentEdge,
-  },
-  secondary: {
-    ground: 'transparent',
-    pressed: colors.hover,
-    text: 'action',
-    edge: colors.action,
-  },
-  quiet: { ground: 'transparent', pressed: colors.hover, text: 'action', edge: 'transparent' },
-  danger: { ground: 'transparent', pressed: colors.stopTint, text: 'stop', edge: colors.stop },
-  dangerFilled: {
-    ground: colors.stop,
-    pressed: colors.stopPressed,
-    text: 'onStop',
-    edge: colors.stop,
-  },
-  onEnamel: {
-    ground: 'transparent',
-    pressed: colors.headerWell,
-    text: 'onEnamel',
-    edge: colors.onEnamelSoft,
-  },
-};
 
 /** A button: at least 48 px high, pressed state, focus ring, busy state. */
 export function Button({
@@ -96,9 +60,9 @@ export function Button({
       disabled={disabled}
       onPress={busy ? undefined : onPress}
       style={({ pressed, hovered }: { pressed: boolean; hovered?: boolean }) => [
-        styles.button,
-        size === 'machine' && styles.machine,
-        wide && styles.wide,
+        buttonStyles.button,
+        size === 'machine' && buttonStyles.machine,
+        wide && buttonStyles.wide,
         {
           backgroundColor: pressed || hovered ? paint.pressed : paint.ground,
           borderColor: paint.edge,
@@ -110,7 +74,7 @@ export function Button({
       <Text
         style={[
           size === 'machine' ? type.buttonLarge : type.button,
-          styles.text,
+          buttonStyles.text,
           { color: colors[paint.text] },
         ]}
       >
@@ -146,21 +110,6 @@ export function IconButton({ label, icon, onPress, color = 'text', disabled }: I
 }
 
 const styles = StyleSheet.create({
-  button: {
-    minHeight: target.base,
-    minWidth: target.base,
-    paddingHorizontal: space[4],
-    paddingVertical: space[2],
-    borderRadius: radius.control,
-    borderWidth: stroke.control,
-    flexDirection: 'row',
-    alignItems: 'center',
-    justifyContent: 'center',
-    gap: space[2],
-  },
-  machine: { minHeight: target.machine, paddingHorizontal: space[6] },
-  wide: { alignSelf: 'stretch' },
-  text: { textAlign: 'center', flexShrink: 1 },
   off: { opacity: 0.55 },
   busy: { width: 10, height: 10, borderRadius: 5, borderWidth: stroke.heavy },
   icon: {

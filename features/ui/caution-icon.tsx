@@ -12,7 +12,7 @@ interface CautionIconProps {
 /** The sign of a caution: a white drawing on the blue disc of what must be done. Words stand beside it. */
 export function CautionIcon({ subject, size = 56 }: CautionIconProps) {
   return (
-    <Svg width={size} height={size} viewBox="0 0 48 48" aria-hidden>
+    <Svg width={size} height={size} viewBox="0 0 48 48" aria-hidden style={{ flexShrink: 0 }}>
       <Circle cx={24} cy={24} r={24} fill={colors.must} />
       <Path
         d={cautionPaths[subject]}

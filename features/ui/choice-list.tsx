@@ -6,7 +6,7 @@ import { useRadioGroup } from './use-radio-group';
 import { web } from './web';
 
 /** The ring of a radio, with its disc when chosen. Decoration: the row carries the role. */
-export function RadioMark({ chosen, locked = false }: { chosen: boolean; locked?: boolean }) {
+function RadioMark({ chosen, locked = false }: { chosen: boolean; locked?: boolean }) {
   return (
     <View style={[styles.ring, locked && styles.ringLocked]}>
       {chosen ? <View style={[styles.disc, locked && styles.discLocked]} /> : null}

@@ -4,7 +4,7 @@ import { Pressable, StyleSheet, View } from 'react-native';
 
 import { Icon } from './icon';
 import { Body, Label } from './text';
-import { colors, space, stroke, target } from './tokens';
+import { colors, space, stroke } from './tokens';
 import { web } from './web';
 
 interface FoldProps {
@@ -39,12 +39,14 @@ export function Fold({ label, value, children, startOpen = false, open, onToggle
         style={({ pressed }) => [styles.title, pressed && styles.pressed]}
         {...web({ 'aria-controls': shown ? bodyId : undefined })}
       >
-        <Label>{label}</Label>
-        <View style={styles.value}>
+        <View style={styles.words}>
+          <Label>{label}</Label>
           {value ? (
-            <Body tone="textSoft" align="right">
-              {value}
-            </Body>
+            <View style={styles.value}>
+              <Body tone="textSoft" align="right">
+                {value}
+              </Body>
+            </View>
           ) : null}
         </View>
         <Icon name={shown ? 'up' : 'down'} size={20} color="textSoft" />
@@ -73,7 +75,18 @@ const styles = StyleSheet.create({
     paddingVertical: space[2],
   },
   pressed: { backgroundColor: colors.hover },
-  value: { flexGrow: 1, flexShrink: 1, flexBasis: 0, minWidth: target.base },
+  // The value stands at the right, or under the label where there is no room beside it.
+  words: {
+    flexDirection: 'row',
+    flexWrap: 'wrap',
+    alignItems: 'baseline',
+    columnGap: space[3],
+    flexGrow: 1,
+    flexShrink: 1,
+    flexBasis: 0,
+    minWidth: 0,
+  },
+  value: { flexGrow: 1, flexShrink: 1, minWidth: 0 },
   body: {
     paddingHorizontal: space[4],
     paddingTop: space[1],

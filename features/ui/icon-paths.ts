@@ -3,7 +3,7 @@ export const icons = {
   // Places
   bench: 'M3 9h18M5 9v11M19 9v11M5 15h14M8 9V5h8v4',
   setups: 'M4 4h11l5 5v11H4zM15 4v5h5M8 13h8M8 16.5h5',
-  rack: 'M3 20h18M3 4v16M21 4v16M11 12a3.5 3.5 0 1 1-7 0M7.5 7.5v1M20 12a3.5 3.5 0 1 1-7 0M12 4v0M3 12h18',
+  rack: 'M3 4h18M7.5 4v3.2M16.5 4v3.2M11.5 11.2a4 4 0 1 1-8 0 4 4 0 0 1 8 0zM20.5 11.2a4 4 0 1 1-8 0 4 4 0 0 1 8 0zM7.5 11.2v.1M16.5 11.2v.1M3 20h18',
   board: 'M4 4h16v13H4zM8 17l-2 4M16 17l2 4M12 7.5v4.5M12 14v.2',
   shop: 'M3 20V10l6 3.5V10l6 3.5V6h3l1-2h2v16zM7 20v-3h3v3',
   // Movement

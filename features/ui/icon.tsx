@@ -15,7 +15,7 @@ interface IconProps {
 /** A drawn sign, one weight. Always beside a word or inside a control that has a label. */
 export function Icon({ name, size = 24, color = 'text' }: IconProps) {
   return (
-    <Svg width={size} height={size} viewBox="0 0 24 24" aria-hidden>
+    <Svg width={size} height={size} viewBox="0 0 24 24" aria-hidden style={WHOLE}>
       <Path
         d={icons[name]}
         fill="none"
@@ -28,12 +28,15 @@ export function Icon({ name, size = 24, color = 'text' }: IconProps) {
   );
 }
 
+// Beside long words a drawing keeps its size.
+const WHOLE = { flexShrink: 0 } as const;
+
 export type VerdictShape = 'incomplete' | 'clear' | 'check' | 'stop';
 
 /** The shape that stands beside a verdict's word: ring, disc, triangle, octagon. */
 export function VerdictIcon({ verdict, size = 24 }: { verdict: VerdictShape; size?: number }) {
   return (
-    <Svg width={size} height={size} viewBox="0 0 24 24" aria-hidden>
+    <Svg width={size} height={size} viewBox="0 0 24 24" aria-hidden style={WHOLE}>
       {verdict === 'incomplete' ? (
         <Circle cx={12} cy={12} r={9} fill="none" stroke={colors.outline} strokeWidth={2.5} />
       ) : null}

@@ -56,12 +56,14 @@ export function Screen({
       <View role="banner" style={styles.header}>
         <View style={styles.headerRow}>
           {backTo === undefined ? null : (
-            <IconButton
-              label="Back"
-              icon="back"
-              color="onEnamel"
-              onPress={() => router.dismissTo(backTo)}
-            />
+            <View style={styles.back}>
+              <IconButton
+                label="Back"
+                icon="back"
+                color="onEnamel"
+                onPress={() => router.dismissTo(backTo)}
+              />
+            </View>
           )}
           <View style={styles.titles}>
             {over ? <Small tone="onEnamelSoft">{over}</Small> : null}
@@ -104,6 +106,8 @@ const styles = StyleSheet.create({
     paddingHorizontal: space[4],
   },
   under: { paddingHorizontal: space[4] },
+  // The sign lines up with the text below, not its target.
+  back: { marginLeft: -space[3] },
   titles: { flexGrow: 1, flexShrink: 1, flexBasis: 0, minWidth: 0 },
   panes: { flex: 1, flexDirection: 'row' },
   first: {

@@ -3,6 +3,7 @@ import { Pressable, StyleSheet, Text, View } from 'react-native';
 import { FieldFrame } from './field-frame';
 import { describedBy, useFieldIds } from './field-ids';
 import { colors, radius, space, stroke, target, type } from './tokens';
+import { useLayout } from './use-layout';
 import { useRadioGroup } from './use-radio-group';
 import { web } from './web';
 
@@ -30,13 +31,14 @@ export function Segmented<Value extends string>({
 }: SegmentedProps<Value>) {
   const ids = useFieldIds(name);
   const radioProps = useRadioGroup(options, value, onChange);
+  const stacked = useLayout().textScale >= LARGE_TEXT;
   return (
     <FieldFrame ids={ids} label={label} hint={hint} error={error} labelsInput={false}>
       <View
         id={ids.input}
         role="radiogroup"
         aria-labelledby={ids.label}
-        style={[styles.group, error ? styles.wrong : null]}
+        style={[styles.group, stacked && styles.stacked, error ? styles.wrong : null]}
         {...web({ tabIndex: -1, 'aria-describedby': describedBy(ids, hint, error) })}
       >
         {options.map((option, index) => {
@@ -47,7 +49,8 @@ export function Segmented<Value extends string>({
               {...radioProps(index)}
               style={({ pressed }) => [
                 styles.segment,
-                index > 0 && styles.divided,
+                index === 0 ? styles.first : styles.divided,
+                index === options.length - 1 && styles.last,
                 pressed && styles.pressed,
                 chosen && styles.chosen,
               ]}
@@ -69,6 +72,10 @@ export function Segmented<Value extends string>({
   );
 }
 
+/** From here on words side by side would break in the middle. */
+const LARGE_TEXT = 1.5;
+const INNER = radius.control - stroke.control;
+
 const styles = StyleSheet.create({
   group: {
     flexDirection: 'row',
@@ -77,6 +84,7 @@ const styles = StyleSheet.create({
     borderRadius: radius.control,
     backgroundColor: colors.page,
   },
+  stacked: { flexDirection: 'column' },
   wrong: { borderColor: colors.stop },
   segment: {
     flexGrow: 1,
@@ -86,8 +94,9 @@ const styles = StyleSheet.create({
     justifyContent: 'center',
     paddingHorizontal: space[2],
     paddingVertical: space[1],
-    borderRadius: radius.control - 2,
   },
+  first: { borderTopLeftRadius: INNER, borderBottomLeftRadius: INNER },
+  last: { borderTopRightRadius: INNER, borderBottomRightRadius: INNER },
   divided: { borderLeftWidth: stroke.hairline, borderLeftColor: colors.action },
   pressed: { backgroundColor: colors.hover },
   chosen: { backgroundColor: colors.chosen },

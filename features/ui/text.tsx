@@ -114,9 +114,7 @@ export const Label = textOf(type.label, 'text');
 export const Small = textOf(type.small, 'textSoft');
 /** Engraved capitals over a group of rows; not a heading. */
 export const Engraved = textOf(type.engraved, 'textSoft');
-/** Condensed numerals of the four sizes; Readout sets label and unit with them. */
+/** A condensed name or numeral in a row: a belt step. */
 export const NumeralSmall = textOf(type.readoutSmall, 'text');
-export const Numeral = textOf(type.readout, 'text');
-export const NumeralLarge = textOf(type.readoutLarge, 'text');
 /** At the running machine: 64 px. */
 export const NumeralHuge = textOf(type.numeral, 'text');

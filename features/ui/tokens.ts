@@ -163,7 +163,11 @@ export const colors = Object.fromEntries(
 const declare = (palette: Partial<Record<ColorRole, string>>) =>
   ROLES.flatMap((role) => (palette[role] ? [`${variable(role)}:${palette[role]}`] : [])).join(';');
 
-/** The style text of public/index.html that declares both palettes; a test holds the two together. */
+/**
+ * The style text of public/index.html that declares both palettes; a test holds the two together.
+ *
+ * @internal
+ */
 export const paletteCss = [
   `:root{color-scheme:light;${declare(day)}}`,
   `@media (prefers-color-scheme:dark){:root:not([data-palette=day]){color-scheme:dark;${declare(night)}}}`,

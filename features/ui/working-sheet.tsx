@@ -23,7 +23,7 @@ export interface WorkingProps {
 }
 
 /** How a number was found: formula, values, terms, note, source. */
-export function WorkingBlock({ formula, terms, result, band, note, source, mark }: WorkingProps) {
+function WorkingBlock({ formula, terms, result, band, note, source, mark }: WorkingProps) {
   return (
     <View style={styles.block}>
       <Card>

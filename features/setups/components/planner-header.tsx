@@ -1,9 +1,10 @@
-import { Pressable, StyleSheet, Text, View } from 'react-native';
+import { StyleSheet, View } from 'react-native';
 
 import { IconButton } from '@/features/ui/button';
 import { Select } from '@/features/ui/select';
+import { TabStrip } from '@/features/ui/tab-strip';
 import { Small, Title } from '@/features/ui/text';
-import { colors, space, stroke, target, type } from '@/features/ui/tokens';
+import { colors, space, target } from '@/features/ui/tokens';
 import { useLayout } from '@/features/ui/use-layout';
 import { SETUP_PARTS, type SetupPart } from '@/shared/domain/setups';
 
@@ -60,28 +61,16 @@ export function PartTabs({ part, answers, onPart }: PartTabsProps) {
       </View>
     );
   return (
-    <View role="tablist" aria-label="Parts of the setup" style={styles.parts}>
-      {SETUP_PARTS.map((value) => {
-        const here = value === part;
-        return (
-          <Pressable
-            key={value}
-            role="tab"
-            aria-selected={here}
-            aria-label={`${PART_WORDS[value]}: ${answers[value]}`}
-            onPress={() => onPart(value)}
-            style={[styles.part, here && styles.here]}
-          >
-            <Text style={[type.subheading, styles.word]} numberOfLines={1}>
-              {PART_WORDS[value]}
-            </Text>
-            <Text style={[type.small, styles.answer]} numberOfLines={1}>
-              {answers[value]}
-            </Text>
-          </Pressable>
-        );
-      })}
-    </View>
+    <TabStrip
+      label="Parts of the setup"
+      value={part}
+      onChange={onPart}
+      tabs={SETUP_PARTS.map((value) => ({
+        value,
+        label: PART_WORDS[value],
+        detail: answers[value],
+      }))}
+    />
   );
 }
 
@@ -95,19 +84,4 @@ const styles = StyleSheet.create({
   },
   name: { flex: 1, minWidth: 0 },
   menu: { paddingHorizontal: space[4], paddingBottom: space[2], backgroundColor: colors.page },
-  parts: { flexDirection: 'row' },
-  part: {
-    flex: 1,
-    minWidth: 0,
-    minHeight: target.base,
-    alignItems: 'center',
-    justifyContent: 'center',
-    paddingHorizontal: space[1],
-    paddingVertical: space[1],
-    borderBottomWidth: stroke.index,
-    borderBottomColor: 'transparent',
-  },
-  here: { backgroundColor: colors.headerWell, borderBottomColor: colors.markOnEnamel },
-  word: { color: colors.onEnamel },
-  answer: { color: colors.onEnamelSoft },
 });

@@ -122,7 +122,7 @@ interface JawLabelProps extends ChuckDrawingProps {
 /** Beside a jaw that stands up or down, under the end of any other; always inside the drawing. */
 function JawLabel({ plan, contact, layout, units, boreMm, padWidthMm, ...size }: JawLabelProps) {
   const jaws = plan.contacts.length;
-  const full = hasFullLabels(plan);
+  const full = hasFullLabels(plan, size.width, size.textScale);
   const words = full ? jawLabel(contact, jaws, units) : String(contact.jaw);
   const { centre, outerRadius } = layout;
   const angle = (contact.angleDeg * Math.PI) / 180;

@@ -167,7 +167,9 @@ function Key({ unit }: { unit: string }) {
         <Sample>
           <Line x1={0} x2={28} y1={6} y2={6} stroke={colors.bar} strokeWidth={3} />
         </Sample>
-        <Small tone="text">{`dial still to go, ${unit}`}</Small>
+        <View style={styles.words}>
+          <Small tone="text">{`dial still to go, ${unit}`}</Small>
+        </View>
       </View>
       <View style={styles.entry}>
         <Sample>
@@ -181,7 +183,9 @@ function Key({ unit }: { unit: string }) {
             strokeDasharray={DASH}
           />
         </Sample>
-        <Small tone="sparkText">{`metal still to come off, ${unit}`}</Small>
+        <View style={styles.words}>
+          <Small tone="sparkText">{`metal still to come off, ${unit}`}</Small>
+        </View>
       </View>
       <View style={styles.entry}>
         <Sample>
@@ -204,5 +208,6 @@ function Sample({ children }: { children: ReactNode }) {
 const styles = StyleSheet.create({
   view: { gap: space[3] },
   key: { flexDirection: 'row', flexWrap: 'wrap', columnGap: space[4], rowGap: space[1] },
-  entry: { flexDirection: 'row', alignItems: 'center', gap: space[2] },
+  entry: { flexDirection: 'row', alignItems: 'center', flexShrink: 1, gap: space[2] },
+  words: { flexShrink: 1 },
 });

@@ -42,9 +42,12 @@ export interface ChuckLayout {
   height: number;
 }
 
-/** More jaws than this carry their numbers alone; the list says the rest. */
 const MOST_FULL_LABELS = 4;
-export const hasFullLabels = (plan: JawPlan) => plan.contacts.length <= MOST_FULL_LABELS;
+const ROOM_FOR_LABELS = 240;
+
+/** Many jaws, or large words in a narrow place: the jaws carry their numbers alone, the list says the rest. */
+export const hasFullLabels = (plan: JawPlan, width: number, textScale: number) =>
+  plan.contacts.length <= MOST_FULL_LABELS && width / textScale >= ROOM_FOR_LABELS;
 
 const OUTER_SHARE = 0.43;
 const FACE_SHARE = 0.82;
@@ -57,7 +60,7 @@ export function chuckLayout(width: number, plan: JawPlan, textScale: number): Ch
     FACE_SHARE,
     ...plan.contacts.map(({ angleDeg }) => -Math.cos((angleDeg * Math.PI) / 180)),
   );
-  const margin = (hasFullLabels(plan) ? 8 : 18) * textScale;
+  const margin = (hasFullLabels(plan, width, textScale) ? 8 : 18) * textScale;
   const centre = { x: width / 2, y: margin + outerRadius };
   return {
     centre,

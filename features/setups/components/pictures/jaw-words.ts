@@ -4,11 +4,11 @@ import { formatQuantity } from '@/shared/units/format';
 
 const ORDER = ['first', 'second', 'third', 'fourth', 'fifth', 'sixth', 'seventh', 'eighth'];
 
-export const millimetres = (value: number, units: UnitSystem, withUnit = true) =>
+const millimetres = (value: number, units: UnitSystem, withUnit = true) =>
   formatQuantity({ value, unit: 'mm' }, units, { withUnit, fixed: true });
 
 /** "first", "second", "last" */
-export function orderWord(contact: JawContact, jaws: number): string {
+function orderWord(contact: JawContact, jaws: number): string {
   if (contact.order === jaws && jaws > 1) return 'last';
   return ORDER[contact.order - 1] ?? `${contact.order}th`;
 }

@@ -18,6 +18,7 @@ import {
 } from './pass-groups';
 
 const ROOM_FOR_ALL = 440;
+const ROOM_FOR_WHOLE_CELLS = 250;
 
 type Row = PassGroup | 'between';
 
@@ -26,7 +27,9 @@ export function PassTable({ passes, units }: { passes: readonly Pass[]; units: U
   const [width, onLayout] = useMeasuredWidth();
   const { textScale } = useLayout();
   const unit = ENTRY_UNITS[displayUnit('mm', units)].label;
-  const all = (width ?? 0) / textScale >= ROOM_FOR_ALL;
+  const room = (width ?? 0) / textScale;
+  const all = room >= ROOM_FOR_ALL;
+  const whole = room >= ROOM_FOR_WHOLE_CELLS;
   const rows = groupPasses(passes).flatMap<Row>((group, index, groups) => {
     const before = groups[index - 1];
     const startsFinish = before && isFinish(group.stage) && !isFinish(before.stage);
@@ -35,12 +38,12 @@ export function PassTable({ passes, units }: { passes: readonly Pass[]; units: U
   const of = (cell: (group: PassGroup) => string) => (row: Row) =>
     row === 'between' ? '' : cell(row);
   const columns: Column<Row>[] = [
-    { id: 'passes', label: 'Passes', whole: true, cell: of(groupName) },
+    { id: 'passes', label: 'Passes', whole, cell: of(groupName) },
     {
       id: 'dial',
       label: 'Dial',
       numeric: true,
-      whole: true,
+      whole,
       cell: of((group) => dialWords(group, units)),
     },
     {
