@@ -1,6 +1,6 @@
 import { planStage, type CutBasis, type StageCutPlan } from './cut-stage';
 import { dialOf, type Dial } from './dial';
-import { infeedCaps, type Cap } from './infeed';
+import { infeedCaps, withCap, type Cap } from './infeed';
 import { positive } from './surface';
 import { traverseAims, type TraverseAims } from './traverse';
 import { workRow, type WorkRow } from './work-table';
@@ -62,7 +62,11 @@ export function planCut(basis: CutBasis): CutPlan {
     ...(basis.burnMm === null ? [] : [{ by: 'burn' as const, valueMm: basis.burnMm }]),
   ];
   const finish = planStage(basis, {
-    caps: finishCaps,
+    // Finishing never takes more than roughing was allowed.
+    caps:
+      rough === null || rough.typed
+        ? finishCaps
+        : withCap(finishCaps, { by: rough.by, valueMm: rough.setting.infeedMm }),
     typedInfeedMm: positive(cut.finishInfeedMm),
     typedTraverseMm: positive(cut.finishTraverseMmPerRev),
     aimMm: aims.finish.value,

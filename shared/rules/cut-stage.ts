@@ -75,16 +75,21 @@ export function planStage(basis: CutBasis, aim: StageAim): StageCutPlan | null {
 
 function traversing(basis: CutBasis, aim: StageAim, cap: Cap): StageCutPlan {
   const feeds = basis.input.lathe?.feedsMmPerRev ?? [];
-  const asked = aim.typedTraverseMm ?? feedAtMost(feeds, aim.aimMm).mmPerRev;
+  const limits = { ...cutEffects(basis), lagLimitMm: basis.input.rules.lagLimitMm };
+  const typed = aim.typedTraverseMm;
+  const asked = typed ?? feedAtMost(feeds, aim.aimMm).mmPerRev;
+  const { traverseMm } = balanceCut(
+    cap,
+    { aimMm: asked, leastMm: aim.leastMm, fixed: typed !== null },
+    limits,
+  );
+  const feed = typed === null ? feedAtMost(feeds, traverseMm) : { mmPerRev: typed, byHand: false };
+  // The infeed is judged at the feed that is there, which may be finer than the one aimed at.
   const balanced = balanceCut(
     cap,
-    { aimMm: asked, leastMm: aim.leastMm, fixed: aim.typedTraverseMm !== null },
-    { ...cutEffects(basis), lagLimitMm: basis.input.rules.lagLimitMm },
+    { aimMm: feed.mmPerRev, leastMm: feed.mmPerRev, fixed: true },
+    limits,
   );
-  const feed =
-    aim.typedTraverseMm === null
-      ? feedAtMost(feeds, balanced.traverseMm)
-      : { mmPerRev: aim.typedTraverseMm, byHand: false };
   return {
     ...settled(aim, balanced),
     traverseMm: feed.mmPerRev,

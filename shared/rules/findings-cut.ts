@@ -119,7 +119,7 @@ export const CUT_FINDINGS = {
   'many-passes': {
     part: 'cut',
     levels: ['check'],
-    title: 'Taking {stock} off takes {passes} passes.',
+    title: 'Taking {stock} off takes {passes}.',
     remedy: 'Turn or bore the bulk away first, or leave the surface to a grinding machine.',
     source: 'derived-time',
   },

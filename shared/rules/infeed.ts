@@ -68,6 +68,21 @@ export function leastCap(caps: readonly Cap[]): Cap | null {
 }
 
 /**
+ * Caps with one more among them; of two of a kind the lower counts.
+ *
+ * @param caps - caps of different kinds.
+ * @param cap - the one to add.
+ * @returns a new list, one of each kind.
+ */
+export function withCap(caps: readonly Cap[], cap: Cap): Cap[] {
+  const lower = caps.find(({ by }) => by === cap.by)?.valueMm ?? cap.valueMm;
+  return [
+    ...caps.filter(({ by }) => by !== cap.by),
+    { by: cap.by, valueMm: Math.min(lower, cap.valueMm) },
+  ];
+}
+
+/**
  * Infeed and traverse together: where spring or power would be too much, the traverse is cut first, down to
  * the finishing one, and only then the infeed.
  *

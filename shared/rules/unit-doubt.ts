@@ -65,7 +65,7 @@ function neighbours({ operation, work, wheelData, quill }: PlanInput): Neighbour
       {
         first: ['run-out', positive(work.runOutMm)],
         second: ['stock on diameter', positive(work.stockOnDiameterMm)],
-        low: 0.005,
+        low: 0.0001,
         high: 6,
       },
     ];

@@ -1,10 +1,10 @@
 import { DEFAULT_SHOP_RULES } from '@/shared/domain/shop-rules';
-import { balanceCut, infeedCaps, leastCap } from '@/shared/rules/infeed';
+import { balanceCut, infeedCaps, leastCap, withCap } from '@/shared/rules/infeed';
 import { feedAtMost, overrun, travel, traverseAims } from '@/shared/rules/traverse';
 import { workRow } from '@/shared/rules/work-table';
 import { planSetup } from '@/shared/rules';
 
-import { boreInput, LATHE, outsideInput } from '../../support/plan-inputs';
+import { boreInput, jawsInput, LATHE, outsideInput, QUILL } from '../../support/plan-inputs';
 
 describe('overrun and travel', () => {
   it('are a third of the wheel, and the surface less a third of the wheel', () => {
@@ -64,6 +64,22 @@ describe('caps on the rough infeed', () => {
     expect(leastCap(caps({ burnMm: 0.009 }))).toMatchObject({ by: 'burn' });
     expect(leastCap(caps({ interrupted: true }))).toEqual({ by: 'table', valueMm: 0.0075 });
     expect(leastCap([])).toBeNull();
+  });
+
+  it('keep the lower of two of a kind', () => {
+    const two = [
+      { by: 'table' as const, valueMm: 0.0127 },
+      { by: 'shop' as const, valueMm: 0.005 },
+    ];
+    expect(withCap(two, { by: 'shop', valueMm: 0.0025 })).toContainEqual({
+      by: 'shop',
+      valueMm: 0.0025,
+    });
+    expect(withCap(two, { by: 'shop', valueMm: 0.02 })).toContainEqual({
+      by: 'shop',
+      valueMm: 0.005,
+    });
+    expect(withCap(two, { by: 'lag', valueMm: 0.003 })).toHaveLength(3);
   });
 
   it('do not ask for a finer dial because little is left to rough', () => {
@@ -133,6 +149,27 @@ describe('traverse and overrun in a plan', () => {
     const perSecond = ((plan.traverse.rough.value ?? NaN) * (plan.work.latheRpm.value ?? NaN)) / 60;
     expect(note?.figures.seconds?.value).toBeCloseTo(travelMm / perSecond, 9);
     expect(plan.verdict).toBe('clear');
+  });
+});
+
+describe('a slender quill in jaws', () => {
+  const base = jawsInput();
+  const plan = planSetup({
+    ...base,
+    quill: { ...QUILL, segments: [{ lengthMm: 90, diameterMm: 10 }] },
+  });
+
+  it('is judged at the feed that is there: the largest infeed that keeps the lag', () => {
+    const halfDivision = 0.0025;
+    const lagMm = plan.quill.lag.value ?? NaN;
+    const infeedMm = plan.infeed.rough.value ?? NaN;
+    expect(plan.infeed.governedBy).toBe('lag');
+    expect(lagMm).toBeLessThanOrEqual(0.015);
+    expect((lagMm * (infeedMm + halfDivision)) / infeedMm).toBeGreaterThan(0.015);
+  });
+
+  it('finishes with no more than it roughs', () => {
+    expect(plan.infeed.finish.value).toBeLessThanOrEqual(plan.infeed.rough.value ?? NaN);
   });
 });
 
