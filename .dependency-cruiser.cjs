@@ -107,9 +107,9 @@ module.exports = {
     ),
     forbid(
       'app-few-packages',
-      'Routes need the router, React and the shell around them, nothing else.',
+      'Routes need the router and React; the root layout sets up what all screens share.',
       {
-        from: { path: '^app/' },
+        from: { path: '^app/', pathNot: '^app/_layout\\.tsx$' },
         to: {
           dependencyTypes: PACKAGE,
           pathNot:
