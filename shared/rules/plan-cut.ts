@@ -1,5 +1,5 @@
 import { cutFindings } from './cut-findings';
-import { plungeRemovalRate, removalRate } from './contact';
+import { plungeRemovalRate, removalRate, wheelWear } from './contact';
 import {
   infeedFigure,
   lagFigure,
@@ -113,7 +113,8 @@ function traverseOf(basis: CutBasis, cut: CutPlan, latheRpm: Figure): Plan['trav
   };
 }
 
-function infeedOf({ plungeMm }: CutBasis, { rough, finish }: CutPlan): Plan['infeed'] {
+function infeedOf(basis: CutBasis, { rough, finish }: CutPlan): Plan['infeed'] {
+  const { input, surface, plungeMm } = basis;
   return {
     rough: infeedFigure(rough),
     finish: infeedFigure(finish),
@@ -123,6 +124,14 @@ function infeedOf({ plungeMm }: CutBasis, { rough, finish }: CutPlan): Plan['inf
     finishDivisions: finish?.setting.divisions ?? null,
     governedBy: rough?.by ?? null,
     compoundAngle: finish?.setting.compoundAngle ?? rough?.setting.compoundAngle ?? null,
+    wheelWear: wheelWear({
+      infeedMm: rough?.setting.infeedMm ?? null,
+      workMm: surface.diameterMm,
+      lengthMm: surface.lengthMm,
+      wheelMm: input.wheelData?.diameterNowMm ?? null,
+      widthMm: input.wheelData?.widthMm ?? null,
+      ratio: input.rules.grindingRatio,
+    }),
   };
 }
 

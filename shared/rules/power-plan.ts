@@ -1,3 +1,4 @@
+import { equivalentChip, specificRemoval } from './contact';
 import { burnFindings, burnThreshold } from './energy';
 import { finding } from './findings';
 import { quantity } from './figures';
@@ -64,6 +65,8 @@ export function planPower(spec: {
       normalForce: force.normal,
       power: force.power,
       burnThreshold: threshold,
+      chipThickness: equivalentChip(infeedMm, spec.workMPerMin, load.wheelSpeed.value),
+      specificRemoval: specificRemoval(infeedMm, spec.workMPerMin),
     },
     findings: [
       ...powerFindings(force.power.value, spec.motorW === null ? null : spec.motorW * spec.share),

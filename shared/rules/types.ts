@@ -182,6 +182,8 @@ export interface Plan {
     governedBy: 'table' | 'lag' | 'power' | 'burn' | 'dial' | 'shop' | 'stock' | 'typed' | null;
     /** Where the dial is too coarse: the compound's angle that makes one of its divisions fine enough. */
     compoundAngle: Figure | null;
+    /** What the wheel wears back on radius in one rough pass: fed extra, apart from the schedule. */
+    wheelWear: Figure;
   };
   /** Metal to remove on radius. */
   stock: Figure;
@@ -202,6 +204,8 @@ export interface Plan {
     normalForce: Figure;
     power: Figure;
     burnThreshold: Figure;
+    chipThickness: Figure;
+    specificRemoval: Figure;
   };
   time: { grinding: Figure; dressing: Figure; total: Figure };
 }

@@ -117,6 +117,21 @@ describe('force and spring', () => {
     expect(plan.quill.lag.value).toBeCloseTo(bent, 9);
   });
 
+  it.each(OPERATIONS)(
+    'take from the wheel a twentieth of what they take from the work: %s',
+    (op) => {
+      const input = GOOD_INPUTS[op]();
+      const { infeed, jaws } = planSetup(input);
+      const wheel = input.wheelData ?? SMALL_WHEEL;
+      const workMm = (jaws ? input.work.jawBoreMm : input.work.diameterMm) ?? NaN;
+      const removedMm3 =
+        Math.PI * workMm * (infeed.rough.value ?? NaN) * (input.work.lengthMm ?? NaN);
+      const wornMm3 =
+        Math.PI * wheel.diameterNowMm * (infeed.wheelWear.value ?? NaN) * wheel.widthMm;
+      expect(removedMm3 / wornMm3).toBeCloseTo(20, 9);
+    },
+  );
+
   it('cut the traverse before the infeed where the quill is slender', () => {
     const stiff = planSetup(boreInput());
     const slender = planSetup({
