@@ -186,7 +186,8 @@ describe.each(SIZES)('on a %s screen', (size) => {
     await page.evaluate(() => fetch('/api/session', { method: 'DELETE' }));
     await bore.fill('49');
     await page.getByText(/You are signed out/).waitFor();
-    await page.getByRole('link', { name: 'Sign in' }).click();
+    await page.getByRole('button', { name: 'Sign in' }).click();
+    await page.waitForURL(/sign-in\?next=/);
     await signIn(page, 'apprentice');
     await planner.part('Work');
     expect(await planner.field('Bore at the jaws').inputValue()).toBe('49');

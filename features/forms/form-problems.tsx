@@ -1,6 +1,7 @@
 import { useFormikContext } from 'formik';
 
-import { problemOf, problemWords } from '@/features/transport';
+import { isRefusal, problemOf, problemWords, useEndSession } from '@/features/transport';
+import { Button } from '@/features/ui/button';
 import { ErrorSummary } from '@/features/ui/error-summary';
 import { useFieldIdsOf } from '@/features/ui/field-ids';
 import { Notice } from '@/features/ui/notice';
@@ -31,9 +32,16 @@ export function FormErrors() {
   return <ErrorSummary errors={list} attempt={submitCount} />;
 }
 
-/** A refusal that belongs to no field. */
+/** A refusal that belongs to no field. Who is signed out finds the way in; drafts wait on the device. */
 export function FormProblem({ error }: { error: unknown }) {
+  const signIn = useEndSession();
   if (!error) return null;
+  if (isRefusal(error, 'unauthenticated'))
+    return (
+      <Notice kind="error" action={<Button label="Sign in" onPress={signIn} />}>
+        You are signed out. What you typed is kept on this device; sign in and go on.
+      </Notice>
+    );
   return <Notice kind="error">{problemWords(problemOf(error))}</Notice>;
 }
 

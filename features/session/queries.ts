@@ -2,12 +2,12 @@ import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query
 
 import { session, type SignInRequest, type SignUpRequest } from '@/shared/contracts/session';
 import { shop } from '@/shared/contracts/shops';
-import { request, requestNothing, STALE } from '@/features/transport';
+import { request, requestNothing, SESSION_KEY, STALE } from '@/features/transport';
 
 export const sessionQueries = {
   current: () =>
     queryOptions({
-      queryKey: ['session'],
+      queryKey: SESSION_KEY,
       queryFn: ({ signal }) => request(session, '/api/session', { signal }),
       staleTime: STALE.session,
     }),
@@ -41,14 +41,10 @@ export function useSignUp() {
   });
 }
 
-/** Signs out and forgets everything the server had told this page. */
+/** Signs out and loads the first page anew: nothing the server had told this page stays in its memory. */
 export function useSignOut() {
-  const client = useQueryClient();
   return useMutation({
     mutationFn: () => requestNothing('/api/session', { method: 'DELETE' }),
-    onSuccess: () => {
-      client.clear();
-      client.setQueryData(sessionQueries.current().queryKey, null);
-    },
+    onSuccess: () => window.location.replace('/'),
   });
 }

@@ -2,10 +2,12 @@ import { useQuery } from '@tanstack/react-query';
 import { Redirect, useLocalSearchParams, useRouter, type Href } from 'expo-router';
 import { Formik } from 'formik';
 
-import { FormErrors, FormProblem, TextField } from '@/features/forms';
+import { FormErrors, TextField } from '@/features/forms';
+import { problemOf, problemWords } from '@/features/transport';
 import { Button } from '@/features/ui/button';
 import { Stack } from '@/features/ui/card';
 import { TextLink } from '@/features/ui/link';
+import { Notice } from '@/features/ui/notice';
 import { Screen } from '@/features/ui/screen';
 import { Body } from '@/features/ui/text';
 
@@ -40,7 +42,9 @@ export function SignInScreen() {
         {({ handleSubmit, isSubmitting }) => (
           <Stack>
             <FormErrors />
-            <FormProblem error={signIn.error} />
+            {signIn.error ? (
+              <Notice kind="error">{problemWords(problemOf(signIn.error))}</Notice>
+            ) : null}
             <TextField
               name="email"
               label="E-mail address"

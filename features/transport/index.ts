@@ -4,3 +4,4 @@ export { createQueryClient } from './query-client';
 export { request, requestNothing } from './request';
 export { STALE } from './stale';
 export { readStored, removeStored, writeStored } from './device-storage';
+export { SESSION_KEY, useEndSession } from './session-end';

@@ -1,11 +1,18 @@
-import { QueryClient } from '@tanstack/react-query';
+import { QueryCache, QueryClient } from '@tanstack/react-query';
 
-import { problemOf } from './problem';
+import { isRefusal, problemOf } from './problem';
+import { endSession } from './session-end';
 import { STALE } from './stale';
 
-/** One client per signed-in page; a refusal is final, a broken line is tried twice more. */
+/** One client per page; a refusal is final, a broken line is tried twice more. */
 export function createQueryClient(): QueryClient {
-  return new QueryClient({
+  const client: QueryClient = new QueryClient({
+    // Nothing is being typed into what is only read; forms say it in their place instead.
+    queryCache: new QueryCache({
+      onError: (error) => {
+        if (isRefusal(error, 'unauthenticated')) endSession(client);
+      },
+    }),
     defaultOptions: {
       queries: {
         staleTime: STALE.short,
@@ -15,4 +22,5 @@ export function createQueryClient(): QueryClient {
       mutations: { retry: false, networkMode: 'always' },
     },
   });
+  return client;
 }

@@ -1,9 +1,6 @@
-import { usePathname } from 'expo-router';
-
-import { problemWords } from '@/features/transport';
+import { problemWords, useEndSession } from '@/features/transport';
 import { Button } from '@/features/ui/button';
 import { Stack } from '@/features/ui/card';
-import { ButtonLink } from '@/features/ui/link';
 import { Notice } from '@/features/ui/notice';
 import { Table } from '@/features/ui/table';
 import { Body } from '@/features/ui/text';
@@ -22,7 +19,7 @@ interface SaveProblemProps {
 
 /** Why the draft is not with the server, and the way on. What was typed stands on the page all the while. */
 export function SaveProblem({ state, values, onRetry, onResolve }: SaveProblemProps) {
-  const path = usePathname();
+  const signIn = useEndSession();
   if (state.kind === 'failed') {
     const signedOut =
       state.problem.kind === 'refused' && state.problem.details.code === 'unauthenticated';
@@ -31,7 +28,7 @@ export function SaveProblem({ state, values, onRetry, onResolve }: SaveProblemPr
         kind="error"
         action={
           signedOut ? (
-            <ButtonLink label="Sign in" href={{ pathname: '/sign-in', params: { next: path } }} />
+            <Button label="Sign in" onPress={signIn} />
           ) : (
             <Button label="Try again" onPress={onRetry} />
           )

@@ -1,5 +1,3 @@
-import { useRouter } from 'expo-router';
-
 import { FormProblem } from '@/features/forms';
 import { useShop, useSignOut } from '@/features/session';
 import { Button } from '@/features/ui/button';
@@ -15,7 +13,6 @@ import { ROLE_WORDS } from '../words';
 /** What each person chooses for themselves on this device. */
 export function OwnSettings() {
   const { person, role, units, setUnits } = useShop();
-  const router = useRouter();
   const signOut = useSignOut();
   return (
     <Stack>
@@ -31,11 +28,7 @@ export function OwnSettings() {
       <PaletteSwitch />
       <FormProblem error={signOut.error} />
       <Row>
-        <Button
-          label="Sign out"
-          busy={signOut.isPending}
-          onPress={() => signOut.mutate(undefined, { onSuccess: () => router.replace('/sign-in') })}
-        />
+        <Button label="Sign out" busy={signOut.isPending} onPress={() => signOut.mutate()} />
       </Row>
       <Small>
         What you typed and did not save stays on this device for when you sign in again.

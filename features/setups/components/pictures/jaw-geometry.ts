@@ -5,7 +5,7 @@ import type { JawContact, JawPlan } from '@/shared/rules/types';
 const ROUND = [1, 1.5, 2, 3, 4, 5, 6, 8];
 const NICE = [1, 10, 100, 1000].flatMap((decade) => ROUND.map((step) => step * decade));
 /** The largest gap is drawn about this share of the bore's radius. */
-const GAP_SHARE = 0.45;
+const GAP_SHARE = 0.38;
 const FACE_POINTS = 12;
 
 export interface Point {
@@ -88,10 +88,9 @@ export const pixelsPerMm = ({ pathRadius }: ChuckLayout, boreMm: number) =>
 export function jawOutline(spec: JawSpec): string {
   const { plan, contact, layout } = spec;
   const { centre, pathRadius, outerRadius } = layout;
-  const scale = pixelsPerMm(layout, spec.boreMm);
-  const offsetScale = scale * spec.times;
+  const offsetScale = pixelsPerMm(layout, spec.boreMm) * spec.times;
   const half = halfAngleDeg(spec.boreMm, spec.padWidthMm, plan.contacts.length);
-  const halfWidth = Math.max((spec.padWidthMm * scale) / 2, 2);
+  const halfWidth = Math.max(pathRadius * Math.sin((half * Math.PI) / 180), 2);
   const reach = (turn: number) =>
     offsetScale *
     plan.eccentricityMm *
@@ -101,20 +100,22 @@ export function jawOutline(spec: JawSpec): string {
     (_, index) => half * ((2 * index) / FACE_POINTS - 1),
   );
   const nearest = Math.min(...turns.map(reach));
-  const face = turns.map((turn) =>
-    polar(
-      centre,
-      pathRadius + offsetScale * contact.touchesAtMm + reach(turn) - nearest,
-      contact.angleDeg + turn,
-    ),
-  );
-  const end = polar(centre, outerRadius, contact.angleDeg);
   const across = (contact.angleDeg * Math.PI) / 180;
-  const corner = (side: 1 | -1): Point => ({
-    x: end.x + side * halfWidth * Math.cos(across),
-    y: end.y + side * halfWidth * Math.sin(across),
+  /** A point of the jaw by its distance along the jaw and across it. */
+  const at = (along: number, sideways: number): Point => {
+    const middle = polar(centre, along, contact.angleDeg);
+    return {
+      x: middle.x + sideways * Math.cos(across),
+      y: middle.y + sideways * Math.sin(across),
+    };
+  };
+  // Distances from the axis are true; the pad keeps its width however far it stands off.
+  const face = turns.map((turn) => {
+    const distance = pathRadius + offsetScale * contact.touchesAtMm + reach(turn) - nearest;
+    const sideways = halfWidth * (turn / half);
+    return at(Math.sqrt(Math.max(distance ** 2 - sideways ** 2, 0)), sideways);
   });
-  const points = [...face, corner(1), corner(-1)];
+  const points = [...face, at(outerRadius, halfWidth), at(outerRadius, -halfWidth)];
   return `M${points.map(({ x, y }) => `${x.toFixed(1)},${y.toFixed(1)}`).join('L')}Z`;
 }
 
