@@ -29,7 +29,7 @@ export function AppFrame({ tabs, brand = 'Ringtrue' }: AppFrameProps) {
   return (
     <Tabs style={[styles.frame, wide && styles.frameWide]}>
       <View style={styles.main}>
-        <TabSlot />
+        <TabSlot style={styles.slot} />
       </View>
       <TabList role="navigation" aria-label="Places" style={wide ? styles.rail : styles.bar}>
         {wide ? (
@@ -73,6 +73,8 @@ const styles = StyleSheet.create({
   frame: { flex: 1, flexDirection: 'column', backgroundColor: colors.page },
   frameWide: { flexDirection: 'row-reverse' },
   main: { flex: 1, minWidth: 0 },
+  // The slot grows with its content unless told otherwise, and the bar would scroll away with the page.
+  slot: { flexShrink: 1, flexBasis: 0 },
   bar: {
     flexDirection: 'row',
     justifyContent: 'space-around',
