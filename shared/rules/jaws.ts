@@ -44,13 +44,14 @@ const BISECTIONS = 40;
  *
  * @param chuck - jaws, pads, offset and the pads' own errors, mm and degrees.
  * @returns order of contact, clean-up stock on radius and tilt, unrounded; null when there are fewer than two
- * jaws or the pads are wider than the bore.
+ * jaws or the pads are wider than the bore, now or when they were last ground.
  * @source derived-jaw-contact
  * @example planJaws({ jawCount: 3, boreMm: 60, padWidthMm: 0, padBackMm: 0, padFrontMm: 40, lastGroundMm: null, offset: { at0: { aMm: 0.05, bMm: 0 }, perMm: { aMm: 0, bMm: 0 } }, padErrors: [] })?.cleanUp.value // 0.075 mm
  */
 export function planJaws(chuck: JawChuck): JawPlan | null {
   const radiusMm = chuck.boreMm / 2;
-  if (chuck.jawCount < 2 || !(radiusMm > 0) || chuck.padWidthMm > chuck.boreMm) return null;
+  const narrowest = Math.min(chuck.boreMm, chuck.lastGroundMm ?? chuck.boreMm);
+  if (chuck.jawCount < 2 || !(radiusMm > 0) || chuck.padWidthMm > narrowest) return null;
   const angles = Array.from({ length: chuck.jawCount }, (_, jaw) => (360 * jaw) / chuck.jawCount);
   const reaches = angles.map((angleDeg, jaw) => padReach(chuck, angleDeg, jaw));
   const first = Math.min(...reaches.map(({ firstMm }) => firstMm));
@@ -82,30 +83,56 @@ export function bellMouth(jawCount: number, bellMouthMm: number): PadError[] {
 /** Both ends decide: for any point across the pad the distance from the axis is a straight line along it. */
 function padReach(chuck: JawChuck, angleDeg: number, jaw: number): PadReach {
   const { backMm, frontMm } = chuck.padErrors[jaw] ?? { backMm: 0, frontMm: 0 };
-  const back = acrossPad(chuck, angleDeg, chuck.padBackMm);
-  const front = acrossPad(chuck, angleDeg, chuck.padFrontMm);
+  const back = acrossPad(chuck, angleDeg, { zMm: chuck.padBackMm, errorMm: backMm });
+  const front = acrossPad(chuck, angleDeg, { zMm: chuck.padFrontMm, errorMm: frontMm });
   return {
-    firstMm: Math.min(back.firstMm + backMm, front.firstMm + frontMm),
-    lastMm: Math.max(back.lastMm + backMm, front.lastMm + frontMm),
+    firstMm: Math.min(back.firstMm, front.firstMm),
+    lastMm: Math.max(back.lastMm, front.lastMm),
   };
 }
 
-/** The nearest and the furthest point of a pad at one place along it, as distances beyond the bore's radius. */
-function acrossPad(chuck: JawChuck, angleDeg: number, zMm: number): PadReach {
+/**
+ * The nearest and the furthest point of a pad at one place along it, as distances beyond the bore's radius. A
+ * pad's error shifts it along its own direction, the offset along its own.
+ */
+function acrossPad(
+  chuck: JawChuck,
+  angleDeg: number,
+  { zMm, errorMm }: { zMm: number; errorMm: number },
+): PadReach {
   const radiusMm = chuck.boreMm / 2;
   const { aMm, bMm } = offsetAt(chuck.offset, zMm);
-  const lastRadiusMm = (chuck.lastGroundMm ?? chuck.boreMm) / 2;
-  const bow = (radiusMm ** 2 / 2) * (1 / radiusMm - 1 / lastRadiusMm);
+  const bow = bowOf(radiusMm, (chuck.lastGroundMm ?? chuck.boreMm) / 2);
   const middle = toRadians(angleDeg);
   const half = Math.asin(chuck.padWidthMm / chuck.boreMm);
 
   const distance = (d: number) =>
-    aMm * Math.cos(middle + d) + bMm * Math.sin(middle + d) + bow * Math.sin(d) ** 2;
+    aMm * Math.cos(middle + d) +
+    bMm * Math.sin(middle + d) +
+    errorMm * Math.cos(d) +
+    bow.height(radiusMm * Math.sin(d));
   const slope = (d: number) =>
-    bMm * Math.cos(middle + d) - aMm * Math.sin(middle + d) + bow * Math.sin(2 * d);
+    bMm * Math.cos(middle + d) -
+    aMm * Math.sin(middle + d) -
+    errorMm * Math.sin(d) +
+    bow.slope(radiusMm * Math.sin(d)) * radiusMm * Math.cos(d);
 
   const candidates = [-half, half, ...turningPoints(slope, half)].map(distance);
   return { firstMm: Math.min(...candidates), lastMm: Math.max(...candidates) };
+}
+
+/**
+ * How far a pad last ground at another radius stands beyond the bore, w mm from its middle: about
+ * w²/2 (1/R - 1/R_old). Nothing when both radii are the same.
+ */
+function bowOf(radiusMm: number, lastRadiusMm: number) {
+  const apart = radiusMm - lastRadiusMm;
+  const down = (w: number) => Math.sqrt(lastRadiusMm ** 2 - w ** 2);
+  const fromAxis = (w: number) => Math.hypot(apart + down(w), w);
+  return {
+    height: (w: number) => (apart === 0 ? 0 : fromAxis(w) - radiusMm),
+    slope: (w: number) => (apart === 0 ? 0 : (-apart * w) / (fromAxis(w) * down(w))),
+  };
 }
 
 /** Where the slope changes sign between -half and half. */

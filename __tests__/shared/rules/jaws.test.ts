@@ -63,7 +63,7 @@ describe('chuck jaws off the axis', () => {
     expect(Math.max(...stocks)).toBeCloseTo(most, 3);
   });
 
-  it('need at most twice the offset, and at least one and a half times, when they are alike', () => {
+  it('need at most twice the offset, and at least one and a half times (four √2), when they are alike', () => {
     fc.assert(
       fc.property(
         fc.integer({ min: 3, max: 12 }),
@@ -71,7 +71,7 @@ describe('chuck jaws off the axis', () => {
         fc.double({ min: 0, max: 360, noNaN: true }),
         (jawCount, padWidthMm, deg) => {
           const stock = cleanUpOverE({ jawCount, padWidthMm, offset: toward(0.05, deg) });
-          return stock >= 1.5 - 1e-9 && stock <= 2 + 1e-9;
+          return stock >= (jawCount === 4 ? Math.SQRT2 : 1.5) - 1e-9 && stock <= 2 + 1e-9;
         },
       ),
     );
@@ -118,20 +118,15 @@ describe('chuck jaws off the axis', () => {
     expect(plan?.cleanUp.value).toBeCloseTo(0.3 - 0.05 - 0.025, 9);
   });
 
-  it('bow when last ground at another diameter', () => {
-    const padWidthMm = 16;
-    const trueRunning = { offset: level(0, 0), padWidthMm };
-    const bow = (8 ** 2 / 2) * (1 / 30 - 1 / 33);
-    expect(planJaws(chuck({ ...trueRunning, lastGroundMm: 66 }))?.cleanUp.value).toBeCloseTo(
-      bow,
-      9,
-    );
-    expect(planJaws(chuck({ ...trueRunning, lastGroundMm: 60 }))?.cleanUp.value).toBeCloseTo(0, 12);
-    const tighter = (8 ** 2 / 2) * (1 / 27 - 1 / 30);
-    expect(planJaws(chuck({ ...trueRunning, lastGroundMm: 54 }))?.cleanUp.value).toBeCloseTo(
-      tighter,
-      9,
-    );
+  it('bow when last ground at another diameter, by about w²/2 (1/R - 1/R_old)', () => {
+    const stock = (lastGroundMm: number) =>
+      planJaws(chuck({ offset: level(0, 0), padWidthMm: 16, lastGroundMm }))?.cleanUp.value ?? NaN;
+    const corner = (last: number) => Math.hypot(30 - last + Math.sqrt(last ** 2 - 64), 8) - 30;
+    expect(stock(66)).toBeCloseTo(corner(33), 12);
+    expect(stock(54)).toBeCloseTo(-corner(27), 12);
+    expect(stock(60)).toBeCloseTo(0, 12);
+    expect(stock(66) / (32 * (1 / 30 - 1 / 33))).toBeCloseTo(1, 1);
+    expect(stock(54) / (32 * (1 / 27 - 1 / 30))).toBeCloseTo(1, 1);
   });
 
   it('say when the last diameter is not known', () => {
@@ -144,6 +139,7 @@ describe('chuck jaws off the axis', () => {
     expect(planJaws(chuck({ boreMm: 0 }))).toBeNull();
     expect(planJaws(chuck({ padWidthMm: 60.001 }))).toBeNull();
     expect(planJaws(chuck({ padWidthMm: 60 }))).not.toBeNull();
+    expect(planJaws(chuck({ padWidthMm: 50, lastGroundMm: 49 }))).toBeNull();
   });
 });
 
@@ -251,7 +247,7 @@ describe('a wheel swept round a chuck', () => {
           at: wheelPositionThatMeets(point),
         }));
         const first = Math.min(...met.map(({ at }) => at));
-        // Second order of offset, fourth of pad width, and the spacing of the points across a pad.
+        // Second order of the offset, and the spacing of the points across a pad.
         const doubt = 0.004;
         return plan.contacts.every(({ jaw, touchesAtMm, cleanAtMm }) => {
           const own = met.filter((point) => point.jaw === jaw - 1).map(({ at }) => at);
