@@ -1,6 +1,6 @@
 import { useQuery } from '@tanstack/react-query';
 import { Redirect, useGlobalSearchParams, usePathname } from 'expo-router';
-import type { ReactNode } from 'react';
+import { useState, type ReactNode } from 'react';
 
 import { isRefusal, problemOf, problemWords } from '@/features/transport';
 import { Button } from '@/features/ui/button';
@@ -25,8 +25,7 @@ export function ShopGate({ children }: { children: ReactNode }) {
   const shop = useQuery({ ...sessionQueries.shop(shopId), enabled: Boolean(person) });
 
   if (session.isPending) return <Waiting />;
-  if (session.data === null)
-    return <Redirect href={{ pathname: '/sign-in', params: { next: path } }} />;
+  if (session.data === null) return <ToSignIn from={path} />;
   const failure = session.error ?? shop.error;
   if (failure && !shop.data) {
     if (isRefusal(failure, 'not-found')) return <NoSuchShop />;
@@ -54,6 +53,12 @@ export function ShopGate({ children }: { children: ReactNode }) {
       {children}
     </ShopProvider>
   );
+}
+
+/** Holds the address that was asked for: with the shop's screens gone, the router forgets it. */
+function ToSignIn({ from }: { from: string }) {
+  const [next] = useState(from);
+  return <Redirect href={{ pathname: '/sign-in', params: { next } }} />;
 }
 
 const Waiting = () => (
