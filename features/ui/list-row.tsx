@@ -72,6 +72,7 @@ const styles = StyleSheet.create({
   row: {
     flexDirection: 'row',
     flexWrap: 'wrap',
+    alignContent: 'center',
     alignItems: 'center',
     gap: space[3],
     minHeight: target.machine,

@@ -41,7 +41,7 @@ export function Table<Row>({
   const cellStyle = (numeric?: boolean): CSSProperties => ({
     padding,
     textAlign: numeric ? 'right' : 'left',
-    verticalAlign: 'baseline',
+    verticalAlign: 'middle',
     fontWeight: 'inherit',
     borderBottom: `1px solid ${colors.rule}`,
   });

@@ -231,7 +231,7 @@ export const type = StyleSheet.create({
   engraved: { ...style(fonts.condensed, 14, 20), letterSpacing: 1, textTransform: 'uppercase' },
   subheading: style(fonts.condensed, 18, 24),
   heading: style(fonts.condensed, 21, 28),
-  title: style(fonts.condensed, 24, 30),
+  title: style(fonts.condensed, 24, 28),
   display: style(fonts.condensed, 32, 40),
   readoutSmall: style(fonts.condensed, 20, 26),
   readout: style(fonts.condensed, 26, 32),

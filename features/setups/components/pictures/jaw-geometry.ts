@@ -42,7 +42,7 @@ export interface ChuckLayout {
   height: number;
 }
 
-const MOST_FULL_LABELS = 4;
+const MOST_FULL_LABELS = 3;
 const ROOM_FOR_LABELS = 240;
 
 /** Many jaws, or large words in a narrow place: the jaws carry their numbers alone, the list says the rest. */

@@ -68,7 +68,7 @@ describe('the drawing of jaws', () => {
         const gap = Math.max(...plan.contacts.map((contact) => contact.touchesAtMm));
         const share = (gap * exaggeration([plan], BORE)) / (BORE / 2);
         expect(share).toBeGreaterThan(0.2);
-        expect(share).toBeLessThanOrEqual(0.45);
+        expect(share).toBeLessThanOrEqual(0.38);
       }),
     );
   });
