@@ -1,4 +1,6 @@
+import { standingOf } from '@/features/wheels';
 import type { SetupSummary } from '@/shared/contracts/setups';
+import type { Wheel } from '@/shared/contracts/wheels';
 import type { Verdict } from '@/shared/domain/setups';
 
 /** The gravest first; a clear setup asks for nothing. */
@@ -20,4 +22,17 @@ export function recentlyEdited(
 ): SetupSummary[] {
   const ids = new Set(shown.map(({ id }) => id));
   return setups.filter(({ id, state }) => state !== 'retired' && !ids.has(id));
+}
+
+export interface WheelOut {
+  wheel: Wheel;
+  standing: ReturnType<typeof standingOf>;
+}
+
+/** Wheels that must not run and are not scrapped, with the reason; `today` is the shop's date. */
+export function wheelsOut(wheels: readonly Wheel[], today: string): WheelOut[] {
+  return wheels
+    .filter(({ data }) => data.state !== 'scrapped')
+    .map((wheel) => ({ wheel, standing: standingOf(wheel.data, today) }))
+    .filter(({ standing }) => !standing.usable);
 }

@@ -15,13 +15,15 @@ export function useAddressPart(name: string): [string, (value: string) => void] 
 }
 
 interface SearchFieldProps {
+  /** Tells the searches of screens that stand on one page apart: "rack-search". */
+  name: string;
   label: string;
   hint?: string;
   maxLength: number;
 }
 
 /** Searches while typing pauses; the words stand in the page's address as `search`. */
-export function SearchField({ label, hint, maxLength }: SearchFieldProps) {
+export function SearchField({ name, label, hint, maxLength }: SearchFieldProps) {
   const [search, setSearch] = useAddressPart('search');
   const [text, setText] = useState(search);
   const [sent, setSent] = useState(search);
@@ -47,7 +49,7 @@ export function SearchField({ label, hint, maxLength }: SearchFieldProps) {
   return (
     <View style={styles.search}>
       <Field
-        name="search"
+        name={name}
         label={label}
         hint={hint}
         value={text}

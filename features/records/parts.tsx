@@ -46,12 +46,16 @@ export function rowParts<Item extends Row, Key extends string, Values extends Re
   const rows = new Map(versions.flatMap((values) => values[key].map((row) => [row.id, row])));
   return [...rows.values()].map((row) => {
     const at = (values: Values) => values[key].find(({ id }) => id === row.id);
+    const names = versions.flatMap((values) => at(values) ?? []).map(label);
+    // The name is part of what differs only where the row was renamed.
+    const named = new Set(names).size > 1;
     return {
       key: `${key}.${row.id}`,
       label: label(row),
       words: (values) => {
         const there = at(values);
-        return there ? `${label(there)}: ${words(there)}` : 'not there';
+        if (!there) return 'not there';
+        return named ? `${label(there)}: ${words(there)}` : words(there);
       },
       take: (into, from) => ({ ...into, [key]: replaced(into[key], row.id, at(from)) }),
     };

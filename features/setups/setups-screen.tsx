@@ -64,7 +64,12 @@ export function SetupsScreen() {
 
   return (
     <Screen title="Setups" over={shop.name} actions={none && !filtered ? null : <NewSetup />}>
-      <SearchField label="Search" hint="A part of the name." maxLength={TEXT_LIMITS.name} />
+      <SearchField
+        name="setups-search"
+        label="Search"
+        hint="A part of the name."
+        maxLength={TEXT_LIMITS.name}
+      />
       <Row gap={2}>
         {OPERATIONS.map((known) => (
           <Chip

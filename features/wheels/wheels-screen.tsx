@@ -72,6 +72,7 @@ export function WheelsScreen() {
         <View style={wide ? styles.both : null}>
           <View style={wide ? styles.list : styles.stack}>
             <SearchField
+              name="rack-search"
               label="Search"
               hint="A part of the tag or of the marking."
               maxLength={TEXT_LIMITS.marking}

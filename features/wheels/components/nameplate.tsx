@@ -1,6 +1,7 @@
 import { StyleSheet, View } from 'react-native';
 
 import { FigureReadout } from '@/features/plan';
+import { NOT_GIVEN } from '@/features/records';
 import { Card } from '@/features/ui/card';
 import { Readout, ReadoutRow } from '@/features/ui/readout';
 import { Display, Engraved, Small } from '@/features/ui/text';
@@ -44,7 +45,7 @@ export function Nameplate({ tag, wheel, speedUnit, units, typing = false }: Name
             : `marking read ${MARKING_PLACE_WORDS[wheel.markingReadOn]}`}
         </Small>
       </View>
-      <Display level={2}>{wheel.marking ?? 'not legible'}</Display>
+      <Display level={2}>{wheel.marking ?? (typing ? NOT_GIVEN : 'not legible')}</Display>
       <ReadoutRow>
         <Readout
           label="New"

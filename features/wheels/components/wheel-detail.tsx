@@ -51,6 +51,10 @@ export function WheelDetail({ wheel, today }: WheelDetailProps) {
         </Notice>
       ) : null}
       <FindingList findings={wheelFindingsOn(wheel.data, today)} sourced />
+      <Row>
+        {mayEdit ? edit('Edit') : null}
+        {may('wheel:set-aside') ? <SetAside shopId={shop.id} wheel={wheel} /> : null}
+      </Row>
       {standingOf(wheel.data, today).usable ? (
         <WhereItMayRun wheel={wheel.data} today={today} />
       ) : null}
@@ -59,10 +63,6 @@ export function WheelDetail({ wheel, today }: WheelDetailProps) {
         parts={wheelParts.filter(({ key }) => !shown.has(key))}
         values={valuesOf(wheel, units)}
       />
-      <Row>
-        {mayEdit ? edit('Edit') : null}
-        {may('wheel:set-aside') ? <SetAside shopId={shop.id} wheel={wheel} /> : null}
-      </Row>
     </Stack>
   );
 }
