@@ -11,15 +11,13 @@ import { accounts } from './auth/accounts';
 import { personsRepository } from './auth/persons-repository';
 import { SESSION_TIMES, sessions } from './auth/session';
 import { sessionRoutes } from './auth/session-routes';
-import { grindersRepository } from './grinders/grinders-repository';
-import { grindersRoutes } from './grinders/grinders-routes';
-import { grindersService } from './grinders/grinders-service';
 import { healthRoutes } from './http/health';
 import { loggableError } from './http/loggable-error';
 import { LIMIT_POINTS, rateLimits, type LimitPoints } from './http/rate-limits';
-import { lathesRepository } from './lathes/lathes-repository';
-import { lathesRoutes } from './lathes/lathes-routes';
-import { lathesService } from './lathes/lathes-service';
+import { grindersRepository } from './machines/grinders-repository';
+import { lathesRepository } from './machines/lathes-repository';
+import { machinesRoutes } from './machines/machines-routes';
+import { grindersService, lathesService } from './machines/machines-service';
 import { notFound } from './refusals';
 import { recomputeDrafts, refreshOutdated } from './setups/recompute';
 import { setupsRepository } from './setups/setups-repository';
@@ -94,8 +92,8 @@ export function composeServer(options: ServerOptions) {
   const services = {
     accounts: accountsOf(database),
     shops: shopsService(inShop, recompute),
-    lathes: lathesService(inShop, recompute),
-    grinders: grindersService(inShop, recompute),
+    lathes: lathesService({ inShop, recompute }),
+    grinders: grindersService({ inShop, recompute }),
     wheels: wheelsService(inShop, recompute),
     setups: setupsService({ inShop, refreshOutdated: refreshOutdated(now), now }),
   };
@@ -120,8 +118,7 @@ export function composeServer(options: ServerOptions) {
     ...healthRoutes({ checkDatabase: database.check, isStopping: () => stopping }),
     ...sessionRoutes({ accounts: services.accounts, sessions: signedIn, limits }),
     ...shopsRoutes(services.shops),
-    ...lathesRoutes(services.lathes),
-    ...grindersRoutes(services.grinders),
+    ...machinesRoutes(services),
     ...wheelsRoutes(services.wheels),
     ...setupsRoutes(services.setups),
   ];

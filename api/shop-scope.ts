@@ -1,8 +1,8 @@
 import type { Role } from '@/shared/domain/people';
 
 import type { AuditTrail } from './audit/audit-trail';
-import type { GrindersRepository } from './grinders/grinders-repository';
-import type { LathesRepository } from './lathes/lathes-repository';
+import type { GrindersRepository } from './machines/grinders-repository';
+import type { LathesRepository } from './machines/lathes-repository';
 import type { MembersRepository } from './shops/members-repository';
 import type { ShopsRepository } from './shops/shops-repository';
 import type { SetupsRepository } from './setups/setups-repository';

@@ -9,7 +9,7 @@ import { idReused, notFound, staleVersion } from './refusals';
  */
 export type Lock = 'share' | 'no key update';
 
-interface Item {
+export interface Item {
   id: string;
   version: number;
 }
@@ -36,6 +36,14 @@ export interface Creation<T> {
   isNew: boolean;
   item: T;
 }
+
+/** The fields that every stored thing carries, as contracts have them. */
+export const storedFields = (row: Item & { createdAt: Date; updatedAt: Date }) => ({
+  id: row.id,
+  version: row.version,
+  createdAt: row.createdAt.toISOString(),
+  updatedAt: row.updatedAt.toISOString(),
+});
 
 export async function existing<T>(found: Promise<T | null>): Promise<T> {
   const item = await found;

@@ -116,7 +116,6 @@ describe('the database itself', () => {
       verdict: 'incomplete',
       verdict_count: 1,
       rules_version: '1.0.0',
-      planned_on: '2026-03-02',
       updated_by: shop.personId,
     };
     await expect(insert('setups', { ...setup, wheel_id: theirs.id })).rejects.toMatchObject({

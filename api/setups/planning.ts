@@ -32,18 +32,19 @@ export async function planFor(
   { scope, now }: { scope: Sources; now: Date },
 ): Promise<StoredPlan> {
   const { shop, lathe, grinder, quill, rackWheel } = await partsOf(inputs, scope);
-  const plannedOn = dateIn(shop.timeZone, now);
-  const plan = planSetup(
-    assemblePlanInput(inputs, {
-      lathe: lathe?.data ?? null,
-      grinder: grinder?.data ?? null,
-      quill: quill?.data ?? null,
-      wheel: rackWheel?.data ?? null,
-      rules: shop.rules,
-      today: plannedOn,
-    }),
-  );
-  return { plan: { ...plan }, verdictCount: countOf(plan), plannedOn };
+  const today = dateIn(shop.timeZone, now);
+  const input = assemblePlanInput(inputs, {
+    lathe: lathe?.data ?? null,
+    grinder: grinder?.data ?? null,
+    quill: quill?.data ?? null,
+    wheel: rackWheel?.data ?? null,
+    rules: shop.rules,
+    today,
+  });
+  const plan = planSetup(input);
+  const expiresOn = input.wheelData?.expiresOn ?? null;
+  const goodUntil = expiresOn !== null && expiresOn >= today ? expiresOn : null;
+  return { plan: { ...plan }, verdictCount: countOf(plan), goodUntil };
 }
 
 function countOf({ verdict, needs, findings }: Plan): number {

@@ -8,7 +8,7 @@ import type { Draft, DraftFilter } from './setups-repository';
 /** Makes the plans of the shop's drafts anew after something they rest on has changed. */
 export type Recompute = (scope: ShopScope, which: DraftFilter | 'all') => Promise<void>;
 
-/** Drafts whose plan was made on another day, or by an older version of the rules. */
+/** Makes the plans of drafts anew that were made by other rules, or whose wheel has expired since. */
 export type RefreshOutdated = (scope: ShopScope) => Promise<void>;
 
 export const recomputeDrafts =

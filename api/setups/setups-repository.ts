@@ -1,20 +1,20 @@
-import { and, asc, desc, eq, exists, gte, ilike, lt, ne, or, sql, type SQL } from 'drizzle-orm';
+import { and, asc, desc, eq, gt, ilike, lt, or, sql, type SQL } from 'drizzle-orm';
 
 import type { Transaction } from '@/db/client';
-import { persons, setups, wheels } from '@/db/schema';
+import { persons, setups } from '@/db/schema';
 import type { Setup, SetupPage } from '@/shared/contracts/setups';
 import type { Operation, SetupInputs, SetupState, Verdict } from '@/shared/domain/setups';
 
 import { containing, keyOf, pageOf } from '../paging';
-import type { Lock } from '../stored-items';
+import { storedFields, type Lock } from '../stored-items';
 
 /** A plan as it is stored beside the inputs it was made from. */
 export interface StoredPlan {
   plan: Setup['plan'];
   /** Needs of an incomplete plan, otherwise findings of the verdict's level. */
   verdictCount: number;
-  /** The shop's date it was made for. */
-  plannedOn: string;
+  /** The last of the shop's days on which it holds; null when no day ends it. */
+  goodUntil: string | null;
 }
 
 interface SetupContent {
@@ -148,24 +148,14 @@ export const setupsRepository = (tx: Transaction, shopId: string) => {
         ),
       ),
 
-    /** Drafts planned by other rules, or before the day on which their wheel expired. */
+    /** Drafts planned by other rules, or not for a day as late as this one. */
     lockOutdatedDrafts: (current: { rulesVersion: string; today: string }): Promise<Draft[]> =>
       lockDrafts(
         or(
-          ne(setups.rulesVersion, current.rulesVersion),
-          exists(
-            tx
-              .select({ id: wheels.id })
-              .from(wheels)
-              .where(
-                and(
-                  eq(wheels.shopId, shopId),
-                  eq(wheels.id, setups.wheelId),
-                  gte(wheels.expiresOn, setups.plannedOn),
-                  lt(wheels.expiresOn, current.today),
-                ),
-              ),
-          ),
+          // Not `ne`: no index serves it.
+          lt(setups.rulesVersion, current.rulesVersion),
+          gt(setups.rulesVersion, current.rulesVersion),
+          lt(setups.goodUntil, current.today),
         ),
       ),
 
@@ -204,12 +194,12 @@ const columnsOf = ({ name, inputs, typed, stored, updatedBy }: SetupContent) => 
   updatedBy,
 });
 
-const planColumnsOf = ({ plan, verdictCount, plannedOn }: StoredPlan) => ({
+const planColumnsOf = ({ plan, verdictCount, goodUntil }: StoredPlan) => ({
   plan,
   verdict: plan.verdict,
   verdictCount,
   rulesVersion: plan.rulesVersion,
-  plannedOn,
+  goodUntil,
 });
 
 function toSetup({
@@ -220,10 +210,7 @@ function toSetup({
   updatedByName: string;
 }): Setup {
   return {
-    id: row.id,
-    version: row.version,
-    createdAt: row.createdAt.toISOString(),
-    updatedAt: row.updatedAt.toISOString(),
+    ...storedFields(row),
     name: row.name,
     state: row.state,
     inputs: row.inputs,

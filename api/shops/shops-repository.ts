@@ -5,7 +5,7 @@ import { shops } from '@/db/schema';
 import type { Shop } from '@/shared/contracts/shops';
 
 import { idReused } from '../refusals';
-import type { Lock } from '../stored-items';
+import { storedFields, type Lock } from '../stored-items';
 import { keepingUnique } from '../unique';
 
 type Content = Pick<Shop, 'name' | 'units' | 'timeZone'>;
@@ -50,10 +50,7 @@ export type ShopsRepository = ReturnType<typeof shopsRepository>;
 
 function toShop(row: InferSelectModel<typeof shops>): Shop {
   return {
-    id: row.id,
-    version: row.version,
-    createdAt: row.createdAt.toISOString(),
-    updatedAt: row.updatedAt.toISOString(),
+    ...storedFields(row),
     name: row.name,
     units: row.units,
     timeZone: row.timeZone,

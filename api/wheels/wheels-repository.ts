@@ -7,7 +7,7 @@ import type { WheelData } from '@/shared/domain/wheels';
 
 import { containing, keyOf, pageOf } from '../paging';
 import { taken } from '../refusals';
-import type { Lock } from '../stored-items';
+import { storedFields, type Lock } from '../stored-items';
 import { keepingUnique } from '../unique';
 
 type Content = Omit<CreateWheelRequest, 'id'>;
@@ -19,9 +19,6 @@ export interface WheelSearch {
   limit: number;
 }
 
-/** Tags are unique in a shop in whatever case, so this alone is a page's key. */
-const tagKey = sql<string>`lower(${wheels.tag})`;
-
 export const wheelsRepository = (tx: Transaction, shopId: string) => {
   const one = (id: string) => and(eq(wheels.shopId, shopId), eq(wheels.id, id));
 
@@ -30,20 +27,20 @@ export const wheelsRepository = (tx: Transaction, shopId: string) => {
       const [lastTag] = after === undefined ? [] : keyOf(after, /./);
       const pattern = search ? containing(search) : undefined;
       const rows = await tx
-        .select({ row: wheels, tagKey })
+        .select()
         .from(wheels)
         .where(
           and(
             eq(wheels.shopId, shopId),
-            lastTag === undefined ? undefined : gt(tagKey, lastTag),
+            lastTag === undefined ? undefined : gt(wheels.tagKey, lastTag),
             pattern ? or(ilike(wheels.tag, pattern), ilike(wheels.marking, pattern)) : undefined,
           ),
         )
-        .orderBy(asc(tagKey))
+        .orderBy(asc(wheels.tagKey))
         .limit(limit + 1);
       return pageOf(rows, limit, {
-        item: (found) => toWheel(found.row),
-        key: (found) => [found.tagKey],
+        item: toWheel,
+        key: (row) => [row.tagKey],
       });
     },
 
@@ -106,10 +103,7 @@ function columnsOf({ tag, data: { mounted, ...columns }, typed }: Content) {
 
 function toWheel(row: Row): Wheel {
   return {
-    id: row.id,
-    version: row.version,
-    createdAt: row.createdAt.toISOString(),
-    updatedAt: row.updatedAt.toISOString(),
+    ...storedFields(row),
     tag: row.tag,
     data: {
       marking: row.marking,

@@ -1,5 +1,13 @@
 import { sql, type AnyColumn, type SQL } from 'drizzle-orm';
-import { doublePrecision, integer, pgPolicy, text, timestamp, uuid } from 'drizzle-orm/pg-core';
+import {
+  doublePrecision,
+  integer,
+  jsonb,
+  pgPolicy,
+  text,
+  timestamp,
+  uuid,
+} from 'drizzle-orm/pg-core';
 
 import type { Range } from '@/shared/domain/limits';
 
@@ -16,10 +24,23 @@ export const retiredAt = () => moment('retired_at');
 export const happenedAt = () => moment('at').notNull().defaultNow();
 
 export const shopId = () => uuid('shop_id').notNull();
-export const version = () => integer('version').notNull().default(1);
+/** What is edited counts its edits. */
+export const edits = () => ({
+  version: integer('version').notNull().default(1),
+  createdAt: createdAt(),
+  updatedAt: updatedAt(),
+});
 
-/** Of the request that made the row: tells the same request sent again from another one with its id. */
-export const creationDigest = () => text('creation_digest').notNull();
+/** A thing of a shop that its people make and edit. */
+export const itemOfShop = () => ({
+  shopId: shopId(),
+  id: uuid('id').notNull(),
+  ...edits(),
+  /** What was typed for a field, by its path. */
+  typed: jsonb('typed').$type<Record<string, string>>().notNull(),
+  /** Of the request that made the row: tells the same request sent again from another one with its id. */
+  creationDigest: text('creation_digest').notNull(),
+});
 
 export const measure = (name: string) => doublePrecision(name);
 

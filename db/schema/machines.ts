@@ -5,7 +5,6 @@ import {
   doublePrecision,
   foreignKey,
   integer,
-  jsonb,
   pgTable,
   primaryKey,
   smallint,
@@ -26,28 +25,22 @@ import {
 } from '@/shared/domain/machines';
 
 import {
-  createdAt,
-  creationDigest,
   eachInRange,
   inRange,
+  itemOfShop,
   measure,
   oneOf,
   retiredAt,
   shopId,
   shopPolicy,
   textUpTo,
-  updatedAt,
-  version,
 } from './columns';
 import { shops } from './people';
-
-const typed = () => jsonb('typed').$type<Record<string, string>>().notNull();
 
 export const lathes = pgTable(
   'lathes',
   {
-    shopId: shopId(),
-    id: uuid('id').notNull(),
+    ...itemOfShop(),
     name: text('name').notNull(),
     spindleSpeedsRpm: doublePrecision('spindle_speeds_rpm').array().notNull(),
     feedsMmPerRev: doublePrecision('feeds_mm_per_rev').array().notNull(),
@@ -58,11 +51,6 @@ export const lathes = pgTable(
     compoundDivisionMm: measure('compound_division_mm'),
     compoundTravelMm: measure('compound_travel_mm'),
     spindleNose: text('spindle_nose', { enum: SPINDLE_NOSES }),
-    typed: typed(),
-    creationDigest: creationDigest(),
-    version: version(),
-    createdAt: createdAt(),
-    updatedAt: updatedAt(),
   },
   (t) => [
     primaryKey({ name: 'lathes_pkey', columns: [t.shopId, t.id] }),
@@ -90,8 +78,7 @@ export const lathes = pgTable(
 export const grinders = pgTable(
   'grinders',
   {
-    shopId: shopId(),
-    id: uuid('id').notNull(),
+    ...itemOfShop(),
     name: text('name').notNull(),
     motorNoLoadRpm: measure('motor_no_load_rpm').notNull(),
     motorPowerW: measure('motor_power_w').notNull(),
@@ -99,11 +86,6 @@ export const grinders = pgTable(
     guard: text('guard', { enum: GUARDS }).notNull(),
     postStiffnessNPerMm: measure('post_stiffness_n_per_mm'),
     wheelRotation: text('wheel_rotation', { enum: ROTATIONS }),
-    typed: typed(),
-    creationDigest: creationDigest(),
-    version: version(),
-    createdAt: createdAt(),
-    updatedAt: updatedAt(),
   },
   (t) => [
     primaryKey({ name: 'grinders_pkey', columns: [t.shopId, t.id] }),

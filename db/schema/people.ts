@@ -23,12 +23,12 @@ import {
   createdAt,
   currentPerson,
   currentShop,
+  edits,
   oneOf,
   shopId,
   shopPolicy,
   textUpTo,
   updatedAt,
-  version,
 } from './columns';
 
 /** The application may not read password_hash here: it is granted the other columns only. */
@@ -67,9 +67,7 @@ export const shops = pgTable(
     units: text('units', { enum: UNIT_SYSTEMS }).notNull(),
     timeZone: text('time_zone').notNull(),
     rules: jsonb('rules').$type<ShopRules>().notNull(),
-    version: version(),
-    createdAt: createdAt(),
-    updatedAt: updatedAt(),
+    ...edits(),
   },
   (t) => [
     check('shops_name_length', textUpTo(t.name, TEXT_LIMITS.name)),

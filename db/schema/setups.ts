@@ -21,16 +21,7 @@ import {
   type Verdict,
 } from '@/shared/domain/setups';
 
-import {
-  createdAt,
-  creationDigest,
-  oneOf,
-  shopId,
-  shopPolicy,
-  textUpTo,
-  updatedAt,
-  version,
-} from './columns';
+import { itemOfShop, oneOf, shopPolicy, textUpTo } from './columns';
 import { grinders, lathes, quills } from './machines';
 import { memberships, shops } from './people';
 import { wheels } from './wheels';
@@ -45,13 +36,11 @@ interface PlanRecord {
 export const setups = pgTable(
   'setups',
   {
-    shopId: shopId(),
-    id: uuid('id').notNull(),
+    ...itemOfShop(),
     name: text('name').notNull(),
     operation: text('operation', { enum: OPERATIONS }).notNull(),
     state: text('state', { enum: SETUP_STATES }).notNull().default('draft'),
     inputs: jsonb('inputs').$type<SetupInputs>().notNull(),
-    typed: jsonb('typed').$type<Record<string, string>>().notNull(),
     latheId: uuid('lathe_id'),
     grinderId: uuid('grinder_id'),
     quillId: uuid('quill_id'),
@@ -60,17 +49,15 @@ export const setups = pgTable(
     verdict: text('verdict', { enum: VERDICTS }).notNull(),
     verdictCount: integer('verdict_count').notNull(),
     rulesVersion: text('rules_version').notNull(),
-    /** The shop's date the plan was computed for: expiry is judged against it. */
-    plannedOn: date('planned_on', { mode: 'string' }).notNull(),
+    /** The last of the shop's days on which the plan holds: then its wheel expires. Null: no day ends it. */
+    goodUntil: date('good_until', { mode: 'string' }),
     updatedBy: uuid('updated_by').notNull(),
-    creationDigest: creationDigest(),
-    version: version(),
-    createdAt: createdAt(),
-    updatedAt: updatedAt(),
   },
   (t) => [
     primaryKey({ name: 'setups_pkey', columns: [t.shopId, t.id] }),
-    index('setups_latest').on(t.shopId, t.updatedAt.desc(), t.id.desc()),
+    index('setups_latest').on(t.shopId, t.updatedAt, t.id),
+    index('setups_good_until').on(t.shopId, t.goodUntil),
+    index('setups_rules_version').on(t.shopId, t.rulesVersion),
     index('setups_lathe').on(t.shopId, t.latheId),
     index('setups_grinder').on(t.shopId, t.grinderId),
     index('setups_wheel').on(t.shopId, t.wheelId),

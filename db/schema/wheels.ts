@@ -4,37 +4,27 @@ import {
   check,
   date,
   foreignKey,
-  jsonb,
   pgTable,
   primaryKey,
   text,
   uniqueIndex,
-  uuid,
 } from 'drizzle-orm/pg-core';
 
 import { LIMITS, TEXT_LIMITS } from '@/shared/domain/limits';
 import { LOOK_RESULTS, MARKING_PLACES, RING_RESULTS, WHEEL_STATES } from '@/shared/domain/wheels';
 
-import {
-  createdAt,
-  creationDigest,
-  inRange,
-  measure,
-  oneOf,
-  shopId,
-  shopPolicy,
-  textUpTo,
-  updatedAt,
-  version,
-} from './columns';
+import { inRange, itemOfShop, measure, oneOf, shopPolicy, textUpTo } from './columns';
 import { shops } from './people';
 
 export const wheels = pgTable(
   'wheels',
   {
-    shopId: shopId(),
-    id: uuid('id').notNull(),
+    ...itemOfShop(),
     tag: text('tag').notNull(),
+    /** A column, for under row security an index serves comparisons of columns alone. */
+    tagKey: text('tag_key')
+      .notNull()
+      .generatedAlwaysAs(sql`lower(tag)`),
     marking: text('marking'),
     diameterNewMm: measure('diameter_new_mm').notNull(),
     diameterNowMm: measure('diameter_now_mm').notNull(),
@@ -52,15 +42,10 @@ export const wheels = pgTable(
     expiresOn: date('expires_on', { mode: 'string' }),
     state: text('state', { enum: WHEEL_STATES }).notNull(),
     setAsideReason: text('set_aside_reason'),
-    typed: jsonb('typed').$type<Record<string, string>>().notNull(),
-    creationDigest: creationDigest(),
-    version: version(),
-    createdAt: createdAt(),
-    updatedAt: updatedAt(),
   },
   (t) => [
     primaryKey({ name: 'wheels_pkey', columns: [t.shopId, t.id] }),
-    uniqueIndex('wheels_tag').on(t.shopId, sql`lower(${t.tag})`),
+    uniqueIndex('wheels_tag').on(t.shopId, t.tagKey),
     foreignKey({ name: 'wheels_shop', columns: [t.shopId], foreignColumns: [shops.id] }),
     check('wheels_tag_length', textUpTo(t.tag, TEXT_LIMITS.tag)),
     check('wheels_marking_length', textUpTo(t.marking, TEXT_LIMITS.marking)),

@@ -5,7 +5,7 @@ import { lathes } from '@/db/schema';
 import type { CreateLatheRequest, Lathe } from '@/shared/contracts/machines';
 
 import { taken } from '../refusals';
-import type { Lock } from '../stored-items';
+import { storedFields, type Lock } from '../stored-items';
 import { keepingUnique } from '../unique';
 
 type Content = Omit<CreateLatheRequest, 'id'>;
@@ -73,10 +73,7 @@ const columnsOf = ({ name, data, typed }: Content) => ({ name, ...data, typed })
 
 function toLathe(row: InferSelectModel<typeof lathes>): Lathe {
   return {
-    id: row.id,
-    version: row.version,
-    createdAt: row.createdAt.toISOString(),
-    updatedAt: row.updatedAt.toISOString(),
+    ...storedFields(row),
     name: row.name,
     data: {
       spindleSpeedsRpm: row.spindleSpeedsRpm,

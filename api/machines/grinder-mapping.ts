@@ -4,6 +4,8 @@ import type { beltSteps, grinders, quills } from '@/db/schema';
 import type { CreateGrinderRequest, Grinder } from '@/shared/contracts/machines';
 import type { QuillData } from '@/shared/domain/machines';
 
+import { storedFields } from '../stored-items';
+
 export type GrinderContent = Omit<CreateGrinderRequest, 'id'>;
 type BeltStepRow = InferSelectModel<typeof beltSteps>;
 export type QuillRow = InferSelectModel<typeof quills>;
@@ -46,10 +48,7 @@ export const quillRows = (shopId: string, grinderId: string, content: GrinderCon
 
 export function toGrinder({ grinder, beltSteps: steps, quills: all }: GrinderRows): Grinder {
   return {
-    id: grinder.id,
-    version: grinder.version,
-    createdAt: grinder.createdAt.toISOString(),
-    updatedAt: grinder.updatedAt.toISOString(),
+    ...storedFields(grinder),
     name: grinder.name,
     data: {
       motorNoLoadRpm: grinder.motorNoLoadRpm,
