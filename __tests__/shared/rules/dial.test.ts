@@ -11,6 +11,10 @@ describe('the dial', () => {
     expect(dialOf({ ...LATHE, crossSlideReads: 'radius' })?.divisionMm).toBeCloseTo(0.01, 12);
     expect(dialOf(null)).toBeNull();
   });
+
+  it('is set to half a division by eye', () => {
+    expect(dialOf(LATHE)?.stepMm).toBeCloseTo(0.0025, 12);
+  });
 });
 
 describe('setting an infeed', () => {

@@ -145,6 +145,52 @@ describe('force and spring', () => {
   });
 });
 
+describe('a weak motor', () => {
+  const weak = (cut: object) => {
+    const input = boreInput();
+    const grinder = input.grinder && { ...input.grinder, motorPowerW: 60 };
+    return planSetup(withCut({ ...input, grinder }, cut));
+  };
+
+  it('is not asked for more than its share: the infeed gives way', () => {
+    const plan = weak({});
+    expect(plan.infeed.governedBy).toBe('power');
+    expect(plan.power.power.value).toBeLessThanOrEqual(0.8 * 60 + 1e-9);
+    expect(plan.power.power.value).toBeGreaterThan(0.4 * 60);
+    expect(codes(plan)).not.toContain('power-above-share');
+  });
+
+  it('is a Check where the chosen infeed asks for more', () => {
+    expect(found(weak({ roughInfeedMm: 0.02 }), 'power-above-share')).toMatchObject({
+      level: 'check',
+      figures: { limit: { value: 48 } },
+    });
+  });
+});
+
+describe('a chosen infeed on a slender quill', () => {
+  it('is a Check above the lag aimed at, with both figures', () => {
+    const input = {
+      ...boreInput(),
+      quill: { ...QUILL, segments: [{ lengthMm: 90, diameterMm: 10 }] },
+    };
+    const lag = (roughInfeedMm: number) =>
+      found(planSetup(withCut(input, { roughInfeedMm })), 'lag-above-limit');
+    expect(lag(0.0025)).toBeUndefined();
+    expect(lag(0.025)).toMatchObject({ level: 'check', figures: { limit: { value: 0.015 } } });
+    expect(lag(0.025)?.figures.lag?.value).toBeGreaterThan(0.015);
+  });
+});
+
+describe('a blind bore', () => {
+  it('needs room behind, which a through bore has', () => {
+    const at = (throughBore: boolean) =>
+      codes(planSetup(withWork(boreInput(), { throughBore, clearDepthMm: 2 })));
+    expect(at(true)).toEqual([]);
+    expect(at(false)).toEqual(['no-room-behind']);
+  });
+});
+
 describe('cautions', () => {
   it.each(OPERATIONS)('belong to the operation and leave the verdict alone: %s', (operation) => {
     const { cautions, verdict } = planSetup(GOOD_INPUTS[operation]());

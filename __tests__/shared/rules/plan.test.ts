@@ -146,6 +146,11 @@ describe('needs', () => {
       'wheel.typed.markedRpm',
     ]);
     expect(plan.limits.governing).toBeNull();
+    for (const mark of [{ markedRpm: 24_000 }, { markedSpeedMPerS: 35 }]) {
+      const marked = { ...input, wheel: { wheelId: null, typed: { ...typed, ...mark } } };
+      const { needs } = planSetup(assemblePlanInput(marked, { ...input, wheel: null }));
+      expect(needs.map(({ field }) => field)).not.toContain('wheel.typed.markedRpm');
+    }
     expect(plan.speed.steps.map(({ allowed }) => allowed)).toEqual([null, null, null]);
   });
 

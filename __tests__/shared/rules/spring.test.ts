@@ -1,3 +1,5 @@
+import { evaluate } from 'mathjs';
+
 import { stated } from '@/shared/rules/figures';
 import { planPasses, type ScheduleSpec } from '@/shared/rules/schedule';
 import {
@@ -151,6 +153,14 @@ describe('stiffness at the wheel', () => {
   it('counts bores and jaws as stiff', () => {
     const input = boreInput();
     expect(workStiffness(input.work, surfaceOf(input))).toBe('stiff');
+  });
+
+  it('holds 40 mm of steel, 150 mm between centres, at 368 167 N/mm (48 E I / L³ in mathjs)', () => {
+    const expected = evaluate('48 * 206000 * (pi * 40^4 / 64) / 150^3');
+    const input = outsideInput();
+    expect(workStiffness(input.work, surfaceOf(input))).toMatchObject({
+      value: expect.closeTo(Number(expected), 3),
+    });
   });
 
   it('holds a shaft between centres sixteen times as stiff as out of the chuck', () => {
