@@ -8,6 +8,7 @@ import { createApp } from './app';
 import { auditRepository } from './audit/audit-repository';
 import { auditTrail } from './audit/audit-trail';
 import { accounts } from './auth/accounts';
+import { PASSWORD_COST, passwords, type PasswordCost } from './auth/passwords';
 import { personsRepository } from './auth/persons-repository';
 import { SESSION_TIMES, sessions } from './auth/session';
 import { sessionRoutes } from './auth/session-routes';
@@ -42,6 +43,7 @@ export interface ServerOptions {
   now?: () => Date;
   sessionTimes?: typeof SESSION_TIMES;
   limitPoints?: LimitPoints;
+  passwordCost?: PasswordCost;
 }
 
 const shopRepositories = (tx: Transaction, shopId: string) => ({
@@ -64,8 +66,9 @@ const inShopOf =
       return work({ ...repositories, personId, role: member.role, audit });
     });
 
-const accountsOf = (database: Database) =>
+const accountsOf = (database: Database, cost: PasswordCost) =>
   accounts({
+    passwords: passwords(cost),
     credentialsOf: (email) =>
       database.withNobody((tx) => personsRepository(tx).credentialsOf(email)),
     sessionOf: (personId) =>
@@ -90,7 +93,7 @@ export function composeServer(options: ServerOptions) {
   const inShop = inShopOf(database);
   const recompute = recomputeDrafts(now);
   const services = {
-    accounts: accountsOf(database),
+    accounts: accountsOf(database, options.passwordCost ?? PASSWORD_COST),
     shops: shopsService(inShop, recompute),
     lathes: lathesService({ inShop, recompute }),
     grinders: grindersService({ inShop, recompute }),

@@ -1,5 +1,6 @@
 import { v7 as uuidv7 } from 'uuid';
 
+import { PASSWORD_COST } from '@/api/auth/passwords';
 import { session } from '@/shared/contracts/session';
 
 import {
@@ -26,7 +27,11 @@ describe('a session', () => {
   const email = () => `lead-${shop.ids.lead}@example.test`;
 
   beforeAll(async () => {
-    api = await startApi({ now: () => now, sessionTimes: times });
+    api = await startApi({
+      now: () => now,
+      sessionTimes: times,
+      passwordCost: PASSWORD_COST,
+    });
     shop = await makeShop(api);
   });
   afterAll(() => api.stop());

@@ -1,5 +1,6 @@
 import { v7 as uuidv7 } from 'uuid';
 
+import { PASSWORD_COST } from '@/api/auth/passwords';
 import { session } from '@/shared/contracts/session';
 
 import { auditOf, makeShop, PASSWORD, startApi, visitorOf, type Api } from '../support/api';
@@ -8,7 +9,7 @@ import { problemOf } from '../support/item-tests';
 describe('signing up', () => {
   let api: Api;
   beforeAll(async () => {
-    api = await startApi();
+    api = await startApi({ passwordCost: PASSWORD_COST });
   });
   afterAll(() => api.stop());
 

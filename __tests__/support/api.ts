@@ -20,6 +20,9 @@ const NO_LIMITS = {
   requestsPerPersonPerMinute: FREE,
 };
 
+/** Most tests are not about passwords, and sign in often. */
+const CHEAP = { memoryCost: 1024, timeCost: 1 };
+
 export const PASSWORD = 'four quiet herons wait';
 export const ORIGIN = 'http://ringtrue.test';
 
@@ -34,6 +37,7 @@ export async function startApi(options: Partial<ServerOptions> = {}) {
     sessionSecrets: ['a secret of the tests and of nobody else'],
     logger: pino({ level: process.env.LOG_LEVEL ?? 'silent' }),
     limitPoints: NO_LIMITS,
+    passwordCost: CHEAP,
     ...options,
     database,
   });

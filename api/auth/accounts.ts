@@ -7,7 +7,7 @@ import { invalidField } from '../refusals';
 import type { MembersRepository } from '../shops/members-repository';
 import type { ShopsRepository } from '../shops/shops-repository';
 import { weaknessOf } from './password-policy';
-import { hashPassword, verifyPassword } from './passwords';
+import type { Passwords } from './passwords';
 import { emailTaken, type Credentials, type PersonsRepository } from './persons-repository';
 
 /** What becoming a member writes. */
@@ -19,6 +19,7 @@ export interface JoiningScope {
 }
 
 export interface AccountsContext {
+  passwords: Passwords;
   credentialsOf(email: string): Promise<Credentials | null>;
   sessionOf(personId: string): Promise<Session>;
   /** A transaction in a shop for a person who is not yet a member; either may be new. */
@@ -37,13 +38,18 @@ interface NewMember {
   role: Role;
 }
 
-export const accounts = ({ credentialsOf, sessionOf, withPersonInShop }: AccountsContext) => ({
+export const accounts = ({
+  passwords,
+  credentialsOf,
+  sessionOf,
+  withPersonInShop,
+}: AccountsContext) => ({
   sessionOf,
 
   /** The person's id; null for an unknown address as for a wrong password, after the same time. */
   async recognise({ email, password }: SignInRequest): Promise<string | null> {
     const credentials = await credentialsOf(email);
-    const matches = await verifyPassword(password, credentials?.passwordHash ?? null);
+    const matches = await passwords.verify(password, credentials?.passwordHash ?? null);
     return matches && credentials ? credentials.personId : null;
   },
 
@@ -55,11 +61,11 @@ export const accounts = ({ credentialsOf, sessionOf, withPersonInShop }: Account
     const known = await credentialsOf(email);
     if (known) {
       const isRepeated = known.personId === personId;
-      if (isRepeated && (await verifyPassword(password, known.passwordHash)))
+      if (isRepeated && (await passwords.verify(password, known.passwordHash)))
         return { isNew: false };
       throw emailTaken();
     }
-    const passwordHash = await hashPassword(password);
+    const passwordHash = await passwords.hash(password);
     await withPersonInShop({ personId, shopId }, async ({ persons, shop, members, audit }) => {
       await persons.insert({ id: personId, name, email, passwordHash });
       const made = await shop.insert({
@@ -80,7 +86,7 @@ export const accounts = ({ credentialsOf, sessionOf, withPersonInShop }: Account
   /** Makes a person who belongs to a shop from the start; somebody known by the address stays as they are. */
   async join({ id, name, email, password, shopId, role }: NewMember): Promise<void> {
     if (await credentialsOf(email)) return;
-    const passwordHash = await hashPassword(password);
+    const passwordHash = await passwords.hash(password);
     await withPersonInShop({ personId: id, shopId }, async ({ persons, members, audit }) => {
       await persons.insert({ id, name, email, passwordHash });
       await members.add(id, role);

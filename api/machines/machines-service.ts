@@ -26,7 +26,7 @@ interface MachinesContext {
 }
 
 /** Lathes and grinders alike: what one may do with a machine does not depend on its kind. */
-export function machinesService<T extends Item, Create extends { id: string }, Content>(
+function machinesService<T extends Item, Create extends { id: string }, Content>(
   { subject, repositoryOf, usersOf }: MachineKind<T, Create, Content>,
   { inShop, recompute }: MachinesContext,
 ) {
