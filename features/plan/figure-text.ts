@@ -32,11 +32,11 @@ export const quantityText =
   (quantity: Quantity): string =>
     formatQuantity(quantity, units);
 
-/** Small values, such as a cutting fraction, keep three figures that count. */
+/** In a working, small values keep four figures that count, so that the sum can be followed. */
 function metricDigits(value: number): FormatOptions {
   const size = Math.abs(value);
   if (size === 0 || size >= 1) return {};
-  return { digits: Math.min(9, 2 - Math.floor(Math.log10(size))) };
+  return { digits: Math.min(9, 3 - Math.floor(Math.log10(size))) };
 }
 
 const metric = (value: number, unit: Quantity['unit']) =>
@@ -52,7 +52,6 @@ export function workingProps(figure: Figure, units: UnitSystem, options: FormatO
     units === 'inch' && value !== null && displayUnit(unit, 'inch') !== unit
       ? `, ${formatQuantity({ value, unit }, 'inch')}`
       : '';
-  const shown = figureText(figure, 'mm', options);
   const { title, place, mark } = sourceWords(source);
   return {
     formula,
@@ -63,7 +62,7 @@ export function workingProps(figure: Figure, units: UnitSystem, options: FormatO
       unit: ENTRY_UNITS[term.unit].label,
       ...(term.assumed ? { assumed: true } : {}),
     })),
-    result: figure.value === null ? null : `${shown}${own(figure.value, figure.unit)}`,
+    result: figure.value === null ? null : `${exact(figure)}${shownAs(figure, units, options)}`,
     ...(figure.band
       ? {
           band: `The range of the values behind it gives ${formatQuantity(
@@ -77,6 +76,18 @@ export function workingProps(figure: Figure, units: UnitSystem, options: FormatO
     source: [title, place].filter(Boolean).join(', '),
     mark,
   };
+}
+
+const exact = ({ value, unit }: Figure) =>
+  formatQuantity({ value: value ?? NaN, unit }, 'mm', metricDigits(value ?? 1));
+
+/** How the plan shows the result, where that is not the same: in inches, or rounded to the side that counts. */
+function shownAs(figure: Figure, units: UnitSystem, options: FormatOptions): string {
+  const shown = figureText(figure, units, options);
+  if (shown === exact(figure)) return '';
+  const way =
+    options.rounding && options.rounding !== 'nearest' ? ` rounded ${options.rounding}` : '';
+  return `, shown${way} as ${shown}`;
 }
 
 export function sourceWords(id: SourceId): { title: string; place: string; mark: string } {

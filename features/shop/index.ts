@@ -1,1 +1,2 @@
-export { RailSwitch } from './components/rail-switch';
+export { ShopFrame } from './components/shop-frame';
+export { shopPlaces } from './places';

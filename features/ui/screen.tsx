@@ -8,6 +8,10 @@ import { IconButton } from './button';
 import { Small, Title } from './text';
 import { colors, measure, space } from './tokens';
 import { useLayout } from './use-layout';
+import { web } from './web';
+
+/** A page of words alone must be reached by the keyboard to be scrolled by it. */
+const scrolledByKeys = web({ tabIndex: 0 });
 
 interface ScreenProps {
   /** Name of the screen; also of the browser's tab. */
@@ -75,16 +79,20 @@ export function Screen({
       </View>
       {both ? (
         <View role="main" style={styles.panes}>
-          <ScrollView style={styles.first} contentContainerStyle={content}>
+          <ScrollView style={styles.first} contentContainerStyle={content} {...scrolledByKeys}>
             {children}
           </ScrollView>
-          <ScrollView style={styles.second} contentContainerStyle={styles.content}>
+          <ScrollView
+            style={styles.second}
+            contentContainerStyle={styles.content}
+            {...scrolledByKeys}
+          >
             {pane}
           </ScrollView>
         </View>
       ) : (
         <View role="main" style={styles.scroll}>
-          <ScrollView contentContainerStyle={content}>
+          <ScrollView contentContainerStyle={content} {...scrolledByKeys}>
             {children}
             {pane}
           </ScrollView>

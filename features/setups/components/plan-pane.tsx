@@ -62,7 +62,10 @@ export function PlanPane({ onPart }: { onPart: (part: SetupPart) => void }) {
       <Fold label="Order of the work" value="from survey to the last measurement">
         <OrderOfWork />
       </Fold>
-      <Fold label="Cautions for this plan" value={`${plan.cautions.length}`} startOpen>
+      <Fold
+        label="Cautions for this plan"
+        value={`${plan.cautions.length} to read before starting`}
+      >
         <CautionList />
       </Fold>
     </Stack>

@@ -80,6 +80,7 @@ const styles = StyleSheet.create({
     alignItems: 'center',
     gap: space[2],
     paddingHorizontal: space[1],
+    paddingTop: space[1],
     minHeight: target.base,
   },
   name: { flex: 1, minWidth: 0 },
