@@ -4,6 +4,8 @@ import path from 'node:path';
 
 import express, { Router } from 'express';
 
+import { unknownPath } from './error-handler';
+
 const PAGE = 'index.html';
 
 /** Their files carry a hash of the content in their names. */
@@ -16,7 +18,7 @@ export function webPages(root: string): Router {
     router.use(
       `/${folder}`,
       express.static(path.join(root, folder), { immutable: true, maxAge: '1y', index: false }),
-      (_req, res) => res.sendStatus(404),
+      unknownPath,
     );
   router.use(express.static(root, { index: false, redirect: false, setHeaders: revalidated }));
   router.get('/{*page}', (req, res, next) => {
