@@ -24,7 +24,7 @@ export function readDraft<Values>(
   return { values, version: typeof version === 'number' ? version : null };
 }
 
-export const writeDraft = <Values>(key: string, draft: LocalDraft<Values>): boolean =>
+const writeDraft = <Values>(key: string, draft: LocalDraft<Values>): boolean =>
   writeStored(key, draft);
 
 export const removeDraft = removeStored;

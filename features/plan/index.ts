@@ -1,4 +1,4 @@
-export { figureNumber, figureText, figureUnit, quantityText, sourceWords } from './figure-text';
+export { figureNumber, figureText, sourceWords } from './figure-text';
 export { FigureReadout, FigureRow } from './figure-readout';
 export { FindingList } from './finding-list';
 export { PlanReader, useReader } from './reader';

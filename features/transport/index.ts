@@ -1,5 +1,5 @@
 export { newId } from './ids';
-export { isRefusal, ProblemError, problemOf, problemWords, type Problem } from './problem';
+export { isRefusal, problemOf, problemWords, type Problem } from './problem';
 export { createQueryClient } from './query-client';
 export { request, requestNothing } from './request';
 export { STALE } from './stale';

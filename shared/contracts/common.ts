@@ -8,7 +8,7 @@ export const name = z.string().trim().min(1).max(TEXT_LIMITS.name);
 export const isoDate = z.iso
   .date()
   .refine((date) => date >= '1900-01-01' && date <= '2199-12-31', 'A date from 1900 to 2199.');
-export const isoTime = z.iso.datetime({ offset: true });
+const isoTime = z.iso.datetime({ offset: true });
 
 /** A finite number within one of the ranges of shared/domain/limits. */
 export const within = (range: Range) => z.number().min(range.min).max(range.max);

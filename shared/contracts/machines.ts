@@ -39,7 +39,7 @@ const latheFields = {
   spindleNose: z.enum(SPINDLE_NOSES).nullable(),
 };
 
-export const latheData = z.strictObject(latheFields) satisfies z.ZodType<LatheData>;
+const latheData = z.strictObject(latheFields) satisfies z.ZodType<LatheData>;
 
 /** No two with the same id, or the same name in whatever case. */
 const distinct = (items: readonly { id: string; name: string }[], context: z.RefinementCtx) => {
@@ -83,7 +83,7 @@ const grinderFields = {
   wheelRotation: z.enum(ROTATIONS).nullable(),
 };
 
-export const grinderData = z.strictObject(grinderFields) satisfies z.ZodType<GrinderData>;
+const grinderData = z.strictObject(grinderFields) satisfies z.ZodType<GrinderData>;
 
 const quillFields = {
   segments: z
@@ -103,7 +103,7 @@ const quillFields = {
   measuredFrequencyHz: within(LIMITS.frequencyHz).nullable(),
 };
 
-export const quillData = z.strictObject(quillFields) satisfies z.ZodType<QuillData>;
+const quillData = z.strictObject(quillFields) satisfies z.ZodType<QuillData>;
 
 /** What was typed for a field, by its path, so that reopening shows it as it was. */
 export const typedTexts = z.record(z.string().max(80), z.string().max(TEXT_LIMITS.typed));

@@ -20,7 +20,7 @@ const maybe = (range: { min: number; max: number }) => within(range).nullable();
 const whole = (range: { min: number; max: number }) =>
   z.int().min(range.min).max(range.max).nullable();
 
-export const setupInputs = z.strictObject({
+const setupInputs = z.strictObject({
   operation: z.enum(OPERATIONS),
   work: z.strictObject({
     material: z.enum(MATERIALS).nullable(),

@@ -6,7 +6,7 @@ import { expectedVersion, name, stored, timeZone } from './common';
 
 const ruleNames = Object.keys(DEFAULT_SHOP_RULES) as (keyof ShopRules)[];
 
-export const shopRules = z.strictObject(
+const shopRules = z.strictObject(
   Object.fromEntries(ruleNames.map((key) => [key, z.number().positive()])) as Record<
     keyof ShopRules,
     z.ZodNumber

@@ -56,7 +56,7 @@ const coherent = (wheel: WheelData, context: z.RefinementCtx) => {
     });
 };
 
-export const coherentWheelData = wheelData.superRefine(coherent);
+const coherentWheelData = wheelData.superRefine(coherent);
 
 const tag = z.string().trim().min(1).max(TEXT_LIMITS.tag);
 const body = { tag, data: coherentWheelData, typed: typedTexts };
@@ -72,7 +72,5 @@ export const wheelQuery = z.strictObject({
 });
 
 export type Wheel = z.infer<typeof wheel>;
-export type WheelPage = z.infer<typeof wheelPage>;
-export type WheelQuery = z.input<typeof wheelQuery>;
 export type CreateWheelRequest = z.infer<typeof createWheelRequest>;
 export type UpdateWheelRequest = z.infer<typeof updateWheelRequest>;
