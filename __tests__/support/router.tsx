@@ -19,7 +19,7 @@ export function addressOf(href: Href): string {
   const query = new URLSearchParams(
     Object.entries(rest).filter((part): part is [string, string] => Boolean(part[1])),
   );
-  return query.size > 0 ? `${path}?${query}` : path;
+  return String(query) === '' ? path : `${path}?${query}`;
 }
 
 const visit = (href: Href) => visits.push(addressOf(href));

@@ -85,9 +85,8 @@ it('says what is missing, leads to the field, and sends nothing', async () => {
   expect(writes(log)).toEqual([]);
 });
 
-it('shows the limit while the wheel is typed in, from the diameter when new', async () => {
+it('shows the limit while the wheel is typed in, from the diameter when new', () => {
   serve(storing);
-  const user = userEvent.setup();
   showInShop(<WheelForm wheel={null} backTo={backTo} />);
   fillNew();
   // 60 000 x 25 / (pi x 31.75) = 15 038.7, rounded down (29 CFR 1910.215(d)(1)).
