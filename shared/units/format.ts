@@ -53,7 +53,7 @@ export function formatQuantity(
   const plain = rounded(shown, digits, options.rounding ?? 'nearest').toFixed(digits);
   const text = signed(grouped(options.fixed ? plain : withoutTrailingZeros(plain)));
   if (options.withUnit === false || label === '') return text;
-  return text + (label === '°' ? '' : NO_BREAK_SPACE) + label;
+  return text + (label === '°' ? '' : NO_BREAK_SPACE) + (text === '1' ? singular(label) : label);
 }
 
 /**
@@ -78,6 +78,9 @@ export function entryText(value: number, unit: UnitName, system: UnitSystem): st
   }
   return shown.toFixed(MOST_DECIMALS);
 }
+
+/** The one unit whose name counts: "1 pass", "2 passes". */
+const singular = (label: string) => (label === 'passes' ? 'pass' : label);
 
 function rounded(value: number, digits: number, rounding: Rounding): number {
   const scale = 10 ** digits;

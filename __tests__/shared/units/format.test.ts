@@ -134,4 +134,9 @@ describe('the text of a stored value', () => {
       { numRuns: 200 },
     );
   });
+
+  it('counts one pass as a pass', () => {
+    expect(formatQuantity({ value: 1, unit: 'passes' }, 'mm')).toBe('1\u00a0pass');
+    expect(formatQuantity({ value: 2, unit: 'passes' }, 'inch')).toBe('2\u00a0passes');
+  });
 });

@@ -35,8 +35,8 @@ export function CutPart() {
   return (
     <Stack>
       <QuantityRow>
-        <PlannerQuantity path="cut.roughInfeedMm" suggested={infeed.rough} />
-        <PlannerQuantity path="cut.finishInfeedMm" suggested={infeed.finish} />
+        <PlannerQuantity path="cut.roughInfeedMm" suggested={infeed.rough} places={4} />
+        <PlannerQuantity path="cut.finishInfeedMm" suggested={infeed.finish} places={4} />
       </QuantityRow>
       {infeed.governedBy ? (
         <Small>{`Rough infeed: ${GOVERNOR_WORDS[infeed.governedBy]}.`}</Small>
