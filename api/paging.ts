@@ -7,11 +7,11 @@ const cursorOf = (...key: string[]): string =>
 /**
  * The sort key in a cursor.
  *
- * @param shape - one pattern for each part of the key
+ * @param shape - what each part of the key must be
  */
-export function keyOf(cursor: string, ...shape: RegExp[]): string[] {
+export function keyOf(cursor: string, ...shape: ((part: string) => boolean)[]): string[] {
   const parts = decode(cursor);
-  if (parts.length !== shape.length || !shape.every((part, index) => part.test(parts[index] ?? '')))
+  if (parts.length !== shape.length || !shape.every((fits, index) => fits(parts[index] ?? '')))
     throw new Refusal('invalid-query', {
       errors: [{ path: 'after', message: 'This is not the place where a page ended.' }],
     });
@@ -26,6 +26,13 @@ function decode(cursor: string): string[] {
     return [];
   }
 }
+
+/** Text as the database can hold it. */
+export const isText = (part: string): boolean => part !== '' && !part.includes('\0');
+
+/** A time as cursors carry it. */
+export const isTime = (part: string): boolean =>
+  !Number.isNaN(Date.parse(part)) && new Date(part).toISOString() === part;
 
 /** Of one row more than the page holds: the page, and where the next one starts. */
 export function pageOf<Row, Item>(

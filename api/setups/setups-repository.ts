@@ -1,11 +1,13 @@
 import { and, asc, desc, eq, gt, ilike, lt, or, sql, type SQL } from 'drizzle-orm';
 
+import { validate as isUuid } from 'uuid';
+
 import type { Transaction } from '@/db/client';
 import { persons, setups } from '@/db/schema';
 import type { Setup, SetupPage } from '@/shared/contracts/setups';
 import type { Operation, SetupInputs, SetupState, Verdict } from '@/shared/domain/setups';
 
-import { containing, keyOf, pageOf } from '../paging';
+import { containing, isTime, keyOf, pageOf } from '../paging';
 import { storedFields, type Lock } from '../stored-items';
 
 /** A plan as it is stored beside the inputs it was made from. */
@@ -45,9 +47,6 @@ export interface Draft {
   verdict: Verdict;
 }
 
-const TIME = /^\d{4}-\d\d-\d\dT[\d:.]+Z$/;
-const ID = /^[\da-f-]{36}$/;
-
 export const setupsRepository = (tx: Transaction, shopId: string) => {
   const one = (id: string) => and(eq(setups.shopId, shopId), eq(setups.id, id));
 
@@ -81,7 +80,7 @@ export const setupsRepository = (tx: Transaction, shopId: string) => {
     find,
 
     async list({ search, operation, state, after, limit }: SetupSearch): Promise<SetupPage> {
-      const [time, id] = after === undefined ? [] : keyOf(after, TIME, ID);
+      const [time, id] = after === undefined ? [] : keyOf(after, isTime, isUuid);
       const rows = await tx
         .select({ ...summary, updatedByName: persons.name })
         .from(setups)

@@ -5,7 +5,7 @@ import { wheels } from '@/db/schema';
 import type { CreateWheelRequest, Wheel } from '@/shared/contracts/wheels';
 import type { WheelData } from '@/shared/domain/wheels';
 
-import { containing, keyOf, pageOf } from '../paging';
+import { containing, isText, keyOf, pageOf } from '../paging';
 import { taken } from '../refusals';
 import { storedFields, type Lock } from '../stored-items';
 import { keepingUnique } from '../unique';
@@ -24,7 +24,7 @@ export const wheelsRepository = (tx: Transaction, shopId: string) => {
 
   return {
     async list({ search, after, limit }: WheelSearch) {
-      const [lastTag] = after === undefined ? [] : keyOf(after, /./);
+      const [lastTag] = after === undefined ? [] : keyOf(after, isText);
       const pattern = search ? containing(search) : undefined;
       const rows = await tx
         .select()
