@@ -79,14 +79,14 @@ async function script(launcher, name) {
   return { passed: code === 0 ? 1 : 0, failed: code === 0 ? 0 : 1 };
 }
 
-async function jest(launcher, { projects, patterns = [], env }) {
+async function jest(launcher, { projects, patterns = [], options = [], env }) {
   const report = path.join(LOCAL, 'logs', `jest-${projects.join('-')}.json`);
   fs.mkdirSync(path.dirname(report), { recursive: true });
   fs.rmSync(report, { force: true });
   const program = [process.execPath, path.join(ROOT, 'node_modules/jest/bin/jest.js')];
   const output = ['--json', '--outputFile', report];
   const { ended } = launcher.start(
-    [...program, '--selectProjects', ...projects, ...output, '--', ...patterns],
+    [...program, '--selectProjects', ...projects, ...options, ...output, '--', ...patterns],
     // Reports go to stderr while the JSON is written; both belong to one stream of words here.
     { env, stdio: ['ignore', 1, 1] },
   );
@@ -112,6 +112,8 @@ async function browser(launcher, patterns) {
   const result = await jest(launcher, {
     projects: ['browser'],
     patterns,
+    // A browser and a server keep two cores busy; two browsers would wait for each other.
+    options: ['--runInBand'],
     env: { BASE_URL: server.address, SIGN_INS: JSON.stringify(signIns) },
   });
   await server.stop();
