@@ -1,4 +1,4 @@
-import { useCallback, useEffect, useRef } from 'react';
+import { useCallback, useEffect, useRef, useState } from 'react';
 
 import { readStored, removeStored, writeStored } from '@/features/transport';
 
@@ -29,6 +29,13 @@ const writeDraft = <Values>(key: string, draft: LocalDraft<Values>): boolean =>
 
 export const removeDraft = removeStored;
 
+interface KeptDraft {
+  /** Takes the draft off the device, for good. */
+  forget: () => void;
+  /** False until something is written, and where the browser refuses to keep it. */
+  kept: boolean;
+}
+
 /**
  * Keeps a form's values on the device while they are typed, until `keep` turns false or the draft is removed.
  * Written on each change: a tab may be closed at any keystroke.
@@ -37,14 +44,15 @@ export function useLocalDraft<Values>(
   key: string,
   draft: LocalDraft<Values>,
   keep: boolean,
-): { forget: () => void } {
+): KeptDraft {
   const forgotten = useRef(false);
+  const [kept, setKept] = useState(false);
   useEffect(() => {
-    if (keep && !forgotten.current) writeDraft(key, draft);
+    if (keep && !forgotten.current) setKept(writeDraft(key, draft));
   }, [key, draft, keep]);
   const forget = useCallback(() => {
     forgotten.current = true;
     removeDraft(key);
   }, [key]);
-  return { forget };
+  return { forget, kept };
 }

@@ -70,7 +70,7 @@ const grinderField = (name: GrinderField): Part<GrinderValues> =>
 const length = (entry: TypedEntry, units: UnitSystem) =>
   quantityWords(entry, { unit: 'mm' }, units);
 
-export function stepWords(step: StepValues, units: UnitSystem): string {
+function stepWords(step: StepValues, units: UnitSystem): string {
   const { drivingPulleyMm, drivenPulleyMm, beltThicknessMm, measured } = step;
   const pulleys = `${length(drivingPulleyMm, units)} to ${length(drivenPulleyMm, units)}`;
   const belt = `belt ${length(beltThicknessMm, units)}`;
@@ -81,7 +81,7 @@ export function stepWords(step: StepValues, units: UnitSystem): string {
   return `${pulleys}, ${belt}, measured ${rpm} (${how})`;
 }
 
-export function quillWords(quill: QuillValues, units: UnitSystem): string {
+function quillWords(quill: QuillValues, units: UnitSystem): string {
   const sections = quill.segments
     .map(({ lengthMm, diameterMm }) => `${length(diameterMm, units)} × ${length(lengthMm, units)}`)
     .join(', then ');

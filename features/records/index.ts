@@ -5,7 +5,7 @@ export { FormFold } from './form-fold';
 export { LinkRow } from './link-row';
 export { LoadProblem, MorePages } from './more-pages';
 export { Facts, keyPart, NOT_GIVEN, rowParts, type Part } from './parts';
-export { RecordForm, type RecordValues, type Stored } from './record-form';
+export { RecordForm, type RecordValues } from './record-form';
 export { dayWords, shopDay, whenWords } from './shop-time';
 export {
   collectTexts,

@@ -29,9 +29,8 @@ import { useLayout } from '@/features/ui/use-layout';
 import type { UnitSystem } from '@/shared/domain/people';
 
 import { ConflictSheet } from './conflict-sheet';
-import { DraftKeeper, type Keeper } from './draft-keeper';
 import type { Part } from './parts';
-import { SaveStrip } from './save-strip';
+import { SaveStrip, type Keeper } from './save-strip';
 
 export interface RecordValues {
   /** Made with the form, so that sending a new record twice makes one. */
@@ -207,7 +206,10 @@ function KeptForm<Values extends RecordValues & FormikValues, Item>({
             <SaveStrip
               label={`Save the ${props.noun}`}
               busy={isSubmitting}
-              kept={dirty || draft !== null}
+              draftKey={key}
+              draft={{ values, version }}
+              changed={dirty || draft !== null}
+              keeper={keeper}
               onSave={() => {
                 refused.current = null;
                 void submitForm();
@@ -215,12 +217,6 @@ function KeptForm<Values extends RecordValues & FormikValues, Item>({
             />
           }
         >
-          <DraftKeeper
-            handle={keeper}
-            draftKey={key}
-            draft={{ values, version }}
-            keep={dirty || draft !== null}
-          />
           {draft ? (
             <Notice action={<Button label="Discard them" kind="quiet" onPress={onDiscard} />}>
               Your entries from before, kept on this device and not saved yet.

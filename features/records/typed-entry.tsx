@@ -42,7 +42,7 @@ interface EntryRule {
 }
 
 /** The yup rule of one entry, in the words of every other quantity field. */
-export function entryRule({ spec, units, required = false }: EntryRule) {
+function entryRule({ spec, units, required = false }: EntryRule) {
   const words = quantityText({ spec, system: units, required });
   return yup.mixed<TypedEntry>().test('entry', (entry, context) => {
     if (!entry || entry.si !== null) return true;

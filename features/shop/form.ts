@@ -38,7 +38,7 @@ export const shopSchema = () =>
     timeZone: yup.string().required('Choose a time zone.'),
   });
 
-export const zoneWords = (zone: string) => zone.replaceAll('_', ' ').replaceAll('/', ', ');
+const zoneWords = (zone: string) => zone.replaceAll('_', ' ').replaceAll('/', ', ');
 
 export const shopParts: Part<ShopValues>[] = [
   keyPart('name', 'Name', (name) => name.trim() || '–'),

@@ -241,3 +241,17 @@ it('keeps the drafts of one person and one wheel apart from all others', async (
     `ringtrue:draft:${PERSON_ID}:${SHOP_ID}:wheel:${wheel.id}`,
   ]);
 });
+
+it('never says that the device keeps what the browser refuses to keep', () => {
+  serve(storing);
+  const refusing = jest.spyOn(Storage.prototype, 'setItem').mockImplementation(() => {
+    throw new DOMException('full', 'QuotaExceededError');
+  });
+  showInShop(<WheelForm wheel={null} backTo={backTo} />);
+  fill('Tag', 'R-15');
+  expect(screen.getByText(/keeps nothing: save before you leave/)).toBeInTheDocument();
+  expect(screen.queryByText(/Kept on this device/)).toBeNull();
+  refusing.mockRestore();
+  fill('Tag', 'R-16');
+  expect(screen.getByText(/Kept on this device/)).toBeInTheDocument();
+});

@@ -38,10 +38,10 @@ export function LatheFields() {
       />
       <Heading>Speeds and feeds</Heading>
       <Row align="flex-start">
-        <Cell>
+        <Cell least={220}>
           <Numbers name="spindleSpeedsRpm" />
         </Cell>
-        <Cell>
+        <Cell least={220}>
           <Numbers name="feedsMmPerRev" />
         </Cell>
       </Row>
