@@ -12,7 +12,11 @@ beforeAll(async () => {
 afterAll(() => browser.close());
 
 const SIZES: Size[] = ['phone', 'wide'];
-const ROLES: Role[] = ['lead', 'machinist', 'apprentice'];
+/** What roles hide is the same on both sizes: the wide screen is looked at as the lead alone. */
+const ROLES: Record<Size, Role[]> = {
+  phone: ['lead', 'machinist', 'apprentice'],
+  wide: ['lead'],
+};
 
 /** Below the shop's address. */
 const SCREENS: Record<string, string> = {
@@ -41,7 +45,7 @@ describe.each(SIZES)('on a %s screen', (size) => {
     await context.close();
   });
 
-  it.each(ROLES)('every screen is clean to the %s, and fits 320 px', async (role) => {
+  it.each(ROLES[size])('every screen is clean to the %s, and fits 320 px', async (role) => {
     const { context, page, complaints } = await openVisitor(browser, size);
     await page.goto('/sign-in');
     await signIn(page, role);
@@ -61,23 +65,23 @@ describe.each(SIZES)('on a %s screen', (size) => {
         ]),
       ),
     };
+    const faults: string[] = [];
     for (const [name, path] of Object.entries(screens)) {
       await page.goto(`${served().baseUrl}${shop}${path}`);
       await page.getByRole('heading').first().waitFor();
-      await page.waitForLoadState('networkidle');
-      expect({ name, found: await inspect(page, `${name}-${role}-${size}`) }).toEqual({
-        name,
-        found: [],
-      });
+      await page.waitForFunction(() => !document.querySelector('[aria-busy="true"]'));
+      const found = await inspect(page, `${name}-${role}-${size}`);
+      faults.push(...found.map((fault) => `${name}: ${fault}`));
       if (size === 'phone') {
         await page.setViewportSize({ width: 320, height: 700 });
         const sideways = await page.evaluate(
           () => document.documentElement.scrollWidth > window.innerWidth,
         );
-        expect({ name, sideways }).toEqual({ name, sideways: false });
+        if (sideways) faults.push(`${name}: scrolls sideways at 320 px`);
         await page.setViewportSize({ width: 390, height: 844 });
       }
     }
+    expect(faults).toEqual([]);
     expect(complaints).toEqual([]);
     await context.close();
   });
