@@ -12,6 +12,9 @@ const SERVER_ACCOUNT = 'postgres';
 const SUPERUSER = 'postgres';
 const TRIES = 3;
 
+/** Whatever root's umask is, the server's account must get through. */
+const PASSABLE = 0o755;
+
 // Only ever for clusters that are thrown away: a power cut would ruin them.
 const CARELESS = ['fsync=off', 'synchronous_commit=off', 'full_page_writes=off'];
 
@@ -67,7 +70,9 @@ export class Cluster {
   }
 
   #create() {
-    fs.mkdirSync(path.dirname(this.folder), { recursive: true });
+    const parent = path.dirname(this.folder);
+    fs.mkdirSync(parent, { recursive: true });
+    if (this.account) fs.chmodSync(parent, PASSABLE);
     fs.mkdirSync(this.folder, { recursive: true, mode: 0o700 });
     this.#giveToServer(this.folder);
     const half = `${this.data}.half`;
@@ -140,11 +145,12 @@ export function clusterHome(local, account = isRoot ? serverAccount() : null) {
   if (spawnSync('runuser', reach, { cwd: '/' }).status === 0) return local;
   const mark = createHash('sha256').update(local).digest('hex').slice(0, 12);
   const elsewhere = `/var/tmp/ringtrue-${mark}`;
-  fs.mkdirSync(elsewhere, { recursive: true, mode: 0o755 });
+  fs.mkdirSync(elsewhere, { recursive: true });
   const found = fs.lstatSync(elsewhere);
   if (!found.isDirectory() || found.uid !== 0) {
     throw new Trouble(`${elsewhere} is in the way: it is not root's folder. Remove it.`);
   }
+  fs.chmodSync(elsewhere, PASSABLE);
   return elsewhere;
 }
 
