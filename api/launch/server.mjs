@@ -67,7 +67,7 @@ export async function requireFreePort(port, command) {
   });
   if (free) return;
   throw new Trouble(
-    `Port ${port} is taken by another program. Choose another one: PORT=${port + 100} ${command}`,
+    `Port ${port} is taken by another program. Choose another one: PORT=${port < 65_000 ? port + 100 : port - 100} ${command}`,
   );
 }
 
