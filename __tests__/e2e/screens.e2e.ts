@@ -1,4 +1,4 @@
-import type { Browser } from 'playwright-core';
+import type { Browser, Page } from 'playwright-core';
 
 import { inspect, launchBrowser, openVisitor, served, type Size } from '../support/browser';
 import { signIn, type Role } from './planner-page';
@@ -34,11 +34,17 @@ const FORMS: Record<string, string> = {
   'new-grinder': '/machines/grinders/new',
 };
 
+/** The screen itself stands there: not the painted shell, not the bars that hold its place. */
+async function settled(page: Page) {
+  await page.getByRole('main').filter({ visible: true }).first().waitFor();
+  await page.waitForFunction(() => !document.querySelector('[aria-busy="true"]'));
+}
+
 describe.each(SIZES)('on a %s screen', (size) => {
   it.each(['/', '/sign-in', '/sign-up', '/nowhere'])('%s is clean to a visitor', async (path) => {
     const { context, page, complaints } = await openVisitor(browser, size);
     await page.goto(path);
-    await page.getByRole('heading').first().waitFor();
+    await settled(page);
     const name = path === '/' ? 'home' : path.slice(1);
     expect(await inspect(page, `${name}-${size}`)).toEqual([]);
     expect(complaints).toEqual([]);
@@ -68,8 +74,7 @@ describe.each(SIZES)('on a %s screen', (size) => {
     const faults: string[] = [];
     for (const [name, path] of Object.entries(screens)) {
       await page.goto(`${served().baseUrl}${shop}${path}`);
-      await page.getByRole('heading').first().waitFor();
-      await page.waitForFunction(() => !document.querySelector('[aria-busy="true"]'));
+      await settled(page);
       const found = await inspect(page, `${name}-${role}-${size}`);
       faults.push(...found.map((fault) => `${name}: ${fault}`));
       if (size === 'phone') {

@@ -30,7 +30,12 @@ export function figureText(figure: Figure, units: UnitSystem, options: FormatOpt
 export const quantityText =
   (units: UnitSystem) =>
   (quantity: Quantity): string =>
-    formatQuantity(quantity, units);
+    formatQuantity(quantity, units, quantity.unit === '1' ? ratioDigits(quantity.value) : {});
+
+/** Ratios deserve no more figures than the speeds they come from. */
+const ratioDigits = (value: number): FormatOptions => ({
+  digits: Math.abs(value) >= 10 ? 0 : Math.abs(value) >= 1 ? 1 : 3,
+});
 
 /** In a working, small values keep four figures that count, so that the sum can be followed. */
 function metricDigits(value: number): FormatOptions {
