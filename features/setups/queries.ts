@@ -22,9 +22,10 @@ export type SetupFilter = Pick<SetupQuery, 'search' | 'operation' | 'state'>;
 export const setupQueries = {
   /** Every page of every search below this key. */
   all: (shopId: string) => ['setups', shopId] as const,
+  lists: (shopId: string) => [...setupQueries.all(shopId), 'list'] as const,
   list: (shopId: string, filter: SetupFilter) =>
     infiniteQueryOptions({
-      queryKey: [...setupQueries.all(shopId), 'list', filter],
+      queryKey: [...setupQueries.lists(shopId), filter],
       queryFn: ({ signal, pageParam }) => {
         const given = Object.entries({ ...filter, after: pageParam }).filter(([, value]) => value);
         return request(
@@ -57,7 +58,7 @@ export function useSaveSetup(shopId: string) {
         : request(setup, at(shopId), { method: 'POST', body: save.body }),
     onSuccess: (saved) => {
       client.setQueryData(setupQueries.detail(shopId, saved.id).queryKey, saved);
-      return client.invalidateQueries({ queryKey: [...setupQueries.all(shopId), 'list'] });
+      return client.invalidateQueries({ queryKey: setupQueries.lists(shopId) });
     },
   });
 }

@@ -47,7 +47,8 @@ export function useAutosave(options: AutosaveOptions) {
   const [state, setState] = useState(() => firstState(options));
   const [version, setVersion] = useState(options.version);
   /** The values that the server holds; Formik makes new objects at each change. */
-  const stored = useRef(options.unsent ? null : values);
+  const [stored, setStored] = useState(options.unsent ? null : values);
+  const unsent = valid && !isStored(stored, values);
   const inFlight = useRef(false);
 
   const send = useCallback(async () => {
@@ -60,7 +61,7 @@ export function useAutosave(options: AutosaveOptions) {
         id: setupId,
         body: version === null ? { id: setupId, ...body } : { version, ...body },
       });
-      stored.current = values;
+      setStored(values);
       setVersion(saved.version);
       setState({ kind: 'saved', at: saved.updatedAt });
     } catch (error) {
@@ -74,17 +75,10 @@ export function useAutosave(options: AutosaveOptions) {
   }, [mutateAsync, setupId, values, version]);
 
   useEffect(() => {
-    if (
-      isStored(stored.current, values) ||
-      !valid ||
-      state.kind === 'conflict' ||
-      state.kind === 'saving'
-    )
-      return;
-    if (state.kind === 'saved') setState({ kind: 'waiting' });
+    if (!unsent || state.kind === 'conflict' || state.kind === 'saving') return;
     const timer = setTimeout(() => void send(), state.kind === 'failed' ? RETRY_MS : PAUSE_MS);
     return () => clearTimeout(timer);
-  }, [values, valid, state.kind, send]);
+  }, [unsent, state.kind, send]);
 
   /** After a conflict: the person's values go on top of the server's version. */
   const keepMine = useCallback((theirs: Setup) => {
@@ -94,12 +88,13 @@ export function useAutosave(options: AutosaveOptions) {
 
   /** After a conflict: the server's values replace the person's. */
   const take = useCallback((theirs: Setup, taken: SetupValues) => {
-    stored.current = taken;
+    setStored(taken);
     setVersion(theirs.version);
     setState({ kind: 'saved', at: theirs.updatedAt });
   }, []);
 
-  return { state, version, saveNow: send, keepMine, take };
+  const shown: SaveState = unsent && state.kind === 'saved' ? { kind: 'waiting' } : state;
+  return { state: shown, version, saveNow: send, keepMine, take };
 }
 
 /** Shown in other units, the same inputs need no saving. */

@@ -168,7 +168,7 @@ function Soundness() {
             />
           </>
         ) : (
-          <Small>From the wheel's record on the Rack.</Small>
+          <Small>From the wheel’s record on the Rack.</Small>
         )}
         <Small>
           Tap gently about 45 degrees to each side of the top, an inch or two from the edge; turn
