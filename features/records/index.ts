@@ -1,6 +1,7 @@
 export { SearchField, useAddressPart } from './address-search';
 export { ChoiceField, knownOrNull, UNKNOWN } from './choice-field';
 export { DateField, dateText, readDate } from './date-field';
+export { FieldRow } from './field-row';
 export { FormFold } from './form-fold';
 export { LinkRow } from './link-row';
 export { LoadProblem, MorePages } from './more-pages';

@@ -74,6 +74,9 @@ export function listWords(si: readonly number[], spec: QuantitySpec, units: Unit
   return `${values.join('; ')}\u00a0${unitLabel(spec.unit, units)}`;
 }
 
+/** Lines of the field: room for the next number, without taking the screen. */
+const SHOWN = { least: 4, most: 12 };
+
 interface ListFieldProps {
   name: string;
   spec: QuantitySpec;
@@ -95,7 +98,7 @@ export function ListField({ name, spec, units }: ListFieldProps) {
       onChangeText={(next) => void helpers.setValue(typedList(next, spec, units))}
       onBlur={() => void helpers.setTouched(true)}
       error={meta.touched ? meta.error : undefined}
-      lines={5}
+      lines={Math.min(SHOWN.most, Math.max(SHOWN.least, text.split('\n').length + 1))}
       required
     />
   );

@@ -25,7 +25,7 @@ export const speedHint = (unit: SpeedUnit) =>
 
 export const typedSpeed = (text: string, unit: SpeedUnit): TypedEntry => ({
   text,
-  si: readEntry(text, SPEED, 'mm', unit).si,
+  si: readEntry(text, { ...SPEED, bare: unit }, 'mm').si,
 });
 
 /** The number in the unit it is marked in. */

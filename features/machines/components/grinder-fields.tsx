@@ -1,8 +1,8 @@
 import { useFormikContext } from 'formik';
 
 import { TextField } from '@/features/forms';
-import { ChoiceField, EntryField, UNKNOWN } from '@/features/records';
-import { Cell, Row, Stack } from '@/features/ui/card';
+import { ChoiceField, EntryField, FieldRow, UNKNOWN } from '@/features/records';
+import { Stack } from '@/features/ui/card';
 import { Heading } from '@/features/ui/text';
 import { GUARDS, ROTATIONS } from '@/shared/domain/machines';
 import { TEXT_LIMITS } from '@/shared/domain/limits';
@@ -29,14 +29,10 @@ export function GrinderFields() {
         required
       />
       <Heading>Motor and spindle</Heading>
-      <Row align="flex-start">
-        <Cell>
-          <Quantity name="motorNoLoadRpm" required />
-        </Cell>
-        <Cell>
-          <Quantity name="motorPowerW" required />
-        </Cell>
-      </Row>
+      <FieldRow>
+        <Quantity name="motorNoLoadRpm" required />
+        <Quantity name="motorPowerW" required />
+      </FieldRow>
       <Quantity name="spindleMaximumRpm" />
       <ChoiceField
         name="wheelRotation"

@@ -1,8 +1,15 @@
 import { useFormikContext } from 'formik';
 
 import { TextField } from '@/features/forms';
-import { ChoiceField, EntryField, FormFold, ListField, UNKNOWN } from '@/features/records';
-import { Cell, Row, Stack } from '@/features/ui/card';
+import {
+  ChoiceField,
+  EntryField,
+  FieldRow,
+  FormFold,
+  ListField,
+  UNKNOWN,
+} from '@/features/records';
+import { Stack } from '@/features/ui/card';
 import { Heading } from '@/features/ui/text';
 import { COMPOUND_ZEROS, DIAL_READINGS, SPINDLE_NOSES } from '@/shared/domain/machines';
 import { TEXT_LIMITS } from '@/shared/domain/limits';
@@ -37,14 +44,10 @@ export function LatheFields() {
         required
       />
       <Heading>Speeds and feeds</Heading>
-      <Row align="flex-start">
-        <Cell least={220}>
-          <Numbers name="spindleSpeedsRpm" />
-        </Cell>
-        <Cell least={220}>
-          <Numbers name="feedsMmPerRev" />
-        </Cell>
-      </Row>
+      <FieldRow least={220}>
+        <Numbers name="spindleSpeedsRpm" />
+        <Numbers name="feedsMmPerRev" />
+      </FieldRow>
       <Heading>Cross-slide</Heading>
       <ChoiceField
         name="crossSlideReads"
@@ -52,14 +55,10 @@ export function LatheFields() {
         hint="Turn it by ten divisions and measure: radius is the slide's own travel, diameter twice that."
         options={DIAL_READINGS.map((value) => ({ value, label: DIAL_WORDS[value] }))}
       />
-      <Row align="flex-start">
-        <Cell>
-          <Quantity name="crossSlideDivisionMm" required />
-        </Cell>
-        <Cell>
-          <Quantity name="crossSlideDivisionsPerTurn" />
-        </Cell>
-      </Row>
+      <FieldRow>
+        <Quantity name="crossSlideDivisionMm" required />
+        <Quantity name="crossSlideDivisionsPerTurn" />
+      </FieldRow>
       <Heading>Spindle</Heading>
       <ChoiceField
         name="spindleNose"

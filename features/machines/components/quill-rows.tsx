@@ -1,9 +1,11 @@
 import { getIn, useFormikContext } from 'formik';
 
+import { View } from 'react-native';
+
 import { TextField } from '@/features/forms';
-import { ChoiceField, EntryField, FormFold, UNKNOWN } from '@/features/records';
+import { ChoiceField, EntryField, FieldRow, FormFold, UNKNOWN } from '@/features/records';
 import { Button } from '@/features/ui/button';
-import { Card, Cell, Row, Stack } from '@/features/ui/card';
+import { Card, Row, Stack } from '@/features/ui/card';
 import { Body, Heading, Small, Subheading } from '@/features/ui/text';
 import { QUILL_MATERIALS, THREAD_HANDS } from '@/shared/domain/machines';
 import { TEXT_LIMITS } from '@/shared/domain/limits';
@@ -60,12 +62,10 @@ function Quill({ quill, index, onRemove }: QuillProps) {
     quill.measuredStiffnessNPerMm.si !== null || quill.measuredFrequencyHz.si !== null;
   return (
     <Card>
-      <Row align="flex-start">
-        <Cell>
-          <TextField name={`${at}.name`} label="Name" maxLength={TEXT_LIMITS.name} required />
-        </Cell>
-        <Cell>{quantity('seatDiameterMm', true)}</Cell>
-      </Row>
+      <FieldRow>
+        <TextField name={`${at}.name`} label="Name" maxLength={TEXT_LIMITS.name} required />
+        {quantity('seatDiameterMm', true)}
+      </FieldRow>
       <Segments quill={quill} at={at} />
       <ChoiceField
         name={`${at}.material`}
@@ -115,10 +115,11 @@ function Segments({ quill, at }: { quill: QuillValues; at: string }) {
       <Subheading>Sections, from the wheel end to the bearing</Subheading>
       <Small>One for a plain quill. Together their lengths are the overhang.</Small>
       {segments.map((segment, index) => (
-        <Row key={segment.id} align="flex-start">
-          {(['lengthMm', 'diameterMm'] as const).map((name) => (
-            <Cell key={name} least={120}>
+        <View key={segment.id}>
+          <FieldRow least={120}>
+            {(['lengthMm', 'diameterMm'] as const).map((name) => (
               <EntryField
+                key={name}
                 name={`${at}.segments.${index}.${name}`}
                 spec={{
                   ...SEGMENT_FIELDS[name],
@@ -127,18 +128,20 @@ function Segments({ quill, at }: { quill: QuillValues; at: string }) {
                 units={values.units}
                 required
               />
-            </Cell>
-          ))}
+            ))}
+          </FieldRow>
           {segments.length > 1 ? (
-            <Button
-              kind="quiet"
-              icon="remove"
-              label="Remove"
-              spoken={`Remove section ${index + 1} of ${quill.name || 'this quill'}`}
-              onPress={() => rows.remove(segment.id)}
-            />
+            <Row>
+              <Button
+                kind="quiet"
+                icon="remove"
+                label="Remove"
+                spoken={`Remove section ${index + 1} of ${quill.name || 'this quill'}`}
+                onPress={() => rows.remove(segment.id)}
+              />
+            </Row>
           ) : null}
-        </Row>
+        </View>
       ))}
       {submitCount > 0 && typeof missing === 'string' ? <Body tone="stop">{missing}</Body> : null}
       {segments.length < MOST.segments ? (

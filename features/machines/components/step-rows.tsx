@@ -2,9 +2,9 @@ import { getIn, useFormikContext } from 'formik';
 
 import { TextField } from '@/features/forms';
 import { FigureReadout } from '@/features/plan';
-import { DateField, EntryField, FormFold } from '@/features/records';
+import { DateField, EntryField, FieldRow, FormFold } from '@/features/records';
 import { Button } from '@/features/ui/button';
-import { Card, Cell, Row, Stack } from '@/features/ui/card';
+import { Card, Row, Stack } from '@/features/ui/card';
 import { Readout, ReadoutRow } from '@/features/ui/readout';
 import { Body, Heading, Small } from '@/features/ui/text';
 import { TEXT_LIMITS } from '@/shared/domain/limits';
@@ -57,35 +57,27 @@ function Step({ step, index, onRemove }: StepProps) {
   const { measured } = step;
   return (
     <Card>
-      <Row align="flex-start">
-        <Cell least={72}>
-          <TextField name={`${at}.name`} label="Step" maxLength={MOST.stepName} required />
-        </Cell>
-        <Cell>
-          <EntryField
-            name={`${at}.drivingPulleyMm`}
-            spec={STEP_FIELDS.drivingPulleyMm}
-            units={units}
-            required
-          />
-        </Cell>
-        <Cell>
-          <EntryField
-            name={`${at}.drivenPulleyMm`}
-            spec={STEP_FIELDS.drivenPulleyMm}
-            units={units}
-            required
-          />
-        </Cell>
-        <Cell>
-          <EntryField
-            name={`${at}.beltThicknessMm`}
-            spec={STEP_FIELDS.beltThicknessMm}
-            units={units}
-            required
-          />
-        </Cell>
-      </Row>
+      <FieldRow least={120}>
+        <TextField name={`${at}.name`} label="Step" maxLength={MOST.stepName} required />
+        <EntryField
+          name={`${at}.drivingPulleyMm`}
+          spec={STEP_FIELDS.drivingPulleyMm}
+          units={units}
+          required
+        />
+        <EntryField
+          name={`${at}.drivenPulleyMm`}
+          spec={STEP_FIELDS.drivenPulleyMm}
+          units={units}
+          required
+        />
+        <EntryField
+          name={`${at}.beltThicknessMm`}
+          spec={STEP_FIELDS.beltThicknessMm}
+          units={units}
+          required
+        />
+      </FieldRow>
       <StepSpeed step={step} motorRpm={values.motorNoLoadRpm.si} />
       <FormFold
         label="Measured"

@@ -1,9 +1,16 @@
 import { useFormikContext } from 'formik';
 
 import { TextField } from '@/features/forms';
-import { ChoiceField, DateField, EntryField, FormFold, UNKNOWN } from '@/features/records';
+import {
+  ChoiceField,
+  DateField,
+  EntryField,
+  FieldRow,
+  FormFold,
+  UNKNOWN,
+} from '@/features/records';
 import { useShop } from '@/features/session';
-import { Cell, Row, Stack } from '@/features/ui/card';
+import { Stack } from '@/features/ui/card';
 import { Checkbox } from '@/features/ui/checkbox';
 import { Field } from '@/features/ui/field';
 import { Segmented } from '@/features/ui/segmented';
@@ -21,9 +28,7 @@ import { LOOK_WORDS, MARKING_PLACE_WORDS, RING_WORDS, STATE_WORDS } from '../wor
 function WheelQuantity({ name, required }: { name: WheelField; required?: boolean }) {
   const { values } = useFormikContext<WheelValues>();
   return (
-    <Cell>
-      <EntryField name={name} spec={WHEEL_FIELDS[name]} units={values.units} required={required} />
-    </Cell>
+    <EntryField name={name} spec={WHEEL_FIELDS[name]} units={values.units} required={required} />
   );
 }
 
@@ -43,25 +48,21 @@ function MandrelQuantity({ name, required }: { name: MandrelField; required?: bo
 export function MarkingFields() {
   return (
     <Stack>
-      <Row align="flex-start">
-        <Cell>
-          <TextField
-            name="tag"
-            label="Tag"
-            hint={`The name it hangs under on the rack, at most ${TEXT_LIMITS.tag} characters.`}
-            maxLength={TEXT_LIMITS.tag}
-            required
-          />
-        </Cell>
-        <Cell>
-          <TextField
-            name="marking"
-            label="Marking"
-            hint="As it stands on the wheel, like A 60 K 8 V. Leave empty where nothing is legible."
-            maxLength={TEXT_LIMITS.marking}
-          />
-        </Cell>
-      </Row>
+      <FieldRow>
+        <TextField
+          name="tag"
+          label="Tag"
+          hint={`The name it hangs under on the rack, at most ${TEXT_LIMITS.tag} characters.`}
+          maxLength={TEXT_LIMITS.tag}
+          required
+        />
+        <TextField
+          name="marking"
+          label="Marking"
+          hint="As it stands on the wheel, like A 60 K 8 V. Leave empty where nothing is legible."
+          maxLength={TEXT_LIMITS.marking}
+        />
+      </FieldRow>
     </Stack>
   );
 }
@@ -72,9 +73,7 @@ export function SpeedFields() {
     <Stack>
       <Heading>Marked speed</Heading>
       <MarkedSpeed />
-      <Row align="flex-start">
-        <WheelQuantity name="markedRpm" />
-      </Row>
+      <WheelQuantity name="markedRpm" />
       <ChoiceField
         name="markingReadOn"
         label="Marking read"
@@ -126,14 +125,14 @@ export function SizeFields() {
   return (
     <Stack>
       <Heading>Sizes</Heading>
-      <Row align="flex-start">
+      <FieldRow>
         <WheelQuantity name="diameterNewMm" required />
         <WheelQuantity name="diameterNowMm" />
-      </Row>
-      <Row align="flex-start">
+      </FieldRow>
+      <FieldRow>
         <WheelQuantity name="widthMm" required />
         <WheelQuantity name="holeMm" required={!isMounted} />
-      </Row>
+      </FieldRow>
       <FormFold
         label="Mounted wheel"
         value={isMounted ? 'on its own mandrel' : 'no'}
