@@ -15,6 +15,8 @@ export interface QuantitySpec {
   limit: LimitName;
   /** Counts: no fractions. */
   whole?: boolean;
+  /** The unit of a number without one; the person's own when left out. */
+  bare?: EntryUnit;
 }
 
 export type Entry = { si: number; error?: undefined } | { si: null; error?: string };
@@ -40,17 +42,9 @@ function unreadableWords(spec: QuantitySpec, system: UnitSystem): string {
   return `${spec.label} is a number, ${examples}.`;
 }
 
-/**
- * Reads one field. Empty is no error here: whether a field may stay empty is the form's business.
- * `bare` is the unit of a number without one; the person's own when left out.
- */
-export function readEntry(
-  text: string,
-  spec: QuantitySpec,
-  system: UnitSystem,
-  bare: EntryUnit = displayUnit(spec.unit, system),
-): Entry {
-  const parsed = parseQuantity(text, spec.unit, bare);
+/** Reads one field. Empty is no error here: whether a field may stay empty is the form's business. */
+export function readEntry(text: string, spec: QuantitySpec, system: UnitSystem): Entry {
+  const parsed = parseQuantity(text, spec.unit, spec.bare ?? displayUnit(spec.unit, system));
   if (!parsed.ok) {
     if (parsed.reason === 'empty') return { si: null };
     if (parsed.reason === 'wrong unit')
@@ -74,16 +68,15 @@ interface QuantityRule {
   spec: QuantitySpec;
   system: UnitSystem;
   required?: boolean;
-  bare?: EntryUnit;
 }
 
 /** The yup rule of one typed quantity; its words are those of readEntry. */
-export function quantityText({ spec, system, required = false, bare }: QuantityRule) {
+export function quantityText({ spec, system, required = false }: QuantityRule) {
   return yup
     .string()
     .default('')
     .test('quantity', (text = '', context) => {
-      const entry = readEntry(text, spec, system, bare);
+      const entry = readEntry(text, spec, system);
       if (entry.error) return context.createError({ message: entry.error });
       if (required && entry.si === null)
         return context.createError({

@@ -4,7 +4,6 @@ import { quantityText, readEntry, type QuantitySpec } from '@/features/forms';
 import { UNIT_SYSTEMS, type UnitSystem } from '@/shared/domain/people';
 import type { QuickCheckInput } from '@/shared/rules';
 import { entryText } from '@/shared/units/format';
-import type { EntryUnit } from '@/shared/units/entry-units';
 
 export const MARKING_UNITS = ['m/s', 'ft/min', 'rpm'] as const;
 export type MarkingUnit = (typeof MARKING_UNITS)[number];
@@ -54,12 +53,9 @@ export function specOf(name: QuantityName, markingUnit: MarkingUnit): QuantitySp
   if (name !== 'marking') return SPECS[name];
   return markingUnit === 'rpm'
     ? { label: 'Marked limit', unit: 'rpm', limit: 'wheelRpm' }
-    : { label: 'Marked limit', unit: 'm/s', limit: 'wheelSpeedMPerS' };
+    : // A bare number is in the marking's own unit, whatever units the person works in.
+      { label: 'Marked limit', unit: 'm/s', limit: 'wheelSpeedMPerS', bare: markingUnit };
 }
-
-/** A bare number on the marking is in the marking's own unit, whatever units the person works in. */
-const bareUnit = (name: QuantityName, { markingUnit }: QuickCheckValues): EntryUnit | undefined =>
-  name === 'marking' ? markingUnit : undefined;
 
 /** The unit system that shows the marking's own unit at the field's edge. */
 export const systemOf = (name: QuantityName, values: QuickCheckValues): UnitSystem =>
@@ -82,7 +78,6 @@ export const schema = yup.lazy((values: QuickCheckValues) =>
         quantityText({
           spec: specOf(name, values.markingUnit),
           system: systemOf(name, values),
-          bare: bareUnit(name, values),
         }),
       ]),
     ),
@@ -91,12 +86,7 @@ export const schema = yup.lazy((values: QuickCheckValues) =>
 
 export function toQuickCheck(values: QuickCheckValues): QuickCheckInput {
   const read = (name: QuantityName) =>
-    readEntry(
-      values[name],
-      specOf(name, values.markingUnit),
-      systemOf(name, values),
-      bareUnit(name, values),
-    ).si;
+    readEntry(values[name], specOf(name, values.markingUnit), systemOf(name, values)).si;
   const marking = read('marking');
   return {
     wheelDiameterMm: read('diameter'),
