@@ -126,7 +126,10 @@ function signalGroup(child, signal) {
 export function launch(main) {
   const launcher = new Launcher();
   for (const [signal, code] of Object.entries(SIGNALS)) {
-    process.on(signal, () => void launcher.end(code));
+    process.on(signal, () => {
+      if (!launcher.ending) say(`\nStopping (${signal})`);
+      void launcher.end(code);
+    });
   }
   requireNode();
   main(launcher).then(
