@@ -79,7 +79,10 @@ export function Field({
   return (
     <FieldFrame ids={ids} label={label} hint={hint} error={error} remark={remark}>
       <View style={styles.row}>
-        <View style={[styles.box, error ? styles.wrong : null, readOnly && styles.readOnly]}>
+        <View
+          style={[styles.box, error ? styles.wrong : null, readOnly && styles.readOnly]}
+          {...web({ dataSet: { field: '' } })}
+        >
           <TextInput
             ref={inputRef}
             id={ids.input}

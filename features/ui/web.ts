@@ -4,6 +4,8 @@ import type { KeyboardEvent } from 'react';
 interface WebProps {
   onKeyDown?: (event: KeyboardEvent) => void;
   tabIndex?: 0 | -1;
+  /** Becomes data attributes, for the few styles that need a selector. */
+  dataSet?: Record<string, string>;
   'aria-controls'?: string;
   'aria-current'?: 'page' | 'step' | 'true';
   'aria-describedby'?: string;

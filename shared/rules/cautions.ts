@@ -8,7 +8,7 @@ export const CAUTIONS = {
   'marking-first': {
     subject: 'First of all',
     words:
-      "The wheel's marking, the makers' manuals, local law and a competent person come before anything this plan says.",
+      "The wheel's marking, the makers' manuals, local law and a competent person come before anything said here.",
     source: 'osha-1910-215-d1',
   },
   ...GUARDING_CAUTIONS,
