@@ -36,6 +36,7 @@ const FORMS: Record<string, string> = {
 
 /** The screen itself stands there: not the painted shell, not the bars that hold its place. */
 async function settled(page: Page) {
+  await page.waitForLoadState('networkidle');
   await page.getByRole('main').filter({ visible: true }).first().waitFor();
   await page.waitForFunction(() => !document.querySelector('[aria-busy="true"]'));
 }
