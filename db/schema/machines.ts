@@ -50,6 +50,7 @@ export const lathes = pgTable(
     compoundZero: text('compound_zero', { enum: COMPOUND_ZEROS }),
     compoundDivisionMm: measure('compound_division_mm'),
     compoundTravelMm: measure('compound_travel_mm'),
+    compoundMmPerTurn: measure('compound_mm_per_turn'),
     spindleNose: text('spindle_nose', { enum: SPINDLE_NOSES }),
   },
   (t) => [
@@ -70,6 +71,7 @@ export const lathes = pgTable(
     check('lathes_compound_zero', oneOf(t.compoundZero, COMPOUND_ZEROS)),
     check('lathes_compound_division_mm', inRange(t.compoundDivisionMm, LIMITS.dialDivisionMm)),
     check('lathes_compound_travel_mm', inRange(t.compoundTravelMm, LIMITS.compoundTravelMm)),
+    check('lathes_compound_mm_per_turn', inRange(t.compoundMmPerTurn, LIMITS.slideMmPerTurn)),
     check('lathes_spindle_nose', oneOf(t.spindleNose, SPINDLE_NOSES)),
     shopPolicy('lathes'),
   ],
@@ -86,6 +88,7 @@ export const grinders = pgTable(
     guard: text('guard', { enum: GUARDS }).notNull(),
     postStiffnessNPerMm: measure('post_stiffness_n_per_mm'),
     wheelRotation: text('wheel_rotation', { enum: ROTATIONS }),
+    shimsMm: doublePrecision('shims_mm').array().notNull().default([]),
   },
   (t) => [
     primaryKey({ name: 'grinders_pkey', columns: [t.shopId, t.id] }),
@@ -98,6 +101,8 @@ export const grinders = pgTable(
     check('grinders_guard', oneOf(t.guard, GUARDS)),
     check('grinders_post_stiffness', inRange(t.postStiffnessNPerMm, LIMITS.stiffnessNPerMm)),
     check('grinders_wheel_rotation', oneOf(t.wheelRotation, ROTATIONS)),
+    check('grinders_shims_count', sql`cardinality(${t.shimsMm}) <= 60`),
+    check('grinders_shims_mm', eachInRange(t.shimsMm, LIMITS.shimMm)),
     shopPolicy('grinders'),
   ],
 );

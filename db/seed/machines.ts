@@ -21,6 +21,7 @@ export const metricLathe: Named<LatheData> = {
     compoundZero: 'cross-slide',
     compoundDivisionMm: 0.02,
     compoundTravelMm: 110,
+    compoundMmPerTurn: 2,
     spindleNose: 'locked',
   },
 };
@@ -37,6 +38,7 @@ export const inchLathe: Named<LatheData> = {
     compoundZero: 'cross-slide',
     compoundDivisionMm: 0.001 * MM_PER_INCH,
     compoundTravelMm: 4 * MM_PER_INCH,
+    compoundMmPerTurn: 0.1 * MM_PER_INCH,
     spindleNose: 'locked',
   },
 };
@@ -67,6 +69,7 @@ export const outsideGrinder: Named<GrinderData> & { quills: Named<QuillData>[] }
     guard: 'fixed',
     postStiffnessNPerMm: 8200,
     wheelRotation: 'clockwise',
+    shimsMm: [0.05, 0.1, 0.1, 0.2, 0.5, 1, 1, 2],
   },
   quills: [
     {
@@ -113,6 +116,7 @@ export const insideGrinder: Named<GrinderData> & { quills: Named<QuillData>[] } 
     guard: 'none',
     postStiffnessNPerMm: 6400,
     wheelRotation: 'clockwise',
+    shimsMm: [0.05, 0.1, 0.25, 0.5, 1],
   },
   quills: [
     {

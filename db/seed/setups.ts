@@ -1,46 +1,8 @@
+import { emptySetupInputs } from '@/shared/domain/setup-defaults';
 import type { SetupInputs } from '@/shared/domain/setups';
 
 import { inchLathe, insideGrinder, metricLathe, outsideGrinder } from './machines';
 import { boreWheel, jawWheel, outsideWheel } from './wheels';
-
-const noWork: SetupInputs['work'] = {
-  material: null,
-  diameterMm: null,
-  lengthMm: null,
-  stockOnDiameterMm: null,
-  toleranceMm: null,
-  runOutMm: null,
-  interrupted: false,
-  holding: null,
-  unsupportedLengthMm: null,
-  shaftDiameterMm: null,
-  throughBore: null,
-  clearDepthMm: null,
-  jawCount: null,
-  jawBoreMm: null,
-  padWidthMm: null,
-  lastGroundDiameterMm: null,
-  preload: null,
-  nearDistanceMm: null,
-  nearRunOutMm: null,
-  nearHighSpotDeg: null,
-  farDistanceMm: null,
-  farRunOutMm: null,
-  farHighSpotDeg: null,
-  bellMouthMm: null,
-};
-
-const suggestedCut: SetupInputs['cut'] = {
-  latheRpm: null,
-  roughInfeedMm: null,
-  finishInfeedMm: null,
-  roughTraverseMmPerRev: null,
-  finishTraverseMmPerRev: null,
-  finishStockMm: null,
-  sparkOutPasses: null,
-  overrunMm: null,
-  strokes: null,
-};
 
 const suggestedDress: SetupInputs['dress'] = {
   tipRadiusMm: 0.25,
@@ -56,12 +18,10 @@ const suggestedDress: SetupInputs['dress'] = {
 const jaws: SetupInputs = {
   operation: 'jaws',
   work: {
-    ...noWork,
+    ...emptySetupInputs('jaws').work,
     material: 'tool-hardened',
     lengthMm: 28,
-    interrupted: true,
     clearDepthMm: 30,
-    jawCount: 3,
     jawBoreMm: 60,
     padWidthMm: 9,
     lastGroundDiameterMm: 60,
@@ -80,17 +40,18 @@ const jaws: SetupInputs = {
     quillId: '01900000-0000-7000-8000-000000000341',
     beltStepId: '01900000-0000-7000-8000-000000000323',
     shieldFitted: true,
+    belowCentreMm: null,
     workRotation: null,
   },
   wheel: { wheelId: jawWheel.id, typed: null },
-  cut: suggestedCut,
+  cut: emptySetupInputs('jaws').cut,
   dress: suggestedDress,
 };
 
 const bore: SetupInputs = {
   operation: 'bore',
   work: {
-    ...noWork,
+    ...emptySetupInputs('bore').work,
     material: 'alloy-hardened',
     diameterMm: 47.9,
     lengthMm: 35,
@@ -107,17 +68,18 @@ const bore: SetupInputs = {
     quillId: '01900000-0000-7000-8000-000000000341',
     beltStepId: '01900000-0000-7000-8000-000000000322',
     shieldFitted: false,
+    belowCentreMm: null,
     workRotation: null,
   },
   wheel: { wheelId: boreWheel.id, typed: null },
-  cut: suggestedCut,
+  cut: emptySetupInputs('bore').cut,
   dress: suggestedDress,
 };
 
 const outside: SetupInputs = {
   operation: 'outside',
   work: {
-    ...noWork,
+    ...emptySetupInputs('outside').work,
     material: 'alloy-hardened',
     diameterMm: 40,
     lengthMm: 150,
@@ -133,10 +95,39 @@ const outside: SetupInputs = {
     quillId: '01900000-0000-7000-8000-000000000331',
     beltStepId: '01900000-0000-7000-8000-000000000314',
     shieldFitted: false,
+    belowCentreMm: null,
     workRotation: null,
   },
   wheel: { wheelId: outsideWheel.id, typed: null },
-  cut: suggestedCut,
+  cut: emptySetupInputs('outside').cut,
+  dress: suggestedDress,
+};
+
+const centre: SetupInputs = {
+  operation: 'taper',
+  work: {
+    ...emptySetupInputs('taper').work,
+    material: 'tool-hardened',
+    diameterMm: 30,
+    lengthMm: 25,
+    includedAngleDeg: 60,
+    stockOnDiameterMm: 0.08,
+    toleranceMm: 0.02,
+    runOutMm: 0.03,
+    holding: 'spindle taper',
+    unsupportedLengthMm: 45,
+  },
+  machine: {
+    latheId: metricLathe.id,
+    grinderId: outsideGrinder.id,
+    quillId: '01900000-0000-7000-8000-000000000331',
+    beltStepId: '01900000-0000-7000-8000-000000000313',
+    shieldFitted: false,
+    belowCentreMm: null,
+    workRotation: null,
+  },
+  wheel: { wheelId: outsideWheel.id, typed: null },
+  cut: emptySetupInputs('taper').cut,
   dress: suggestedDress,
 };
 
@@ -155,5 +146,10 @@ export const setups = [
     id: '01900000-0000-7000-8000-000000000503',
     name: 'Pump shaft, 40 mm journal',
     inputs: outside,
+  },
+  {
+    id: '01900000-0000-7000-8000-000000000504',
+    name: 'Headstock centre, 60 degrees',
+    inputs: centre,
   },
 ];

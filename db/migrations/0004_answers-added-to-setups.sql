@@ -1,0 +1,7 @@
+-- Setups of before hold inputs without the fields that came with tapers; unanswered they mean what they meant.
+UPDATE "setups" SET "inputs" = "inputs" || jsonb_build_object(
+  'work', '{"taperSide": "outside", "taperMethod": "compound", "taperGiven": "angle", "includedAngleDeg": null,
+    "smallDiameterMm": null, "taperPerLength": null, "shoulders": "none", "warmerK": null, "headEndMm": null,
+    "tailEndMm": null, "endsApartMm": null}'::jsonb || ("inputs" -> 'work'),
+  'machine', '{"belowCentreMm": null}'::jsonb || ("inputs" -> 'machine'),
+  'cut', '{"softnessPerMm": null}'::jsonb || ("inputs" -> 'cut'));
