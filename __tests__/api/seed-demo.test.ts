@@ -1,3 +1,4 @@
+import { OPERATIONS } from '@/shared/domain/setups';
 import { seedDemo } from '@/api/seed-demo';
 import { weaknessOf } from '@/api/auth/password-policy';
 import { demoShop, signIns } from '@/db/seed';
@@ -55,7 +56,7 @@ describe('the demo shop', () => {
   it('has a setup for each operation that may run', async () => {
     const apprentice = await visit('apprentice');
     const { items } = setupPage.parse((await apprentice.get(`${path}/setups`)).body);
-    expect(items.map(({ operation }) => operation).sort()).toEqual(['bore', 'jaws', 'outside']);
+    expect(items.map(({ operation }) => operation).sort()).toEqual([...OPERATIONS].sort());
     for (const { name, verdict } of items)
       expect([name, verdict]).toEqual([name, expect.stringMatching(/^(clear|check)$/)]);
   });

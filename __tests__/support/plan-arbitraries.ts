@@ -19,6 +19,10 @@ import {
   OPERATIONS,
   PASS_STROKES,
   PRELOADS,
+  SHOULDERS,
+  SIDES,
+  TAPER_GIVEN,
+  TAPER_METHODS,
   type PlanInput,
   type SetupInputs,
   type TypedWheel,
@@ -64,6 +68,17 @@ const work: fc.Arbitrary<WorkInputs> = fc.record({
   stockOnDiameterMm: field('stockOnDiameterMm'),
   toleranceMm: field('toleranceMm'),
   runOutMm: field('runOutMm'),
+  taperSide: oneOf(SIDES),
+  taperMethod: oneOf(TAPER_METHODS),
+  taperGiven: oneOf(TAPER_GIVEN),
+  includedAngleDeg: field('includedAngleDeg'),
+  smallDiameterMm: field('smallDiameterMm'),
+  taperPerLength: field('taperPerLength'),
+  shoulders: oneOf(SHOULDERS),
+  warmerK: field('warmerK'),
+  headEndMm: field('diameterMm'),
+  tailEndMm: field('diameterMm'),
+  endsApartMm: field('lengthMm'),
   interrupted: fc.boolean(),
   holding: maybe(oneOf(HOLDINGS)),
   unsupportedLengthMm: field('unsupportedLengthMm'),
@@ -93,6 +108,7 @@ const lathe: fc.Arbitrary<LatheData> = fc.record({
   compoundZero: maybe(oneOf(COMPOUND_ZEROS)),
   compoundDivisionMm: field('dialDivisionMm'),
   compoundTravelMm: field('compoundTravelMm'),
+  compoundMmPerTurn: field('slideMmPerTurn'),
   spindleNose: maybe(oneOf(SPINDLE_NOSES)),
 });
 
@@ -120,6 +136,7 @@ const grinder: fc.Arbitrary<GrinderData> = fc.record({
   guard: oneOf(GUARDS),
   postStiffnessNPerMm: field('stiffnessNPerMm'),
   wheelRotation: maybe(oneOf(ROTATIONS)),
+  shimsMm: fc.array(within('shimMm'), { maxLength: 6 }),
 });
 
 const quill: fc.Arbitrary<QuillData> = fc.record({
@@ -184,6 +201,7 @@ const inputs: fc.Arbitrary<SetupInputs> = fc.record({
     quillId: fc.constant('quill'),
     beltStepId: maybe(fc.constantFrom('step-0', 'step-1', 'step-2')),
     shieldFitted: fc.boolean(),
+    belowCentreMm: field('belowCentreMm'),
     workRotation: maybe(oneOf(ROTATIONS)),
   }),
   wheel: fc.record({ wheelId: fc.constant('wheel'), typed: fc.option(typedWheel, { nil: null }) }),
@@ -196,6 +214,7 @@ const inputs: fc.Arbitrary<SetupInputs> = fc.record({
     finishStockMm: field('finishStockMm'),
     sparkOutPasses: whole('sparkOutPasses'),
     overrunMm: field('overrunMm'),
+    softnessPerMm: field('softnessPerMm'),
     strokes: maybe(oneOf(PASS_STROKES)),
   }),
   dress: fc.record({

@@ -1,144 +1,29 @@
-import type { GrinderData, LatheData, QuillData } from '@/shared/domain/machines';
 import type { Operation, PlanInput, SetupInputs } from '@/shared/domain/setups';
 import { DEFAULT_SHOP_RULES } from '@/shared/domain/shop-rules';
-import type { WheelData } from '@/shared/domain/wheels';
 import { assemblePlanInput, emptySetupInputs, type FindingCode, type Plan } from '@/shared/rules';
 
-/** Invented machines and wheels of ordinary sizes, for tests that need a whole plan. */
-export const LATHE: LatheData = {
-  spindleSpeedsRpm: [45, 70, 115, 180, 290, 460, 730, 1150, 1800],
-  feedsMmPerRev: [0.05, 0.1, 0.15, 0.2, 0.3, 0.4, 0.5, 0.6, 0.8, 1, 1.2],
-  crossSlideDivisionMm: 0.01,
-  crossSlideReads: 'diameter',
-  crossSlideDivisionsPerTurn: 200,
-  compoundZero: 'cross-slide',
-  compoundDivisionMm: 0.02,
-  compoundTravelMm: 90,
-  spindleNose: 'locked',
-};
+import {
+  ARBOR,
+  BORE_GRINDER,
+  LARGE_WHEEL,
+  LATHE,
+  QUILL,
+  SHAFT_GRINDER,
+  SMALL_WHEEL,
+} from './plan-machines';
 
-export const BORE_GRINDER: GrinderData = {
-  motorNoLoadRpm: 2850,
-  motorPowerW: 370,
-  spindleMaximumRpm: 24_000,
-  beltSteps: [
-    {
-      id: 'a',
-      name: 'A',
-      drivingPulleyMm: 90,
-      drivenPulleyMm: 30,
-      beltThicknessMm: 2,
-      measured: null,
-    },
-    {
-      id: 'b',
-      name: 'B',
-      drivingPulleyMm: 120,
-      drivenPulleyMm: 22,
-      beltThicknessMm: 2,
-      measured: null,
-    },
-    {
-      id: 'c',
-      name: 'C',
-      drivingPulleyMm: 150,
-      drivenPulleyMm: 20,
-      beltThicknessMm: 2,
-      measured: null,
-    },
-  ],
-  guard: 'none',
-  postStiffnessNPerMm: 6000,
-  wheelRotation: 'clockwise',
-};
-
-export const SHAFT_GRINDER: GrinderData = {
-  motorNoLoadRpm: 2850,
-  motorPowerW: 750,
-  spindleMaximumRpm: 7000,
-  beltSteps: [
-    {
-      id: 'a',
-      name: '1',
-      drivingPulleyMm: 80,
-      drivenPulleyMm: 80,
-      beltThicknessMm: 2.5,
-      measured: null,
-    },
-    {
-      id: 'b',
-      name: '2',
-      drivingPulleyMm: 100,
-      drivenPulleyMm: 72,
-      beltThicknessMm: 2.5,
-      measured: null,
-    },
-    {
-      id: 'c',
-      name: '3',
-      drivingPulleyMm: 120,
-      drivenPulleyMm: 60,
-      beltThicknessMm: 2.5,
-      measured: null,
-    },
-  ],
-  guard: 'fixed',
-  postStiffnessNPerMm: 6000,
-  wheelRotation: 'anticlockwise',
-};
-
-export const QUILL: QuillData = {
-  segments: [{ lengthMm: 60, diameterMm: 16 }],
-  material: 'steel',
-  markedMaximumRpm: 24_000,
-  seatDiameterMm: 8,
-  threadHand: 'right',
-  measuredStiffnessNPerMm: null,
-  measuredFrequencyHz: null,
-};
-
-export const ARBOR: QuillData = {
-  segments: [{ lengthMm: 40, diameterMm: 25 }],
-  material: 'steel',
-  markedMaximumRpm: null,
-  seatDiameterMm: 20,
-  threadHand: 'left',
-  measuredStiffnessNPerMm: null,
-  measuredFrequencyHz: null,
-};
-
-export const SMALL_WHEEL: WheelData = {
-  marking: 'A 60 K 7 V',
-  diameterNewMm: 28,
-  diameterNowMm: 27,
-  widthMm: 12,
-  holeMm: 8,
-  markedRpm: 22_000,
-  markedSpeedMPerS: null,
-  markingReadOn: 'box',
-  mounted: null,
-  looked: 'sound',
-  rung: 'clear',
-  expiresOn: null,
-  state: 'on the rack',
-  setAsideReason: null,
-};
-
-export const LARGE_WHEEL: WheelData = {
-  ...SMALL_WHEEL,
-  diameterNewMm: 125,
-  diameterNowMm: 120,
-  widthMm: 16,
-  holeMm: 20,
-  markedRpm: null,
-  markedSpeedMPerS: 35,
-  markingReadOn: 'blotter',
-};
+export * from './plan-machines';
 
 export const TODAY = '2026-03-02';
 
 const shop = { lathe: LATHE, rules: DEFAULT_SHOP_RULES, today: TODAY };
-const machine = { latheId: 'lathe', grinderId: 'grinder', quillId: 'quill', workRotation: null };
+const machine = {
+  latheId: 'lathe',
+  grinderId: 'grinder',
+  quillId: 'quill',
+  workRotation: null,
+  belowCentreMm: null,
+};
 
 /** Jaws of a 160 mm chuck that indicate 0.11 mm, ground under a ring, with a shield. */
 export const jawsInput = (): PlanInput => {
@@ -215,10 +100,36 @@ export const outsideInput = (): PlanInput => {
   );
 };
 
+/** A lathe centre in its spindle: 60 degrees on a 25 mm shank, 0.10 mm to come off on diameter. */
+export const taperInput = (): PlanInput => {
+  const inputs = emptySetupInputs('taper');
+  return assemblePlanInput(
+    {
+      ...inputs,
+      work: {
+        ...inputs.work,
+        material: 'tool-hardened',
+        diameterMm: 25,
+        lengthMm: 20,
+        includedAngleDeg: 60,
+        stockOnDiameterMm: 0.1,
+        toleranceMm: 0.02,
+        runOutMm: 0.03,
+        holding: 'spindle taper',
+        unsupportedLengthMm: 40,
+      },
+      machine: { ...machine, beltStepId: 'b', shieldFitted: false },
+      wheel: { wheelId: 'wheel', typed: null },
+    },
+    { ...shop, grinder: SHAFT_GRINDER, quill: ARBOR, wheel: LARGE_WHEEL },
+  );
+};
+
 export const GOOD_INPUTS: Record<Operation, () => PlanInput> = {
   jaws: jawsInput,
   bore: boreInput,
   outside: outsideInput,
+  taper: taperInput,
 };
 
 export const codes = (plan: Plan) => plan.findings.map(({ code }) => code);

@@ -58,6 +58,7 @@ export function toGrinder({ grinder, beltSteps: steps, quills: all }: GrinderRow
       guard: grinder.guard,
       postStiffnessNPerMm: grinder.postStiffnessNPerMm,
       wheelRotation: grinder.wheelRotation,
+      shimsMm: grinder.shimsMm,
     },
     typed: grinder.typed,
     quills: all.map((row) => ({ id: row.id, name: row.name, data: toQuillData(row) })),

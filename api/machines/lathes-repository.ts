@@ -84,6 +84,7 @@ function toLathe(row: InferSelectModel<typeof lathes>): Lathe {
       compoundZero: row.compoundZero,
       compoundDivisionMm: row.compoundDivisionMm,
       compoundTravelMm: row.compoundTravelMm,
+      compoundMmPerTurn: row.compoundMmPerTurn,
       spindleNose: row.spindleNose,
     },
     typed: row.typed,

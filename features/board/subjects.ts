@@ -32,4 +32,5 @@ const OPERATION_PLURALS = {
   jaws: 'chuck jaws',
   bore: 'bores',
   outside: 'outside work',
+  taper: 'tapers',
 } as const;

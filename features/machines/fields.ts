@@ -1,4 +1,5 @@
 import type { QuantitySpec } from '@/features/forms';
+import type { ListSpec } from '@/features/records';
 
 export const LATHE_LISTS = {
   spindleSpeedsRpm: { label: 'Spindle speeds', unit: 'rpm', limit: 'spindleSpeedRpm' },
@@ -31,7 +32,24 @@ export const LATHE_FIELDS = {
     unit: 'mm',
     limit: 'compoundTravelMm',
   },
+  compoundMmPerTurn: {
+    label: 'One turn of its crank',
+    hint: 'How far the compound moves. Leave empty when not measured.',
+    unit: 'mm',
+    limit: 'slideMmPerTurn',
+  },
 } as const satisfies Record<string, QuantitySpec>;
+
+export const GRINDER_LISTS = {
+  shimsMm: {
+    label: 'Shims kept with it',
+    hint: 'The thickness of each piece, also of those alike. Leave empty without shims.',
+    unit: 'mm',
+    limit: 'shimMm',
+    optional: true,
+    repeats: true,
+  },
+} as const satisfies Record<string, ListSpec>;
 
 export const GRINDER_FIELDS = {
   motorNoLoadRpm: {

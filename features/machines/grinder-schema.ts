@@ -1,11 +1,12 @@
 import * as yup from 'yup';
 
-import { dateText, entryRules } from '@/features/records';
+import { dateText, entryRules, listRule } from '@/features/records';
 import { TEXT_LIMITS } from '@/shared/domain/limits';
 import type { UnitSystem } from '@/shared/domain/people';
 
 import {
   GRINDER_FIELDS,
+  GRINDER_LISTS,
   MEASURED_FIELDS,
   QUILL_FIELDS,
   SEGMENT_FIELDS,
@@ -73,6 +74,7 @@ export const grinderSchema = ({ units }: GrinderValues) =>
   yup.object({
     name: nameRule('Enter the name by which the shop knows the grinder.'),
     ...entryRules(GRINDER_FIELDS, units, ['motorNoLoadRpm', 'motorPowerW']),
+    shimsMm: listRule(GRINDER_LISTS.shimsMm, units),
     beltSteps: yup
       .array(stepSchema(units))
       .min(1, 'Add at least one belt step.')

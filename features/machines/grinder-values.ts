@@ -1,16 +1,20 @@
 import {
   collectTexts,
   EMPTY_ENTRY,
+  EMPTY_LIST,
   entryInUnits,
   knownOrNull,
+  listInUnits,
   mapEntries,
   readDate,
   recallTexts,
   storedEntry,
+  storedList,
   UNKNOWN,
   type Entries,
   type EntryChange,
   type RecordValues,
+  type TypedList,
 } from '@/features/records';
 import { newId } from '@/features/transport';
 import type { CreateGrinderRequest, Grinder } from '@/shared/contracts/machines';
@@ -19,6 +23,7 @@ import { UNIT_SYSTEMS, type UnitSystem } from '@/shared/domain/people';
 
 import {
   GRINDER_FIELDS,
+  GRINDER_LISTS,
   MEASURED_FIELDS,
   STEP_FIELDS,
   type GrinderField,
@@ -43,6 +48,7 @@ export interface GrinderValues extends RecordValues, Entries<GrinderField> {
   beltSteps: StepValues[];
   guard: Guard;
   wheelRotation: Rotation | typeof UNKNOWN;
+  shimsMm: TypedList;
   quills: QuillValues[];
 }
 
@@ -71,6 +77,7 @@ export const newGrinder = (units: UnitSystem): GrinderValues => ({
   beltSteps: [newStep([])],
   guard: 'none',
   wheelRotation: UNKNOWN,
+  shimsMm: EMPTY_LIST,
   quills: [],
 });
 
@@ -105,6 +112,7 @@ export function grinderValuesOf(grinder: Grinder, units: UnitSystem): GrinderVal
     beltSteps: data.beltSteps.map((step) => stepValuesOf(step, units)),
     guard: data.guard,
     wheelRotation: data.wheelRotation ?? UNKNOWN,
+    shimsMm: storedList(data.shimsMm, GRINDER_LISTS.shimsMm, units),
     quills: quills.map((quill) => quillValuesOf(quill, units)),
   };
   return changed(values, recallTexts(typed, units));
@@ -127,7 +135,11 @@ const changed = (values: GrinderValues, change: EntryChange): GrinderValues => (
 export const grinderInUnits = (values: GrinderValues, units: UnitSystem): GrinderValues =>
   values.units === units
     ? values
-    : { ...changed(values, (entry, spec) => entryInUnits(entry, spec, units)), units };
+    : {
+        ...changed(values, (entry, spec) => entryInUnits(entry, spec, units)),
+        shimsMm: listInUnits(values.shimsMm, GRINDER_LISTS.shimsMm, units),
+        units,
+      };
 
 /** A belt step as far as it is typed; null while a pulley is missing or cannot be read. */
 export function beltStepOf(step: StepValues): BeltStep | null {
@@ -167,6 +179,7 @@ export function grinderRequest(values: GrinderValues): CreateGrinderRequest {
       guard: values.guard,
       postStiffnessNPerMm: values.postStiffnessNPerMm.si,
       wheelRotation: knownOrNull(values.wheelRotation),
+      shimsMm: values.shimsMm.si ?? [],
     },
     quills: values.quills.map(quillRequest),
     typed: collectTexts(values.units, (change) => changed(values, change)),
@@ -184,6 +197,7 @@ export function isGrinderValues(value: unknown): value is GrinderValues {
     typeof shape.name === 'string' &&
     typeof shape.motorNoLoadRpm?.text === 'string' &&
     Array.isArray(shape.beltSteps) &&
+    typeof shape.shimsMm?.text === 'string' &&
     Array.isArray(shape.quills)
   );
 }

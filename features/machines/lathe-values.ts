@@ -47,6 +47,7 @@ export const newLathe = (units: UnitSystem): LatheValues => ({
   compoundZero: UNKNOWN,
   compoundDivisionMm: EMPTY_ENTRY,
   compoundTravelMm: EMPTY_ENTRY,
+  compoundMmPerTurn: EMPTY_ENTRY,
   spindleNose: UNKNOWN,
 });
 
@@ -65,6 +66,7 @@ export function latheValuesOf({ id, name, data, typed }: Lathe, units: UnitSyste
     compoundZero: data.compoundZero ?? UNKNOWN,
     compoundDivisionMm: stored('compoundDivisionMm'),
     compoundTravelMm: stored('compoundTravelMm'),
+    compoundMmPerTurn: stored('compoundMmPerTurn'),
     spindleNose: data.spindleNose ?? UNKNOWN,
   };
   return changed(values, recallTexts(typed, units));
@@ -101,6 +103,7 @@ export function latheRequest(values: LatheValues): CreateLatheRequest {
       compoundZero: knownOrNull(values.compoundZero),
       compoundDivisionMm: values.compoundDivisionMm.si,
       compoundTravelMm: values.compoundTravelMm.si,
+      compoundMmPerTurn: values.compoundMmPerTurn.si,
       spindleNose: knownOrNull(values.spindleNose),
     },
     typed: collectTexts(values.units, (change) => changed(values, change)),

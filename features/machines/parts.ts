@@ -12,7 +12,7 @@ import type { QuantitySpec } from '@/features/forms';
 import type { UnitSystem } from '@/shared/domain/people';
 import { formatQuantity } from '@/shared/units/format';
 
-import { GRINDER_FIELDS, LATHE_FIELDS, LATHE_LISTS, QUILL_FIELDS } from './fields';
+import { GRINDER_FIELDS, GRINDER_LISTS, LATHE_FIELDS, LATHE_LISTS, QUILL_FIELDS } from './fields';
 import type { GrinderField, LatheField, LatheList } from './fields';
 import type { GrinderValues, StepValues } from './grinder-values';
 import type { LatheValues } from './lathe-values';
@@ -58,6 +58,7 @@ export const latheParts: Part<LatheValues>[] = [
   latheField('crossSlideDivisionsPerTurn'),
   keyPart('compoundZero', 'Compound at zero lies', (zero) => known(zero, COMPOUND_ZERO_WORDS)),
   latheField('compoundDivisionMm'),
+  latheField('compoundMmPerTurn'),
   latheField('compoundTravelMm'),
   keyPart('spindleNose', 'Spindle nose', (nose) => known(nose, NOSE_WORDS)),
 ];
@@ -117,6 +118,11 @@ export function grinderParts(versions: readonly GrinderValues[]): Part<GrinderVa
     grinderField('postStiffnessNPerMm'),
     keyPart('wheelRotation', 'Wheel turns, seen from the tailstock', (rotation) =>
       known(rotation, ROTATION_WORDS),
+    ),
+    keyPart('shimsMm', GRINDER_LISTS.shimsMm.label, (list) =>
+      list.si === null
+        ? list.text.trim() || NOT_GIVEN
+        : listWords(list.si, GRINDER_LISTS.shimsMm, units),
     ),
     ...rowParts<QuillValues, 'quills', GrinderValues>('quills', versions, {
       label: ({ name }) => name || 'Quill',

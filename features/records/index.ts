@@ -29,5 +29,6 @@ export {
   listRule,
   listWords,
   storedList,
+  type ListSpec,
   type TypedList,
 } from './typed-list';

@@ -21,13 +21,20 @@ const SPACED = /\d[\s\u00a0]+\d/;
 const MIXED_NUMBER = /^\d+[\s-]\d+\/\d+/;
 const HOW = 'Put each on a line of its own, or a semicolon between.';
 
+export interface ListSpec extends QuantitySpec {
+  /** Nothing at all is an answer. */
+  optional?: boolean;
+  /** The same value may stand more than once. */
+  repeats?: boolean;
+}
+
 type Reading = { si: number[]; error?: undefined } | { si: null; error?: string };
 
 /**
  * Reads a list. The comma is a decimal mark here and a space may stand between thousands, so neither can part two
  * numbers: where one of them seems to, the list is refused.
  */
-export function readList(text: string, spec: QuantitySpec, units: UnitSystem): Reading {
+export function readList(text: string, spec: ListSpec, units: UnitSystem): Reading {
   const items = text
     .split(/[\n;]+/)
     .map((item) => item.trim())
@@ -42,10 +49,10 @@ export function readList(text: string, spec: QuantitySpec, units: UnitSystem): R
     if (si === null) return { si: null, error: `"${item}" is not taken. ${error ?? HOW}` };
     values.push(si);
   }
-  return { si: [...new Set(values)].sort((a, b) => a - b) };
+  return { si: (spec.repeats ? values : [...new Set(values)]).sort((a, b) => a - b) };
 }
 
-export const typedList = (text: string, spec: QuantitySpec, units: UnitSystem): TypedList => ({
+export const typedList = (text: string, spec: ListSpec, units: UnitSystem): TypedList => ({
   text,
   si: readList(text, spec, units).si,
 });
@@ -58,9 +65,9 @@ export const storedList = (si: readonly number[], spec: QuantitySpec, units: Uni
 export const listInUnits = (list: TypedList, spec: QuantitySpec, units: UnitSystem): TypedList =>
   list.si === null ? list : storedList(list.si, spec, units);
 
-export function listRule(spec: QuantitySpec, units: UnitSystem) {
+export function listRule(spec: ListSpec, units: UnitSystem) {
   return yup.mixed<TypedList>().test('list', (list, context) => {
-    if (!list || list.si !== null) return true;
+    if (!list || list.si !== null || (spec.optional && list.text.trim() === '')) return true;
     const { error } = readList(list.text, spec, units);
     return context.createError({ message: error ?? `${spec.label}: enter one or more. ${HOW}` });
   });
@@ -79,7 +86,7 @@ const SHOWN = { least: 4, most: 12 };
 
 interface ListFieldProps {
   name: string;
-  spec: QuantitySpec;
+  spec: ListSpec;
   units: UnitSystem;
 }
 
@@ -92,14 +99,14 @@ export function ListField({ name, spec, units }: ListFieldProps) {
     <Field
       name={name}
       label={spec.label}
-      hint={`${HOW} Each ${quantityHint({ ...spec, hint: undefined }, units)}.${read}`}
+      hint={`${spec.hint ? `${spec.hint} ` : ''}${HOW} Each ${quantityHint({ ...spec, hint: undefined }, units)}.${read}`}
       unit={unitLabel(spec.unit, units)}
       value={text}
       onChangeText={(next) => void helpers.setValue(typedList(next, spec, units))}
       onBlur={() => void helpers.setTouched(true)}
       error={meta.touched ? meta.error : undefined}
       lines={Math.min(SHOWN.most, Math.max(SHOWN.least, text.split('\n').length + 1))}
-      required
+      required={!spec.optional}
     />
   );
 }

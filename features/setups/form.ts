@@ -6,7 +6,7 @@ import type { Setup, UpdateSetupRequest } from '@/shared/contracts/setups';
 import { TEXT_LIMITS } from '@/shared/domain/limits';
 import { UNIT_SYSTEMS, type UnitSystem } from '@/shared/domain/people';
 import { OPERATIONS, type Operation, type SetupInputs } from '@/shared/domain/setups';
-import { emptySetupInputs } from '@/shared/rules';
+import { completeInputs, emptySetupInputs } from '@/shared/rules';
 import { entryText } from '@/shared/units/format';
 
 import { QUANTITY_FIELDS, quantityField, type QuantityPath } from './fields';
@@ -109,6 +109,12 @@ export function setupSchema(operation: Operation, units: UnitSystem) {
     ),
   });
 }
+
+/** Values that came back from the device, kept perhaps before a field was added. */
+export const completeValues = (values: SetupValues): SetupValues => ({
+  ...values,
+  inputs: completeInputs(values.inputs),
+});
 
 /** Guards what comes back from the device's storage. */
 export function isSetupValues(value: unknown): value is SetupValues {

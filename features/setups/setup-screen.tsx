@@ -14,7 +14,7 @@ import { Skeleton } from '@/features/ui/skeleton';
 import type { Setup } from '@/shared/contracts/setups';
 import { OPERATIONS } from '@/shared/domain/setups';
 
-import { isSetupValues, newValues, valuesOf, type SetupValues } from './form';
+import { completeValues, isSetupValues, newValues, valuesOf, type SetupValues } from './form';
 import { Planner, type PlannerStart } from './planner';
 import { setupQueries } from './queries';
 
@@ -29,7 +29,10 @@ export function SetupScreen() {
   }>();
   const { shop, person, units } = useShop();
   const key = draftKey(person.personId, shop.id, `setup:${setupId}`);
-  const [draft] = useState(() => readDraft(key, isSetupValues));
+  const [draft] = useState(() => {
+    const kept = readDraft(key, isSetupValues);
+    return kept && { ...kept, values: completeValues(kept.values) };
+  });
   const setup = useQuery({
     ...setupQueries.detail(shop.id, setupId),
     // An open form is never replaced under the hands that type in it.

@@ -12,6 +12,7 @@ export const OPERATION_WORDS: Record<Operation, string> = {
   jaws: 'Chuck jaws',
   bore: 'Bore',
   outside: 'Outside cylinder',
+  taper: 'Taper or centre',
 };
 
 /** The name a setup starts with. */
@@ -19,6 +20,7 @@ export const OPERATION_NAMES: Record<Operation, string> = {
   jaws: 'True the jaws',
   bore: 'Grind a bore',
   outside: 'Grind a shaft',
+  taper: 'Grind a taper',
 };
 
 export const PART_WORDS: Record<SetupPart, string> = {
@@ -44,6 +46,7 @@ export const MATERIAL_WORDS: Record<Material, string> = {
 
 export const HOLDING_WORDS: Record<Holding, string> = {
   chuck: 'Chuck alone',
+  'spindle taper': 'In the taper of the spindle',
   'chuck and centre': 'Chuck and tailstock centre',
   centres: 'Between centres',
   'chuck and steady': 'Chuck and steady',

@@ -36,6 +36,7 @@ const latheFields = {
   compoundZero: z.enum(COMPOUND_ZEROS).nullable(),
   compoundDivisionMm: within(LIMITS.dialDivisionMm).nullable(),
   compoundTravelMm: within(LIMITS.compoundTravelMm).nullable(),
+  compoundMmPerTurn: within(LIMITS.slideMmPerTurn).nullable(),
   spindleNose: z.enum(SPINDLE_NOSES).nullable(),
 };
 
@@ -81,6 +82,11 @@ const grinderFields = {
   guard: z.enum(GUARDS),
   postStiffnessNPerMm: within(LIMITS.stiffnessNPerMm).nullable(),
   wheelRotation: z.enum(ROTATIONS).nullable(),
+  /** Every piece, smallest first. */
+  shimsMm: z
+    .array(within(LIMITS.shimMm))
+    .max(60)
+    .transform((pieces) => [...pieces].sort((a, b) => a - b)),
 };
 
 const grinderData = z.strictObject(grinderFields) satisfies z.ZodType<GrinderData>;

@@ -26,6 +26,8 @@ export interface LatheData {
   compoundZero: CompoundZero | null;
   compoundDivisionMm: number | null;
   compoundTravelMm: number | null;
+  /** What one turn of the compound's crank moves it. */
+  compoundMmPerTurn: number | null;
   /** Null means nobody has looked yet. */
   spindleNose: SpindleNose | null;
 }
@@ -63,6 +65,8 @@ export interface GrinderData {
   postStiffnessNPerMm: number | null;
   /** Which way the wheel turns as the grinder stands on the tool post; null means not yet looked at. */
   wheelRotation: Rotation | null;
+  /** Thickness of each shim kept for setting this grinder to centre height. */
+  shimsMm: number[];
 }
 
 export const QUILL_MATERIALS = ['steel', 'carbide'] as const;

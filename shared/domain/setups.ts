@@ -3,7 +3,7 @@ import type { Material } from './materials';
 import type { ShopRules } from './shop-rules';
 import type { WheelData } from './wheels';
 
-export const OPERATIONS = ['jaws', 'bore', 'outside'] as const;
+export const OPERATIONS = ['jaws', 'bore', 'outside', 'taper'] as const;
 export type Operation = (typeof OPERATIONS)[number];
 
 export const SETUP_PARTS = ['work', 'machine', 'wheel', 'cut', 'dress'] as const;
@@ -15,11 +15,32 @@ export type SetupState = (typeof SETUP_STATES)[number];
 export const VERDICTS = ['incomplete', 'clear', 'check', 'stop'] as const;
 export type Verdict = (typeof VERDICTS)[number];
 
-export const HOLDINGS = ['chuck', 'chuck and centre', 'centres', 'chuck and steady'] as const;
+export const HOLDINGS = [
+  'chuck',
+  'spindle taper',
+  'chuck and centre',
+  'centres',
+  'chuck and steady',
+] as const;
 export type Holding = (typeof HOLDINGS)[number];
 
 export const PRELOADS = ['ring', 'plug', 'spider'] as const;
 export type Preload = (typeof PRELOADS)[number];
+
+export const SIDES = ['outside', 'inside'] as const;
+export type Side = (typeof SIDES)[number];
+
+/** What makes the taper: the compound slide set over, or the tailstock, between centres only. */
+export const TAPER_METHODS = ['compound', 'tailstock'] as const;
+export type TaperMethod = (typeof TAPER_METHODS)[number];
+
+/** What the drawing gives besides diameter and length. */
+export const TAPER_GIVEN = ['angle', 'small end', 'taper'] as const;
+export type TaperGiven = (typeof TAPER_GIVEN)[number];
+
+/** Ends of the surface at which a shoulder stops the wheel. */
+export const SHOULDERS = ['none', 'one end', 'both ends'] as const;
+export type Shoulders = (typeof SHOULDERS)[number];
 
 export const PASS_STROKES = ['one stroke', 'both strokes'] as const;
 export type PassStrokes = (typeof PASS_STROKES)[number];
@@ -27,9 +48,9 @@ export type PassStrokes = (typeof PASS_STROKES)[number];
 /** Null is "not answered yet" in every field below. Each operation reads its own fields. */
 export interface WorkInputs {
   material: Material | null;
-  /** Outside: before grinding. Bore: before grinding. */
+  /** Before grinding; of a taper at its big end. */
   diameterMm: number | null;
-  /** Length of the ground surface; for jaws the length of the pads. */
+  /** Length of the ground surface along the axis; for jaws the length of the pads. */
   lengthMm: number | null;
   /** Metal to remove, on diameter (outside, bore). */
   stockOnDiameterMm: number | null;
@@ -37,6 +58,21 @@ export interface WorkInputs {
   toleranceMm: number | null;
   /** Worst run-out over the length, TIR (outside, bore). */
   runOutMm: number | null;
+  /** Tapers: a cone on a shaft or centre, or in a bore. */
+  taperSide: Side;
+  taperMethod: TaperMethod;
+  taperGiven: TaperGiven;
+  includedAngleDeg: number | null;
+  smallDiameterMm: number | null;
+  /** Change of diameter over length along the axis. */
+  taperPerLength: number | null;
+  shoulders: Shoulders;
+  /** How much warmer than gauge and room the work is when it is measured, kelvin. */
+  warmerK: number | null;
+  /** Between centres, after a trial cut: diameters near both ends, and how far apart they were taken. */
+  headEndMm: number | null;
+  tailEndMm: number | null;
+  endsApartMm: number | null;
   /** Keyways, splines, holes: the wheel leaves and meets the work again. */
   interrupted: boolean;
   holding: Holding | null;
@@ -75,6 +111,8 @@ export interface MachineInputs {
   beltStepId: string | null;
   /** A fixed shield stands around the open wheel, signed for before starting. */
   shieldFitted: boolean;
+  /** How far the wheel's axis stands below the height of centres; negative above. Null: not looked at. */
+  belowCentreMm: number | null;
   /** Which way the work turns; null takes the way the rule asks for. */
   workRotation: Rotation | null;
 }
@@ -115,6 +153,8 @@ export interface CutInputs {
   finishStockMm: number | null;
   sparkOutPasses: number | null;
   overrunMm: number | null;
+  /** Learned from spark-out in earlier runs, for this quill, kind of wheel and material; null computes it. */
+  softnessPerMm: number | null;
   strokes: PassStrokes | null;
 }
 

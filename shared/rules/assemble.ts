@@ -1,77 +1,7 @@
 import type { GrinderData, LatheData, QuillData } from '../domain/machines';
-import type { Operation, PlanInput, SetupInputs, TypedWheel } from '../domain/setups';
+import type { PlanInput, SetupInputs, TypedWheel } from '../domain/setups';
 import type { ShopRules } from '../domain/shop-rules';
 import type { WheelData } from '../domain/wheels';
-
-const THREE_JAWS = 3;
-
-/**
- * A new setup with nothing answered yet, but three jaws, which most chucks have.
- *
- * @param operation - which kind of work the setup is for.
- * @returns inputs with null for everything unanswered.
- */
-export function emptySetupInputs(operation: Operation): SetupInputs {
-  return {
-    operation,
-    work: {
-      material: null,
-      diameterMm: null,
-      lengthMm: null,
-      stockOnDiameterMm: null,
-      toleranceMm: null,
-      runOutMm: null,
-      interrupted: false,
-      holding: null,
-      unsupportedLengthMm: null,
-      shaftDiameterMm: null,
-      throughBore: null,
-      clearDepthMm: null,
-      jawCount: THREE_JAWS,
-      jawBoreMm: null,
-      padWidthMm: null,
-      lastGroundDiameterMm: null,
-      preload: null,
-      nearDistanceMm: null,
-      nearRunOutMm: null,
-      nearHighSpotDeg: null,
-      farDistanceMm: null,
-      farRunOutMm: null,
-      farHighSpotDeg: null,
-      bellMouthMm: null,
-    },
-    machine: {
-      latheId: null,
-      grinderId: null,
-      quillId: null,
-      beltStepId: null,
-      shieldFitted: false,
-      workRotation: null,
-    },
-    wheel: { wheelId: null, typed: null },
-    cut: {
-      latheRpm: null,
-      roughInfeedMm: null,
-      finishInfeedMm: null,
-      roughTraverseMmPerRev: null,
-      finishTraverseMmPerRev: null,
-      finishStockMm: null,
-      sparkOutPasses: null,
-      overrunMm: null,
-      strokes: null,
-    },
-    dress: {
-      tipRadiusMm: null,
-      diamondCarats: null,
-      roughDepthMm: null,
-      roughPasses: null,
-      roughOverlap: null,
-      finishDepthMm: null,
-      finishPasses: null,
-      finishOverlap: null,
-    },
-  };
-}
 
 /**
  * A wheel typed in for one setup, once it can be reckoned with. Diameter now is the new one until given.

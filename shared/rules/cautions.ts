@@ -2,6 +2,7 @@ import type { Operation, PlanInput } from '../domain/setups';
 import { GUARDING_CAUTIONS } from './cautions-guarding';
 import { WORKING_CAUTIONS } from './cautions-working';
 import type { Caution } from './caution';
+import { kindOf } from './surface';
 
 /** Every caution, in the order the Board shows them; what comes first stands above all others. */
 export const CAUTIONS = {
@@ -19,7 +20,8 @@ export type CautionId = keyof typeof CAUTIONS;
 
 /** What a plan is like, as far as its cautions depend on it. */
 interface Circumstances {
-  operation: Operation;
+  /** A taper is also what its surface is like. */
+  operations: readonly Operation[];
   mounted: boolean;
   material: PlanInput['work']['material'];
 }
@@ -34,15 +36,16 @@ interface Circumstances {
  */
 export function cautionsFor(input: PlanInput): CautionId[] {
   const circumstances: Circumstances = {
-    operation: input.operation,
+    operations: [input.operation, kindOf(input)],
     mounted: input.wheelData?.mounted != null,
     material: input.work.material,
   };
   return CAUTION_IDS.filter((id) => belongs(CAUTIONS[id], circumstances));
 }
 
-function belongs(caution: Caution, { operation, mounted, material }: Circumstances): boolean {
-  if (caution.operations !== undefined && !caution.operations.includes(operation)) return false;
+function belongs(caution: Caution, { operations, mounted, material }: Circumstances): boolean {
+  const { operations: only } = caution;
+  if (only !== undefined && !operations.some((operation) => only.includes(operation))) return false;
   if (caution.mounted !== undefined && caution.mounted !== mounted) return false;
   return (
     caution.materials === undefined || (material !== null && caution.materials.includes(material))

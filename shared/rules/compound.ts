@@ -95,3 +95,32 @@ export function handFedWorkSpeed(
     note: 'At one turn of the crank a second.',
   });
 }
+
+/**
+ * How fast the compound's crank must be turned to keep a traverse.
+ *
+ * @param traverse - traverse for each turn of the work, mm.
+ * @param latheRpm - lathe speed, rpm.
+ * @param slideMmPerTurn - what one turn of the crank moves the slide, mm, over 0; null where not measured.
+ * @returns turns a second; a hand keeps up about one.
+ * @source practice-crank
+ * @example crankRate(stated('traverse', [1, 'mm/rev']), stated('lathe speed', [120, 'rpm']), 2).value // 1
+ */
+export function crankRate(
+  traverse: Figure,
+  latheRpm: Figure,
+  slideMmPerTurn: number | null,
+): Figure {
+  return figure({
+    unit: '1',
+    formula: '{s} {n_w} / (60 {p})',
+    source: 'practice-crank',
+    terms: [
+      termOf('s', 'traverse per work revolution', traverse),
+      termOf('n_w', 'lathe speed', latheRpm),
+      term('p', 'slide for one turn of the crank', [slideMmPerTurn, 'mm']),
+    ],
+    compute: (perRev, rpm, perTurn) => (perTurn > 0 ? (perRev * rpm) / (60 * perTurn) : null),
+    note: 'Turns of the crank in a second; a hand keeps up about one.',
+  });
+}

@@ -1,6 +1,7 @@
 import type { StageCutPlan } from './cut-stage';
 import { figure, stated, term } from './figures';
 import { steadyLag } from './spring';
+import { squareTo, type Surface } from './surface';
 import type { Figure } from './types';
 
 const CAP_WORDS: Record<StageCutPlan['by'], string> = {
@@ -82,15 +83,22 @@ export function traverseFigure(stage: StageCutPlan | null, aim: Figure, typed: b
  * What stays as spring between even passes of a stage.
  *
  * @param stage - the planned stage; null while unknown.
+ * @param surface - the ground surface.
  * @returns mm.
  */
-export function lagFigure(stage: StageCutPlan | null): Figure {
+export function lagFigure(
+  stage: StageCutPlan | null,
+  surface: Pick<Surface, 'depthPerInfeed'>,
+): Figure {
   return figure({
     unit: 'mm',
     formula: '{a} (1 - {K}) / {K}',
     source: 'derived-spring',
     terms: [
-      term('a', 'infeed', [stage?.setting.infeedMm ?? null, 'mm']),
+      term('a', 'depth of cut, square to the surface', [
+        squareTo(surface, stage?.setting.infeedMm ?? null),
+        'mm',
+      ]),
       term('K', 'cut fraction', [stage?.fraction.value ?? null, '1']),
     ],
     compute: steadyLag,

@@ -4,6 +4,7 @@ import type { StageCutPlan } from './cut-stage';
 import { finding } from './findings';
 import { quantity } from './figures';
 import type { Schedule } from './schedule';
+import type { Surface } from './surface';
 import type { Figure, Finding } from './types';
 
 const DOUBT = 1e-9;
@@ -11,16 +12,18 @@ const DOUBT = 1e-9;
 /**
  * What is unwise about infeeds, spring and the number of passes.
  *
- * @param spec - the cut, its rough lag, the schedule (null while unknown), stock in mm and the shop's rules.
+ * @param spec - the cut, its rough lag, the schedule (null while unknown), stock in mm, the slide that
+ * traverses and the shop's rules.
  * @returns findings.
  * @source mh31-1318
- * @example cutFindings({ cut: planCut(basis), lag: stated('lag', [0.02, 'mm']), schedule: null, stockMm: 0.1, rules })[0]?.code // 'lag-above-limit'
+ * @example cutFindings({ cut: planCut(basis), lag: stated('lag', [0.02, 'mm']), schedule: null, stockMm: 0.1, slide: 'carriage', rules })[0]?.code // 'lag-above-limit'
  */
 export function cutFindings(spec: {
   cut: CutPlan;
   lag: Figure;
   schedule: Schedule | null;
   stockMm: number | null;
+  slide: Surface['slide'];
   rules: ShopRules;
 }): Finding[] {
   const { cut, lag, schedule, stockMm, rules } = spec;
@@ -29,7 +32,7 @@ export function cutFindings(spec: {
     found.push(...stageFindings('rough', cut.rough, cut.row.roughInfeedMm));
   if (cut.row !== null && cut.finish !== null)
     found.push(...stageFindings('finish', cut.finish, cut.row.finishInfeedMm.high));
-  found.push(...dialFindings(cut));
+  found.push(...dialFindings(cut, spec.slide));
   if (lag.value !== null && lag.value > rules.lagLimitMm + DOUBT)
     found.push(
       finding('lag-above-limit', {
@@ -68,13 +71,13 @@ function stageFindings(stage: string, plan: StageCutPlan, tableMm: number): Find
     : [];
 }
 
-function dialFindings({ dial, rough, finish }: CutPlan): Finding[] {
+function dialFindings({ dial, rough, finish }: CutPlan, slide: Surface['slide']): Finding[] {
   if (dial === null) return [];
   const found: Finding[] = [];
   const coarse = [finish, rough].find((stage) => stage !== null && isCoarse(stage));
   if (coarse?.setting.compoundAngle != null && coarse.setting.compoundAngle.value !== null)
     found.push(
-      finding('dial-too-coarse', {
+      finding(slide === 'compound' ? 'dial-too-coarse-on-taper' : 'dial-too-coarse', {
         level: coarse.setting.stepMm === coarse.wantedMm ? 'check' : 'note',
         figures: {
           half: quantity(dial.stepMm, 'mm'),

@@ -1,8 +1,8 @@
 import { planStage, type CutBasis, type StageCutPlan } from './cut-stage';
 import { dialOf, type Dial } from './dial';
 import { infeedCaps, withCap, type Cap } from './infeed';
-import { positive } from './surface';
-import { traverseAims, type TraverseAims } from './traverse';
+import { positive } from './sizes';
+import { handAims, traverseAims, type TraverseAims } from './traverse';
 import { workRow, type WorkRow } from './work-table';
 
 export interface CutPlan {
@@ -25,13 +25,18 @@ export interface CutPlan {
 export function planCut(basis: CutBasis): CutPlan {
   const { input, stockMm } = basis;
   const { rules, cut, wheelData, work, lathe } = input;
-  const row = work.material === null ? null : workRow(work.material);
+  const { depthPerInfeed, slide } = basis.surface;
+  const perDepth = 1 / (depthPerInfeed ?? 1);
+  const row = work.material === null ? null : fedAt(workRow(work.material), perDepth);
+  const burnMm = basis.burnMm === null ? null : basis.burnMm * perDepth;
   const widthMm = wheelData?.widthMm ?? null;
-  const aims = traverseAims(widthMm, work.material, {
-    rough: rules.roughTraverseShare,
-    finish: rules.finishTraverseShare,
-  });
-  const dial = dialOf(lathe);
+  const shares = { rough: rules.roughTraverseShare, finish: rules.finishTraverseShare };
+  const shared = traverseAims(widthMm, work.material, shares);
+  const aims =
+    slide === 'carriage'
+      ? shared
+      : handAims(shared, { perTurnMm: lathe?.compoundMmPerTurn ?? null, rpm: basis.latheRpm });
+  const dial = dialOf(lathe, slide === 'carriage');
   const kept = positive(cut.finishStockMm) ?? rules.finishStockMm;
   const finishStockMm = stockMm === null ? null : Math.min(kept, stockMm);
   const known = { dial, row, aims, finishStockMm };
@@ -43,7 +48,7 @@ export function planCut(basis: CutBasis): CutPlan {
     roughStockMm,
     interrupted: basis.surface.interrupted,
     rules,
-    burnMm: basis.burnMm,
+    burnMm,
     stepMm: dial?.stepMm ?? 0,
   });
   const rough = planStage(basis, {
@@ -59,7 +64,7 @@ export function planCut(basis: CutBasis): CutPlan {
   const finishCaps: Cap[] = [
     { by: 'table', valueMm: row.finishInfeedMm.high },
     { by: 'shop', valueMm: rules.finishInfeedMm },
-    ...(basis.burnMm === null ? [] : [{ by: 'burn' as const, valueMm: basis.burnMm }]),
+    ...(burnMm === null ? [] : [{ by: 'burn' as const, valueMm: burnMm }]),
   ];
   const finish = planStage(basis, {
     // Finishing never takes more than roughing was allowed.
@@ -76,4 +81,18 @@ export function planCut(basis: CutBasis): CutPlan {
     dial,
   });
   return { ...known, rough, finish };
+}
+
+/** The table's depths as moves of the slide that feeds; on a cone it moves further than it cuts. */
+function fedAt(row: WorkRow, perDepth: number): WorkRow {
+  const { finishInfeedMm, plungeInfeedMm } = row;
+  return {
+    ...row,
+    roughInfeedMm: row.roughInfeedMm * perDepth,
+    finishInfeedMm: { low: finishInfeedMm.low * perDepth, high: finishInfeedMm.high * perDepth },
+    plungeInfeedMm: {
+      rough: plungeInfeedMm.rough * perDepth,
+      finish: plungeInfeedMm.finish * perDepth,
+    },
+  };
 }

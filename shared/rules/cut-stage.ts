@@ -2,8 +2,10 @@ import type { PlanInput } from '../domain/setups';
 import { settle, type Dial, type Setting } from './dial';
 import { finite } from './figures';
 import { balanceCut, leastCap, type Cap } from './infeed';
+import { expectedFraction } from './learning';
 import { cutFraction, cuttingStiffness, fractionOverTurns } from './spring';
-import { positive, type Surface } from './surface';
+import { positive } from './sizes';
+import type { Surface } from './surface';
 import { feedAtMost } from './traverse';
 import type { Figure } from './types';
 
@@ -74,7 +76,7 @@ export function planStage(basis: CutBasis, aim: StageAim): StageCutPlan | null {
 }
 
 function traversing(basis: CutBasis, aim: StageAim, cap: Cap): StageCutPlan {
-  const feeds = basis.input.lathe?.feedsMmPerRev ?? [];
+  const feeds = basis.surface.slide === 'compound' ? [] : (basis.input.lathe?.feedsMmPerRev ?? []);
   const limits = { ...cutEffects(basis), lagLimitMm: basis.input.rules.lagLimitMm };
   const typed = aim.typedTraverseMm;
   const asked = typed ?? feedAtMost(feeds, aim.aimMm).mmPerRev;
@@ -127,6 +129,13 @@ function settled(aim: StageAim, cut: { infeedMm: number; by: Cap['by'] }) {
 }
 
 function fractionAt(basis: CutBasis, traverseMm: number): Figure {
+  const learned = positive(basis.input.cut.softnessPerMm);
+  if (learned !== null)
+    return expectedFraction(learned, {
+      traverseMm,
+      workMPerS: perSecond(basis.workMPerMin),
+      wheelMPerS: basis.wheelMPerS,
+    });
   return cutFraction(basis.stiffness, {
     energy: basis.energy,
     workMPerS: perSecond(basis.workMPerMin),
@@ -141,23 +150,31 @@ function cutEffects(basis: CutBasis) {
   const { energy, wheelMPerS, workMPerMin, latheRpm, surface, input, stiffness } = basis;
   const motorW = positive(input.grinder?.motorPowerW ?? null);
   const work = perSecond(workMPerMin);
+  const depth = surface.depthPerInfeed ?? 1;
+  const learned = positive(input.cut.softnessPerMm);
   return {
     lagPerMm2:
-      energy === null || wheelMPerS === null || work === null || stiffness.value === null
+      wheelMPerS === null || work === null
         ? null
-        : finite(
-            cuttingStiffness({
-              energy,
-              workMPerS: work,
-              wheelMPerS,
-              traverseMm: 1,
-              forceRatio: input.rules.forceRatio,
-            }) / stiffness.value,
-          ),
+        : learned !== null
+          ? finite((depth * learned * work) / wheelMPerS)
+          : energy === null || stiffness.value === null
+            ? null
+            : finite(
+                (depth *
+                  cuttingStiffness({
+                    energy,
+                    workMPerS: work,
+                    wheelMPerS,
+                    traverseMm: 1,
+                    forceRatio: input.rules.forceRatio,
+                  })) /
+                  stiffness.value,
+              ),
     wattsPerMm2:
       energy === null || latheRpm === null || surface.diameterMm === null
         ? null
-        : finite((energy * Math.PI * surface.diameterMm * latheRpm) / SECONDS),
+        : finite((depth * energy * Math.PI * surface.diameterMm * latheRpm) / SECONDS),
     availableWatts: motorW === null ? null : motorW * input.rules.powerShare,
     burnMm: basis.burnMm,
   };

@@ -1,6 +1,6 @@
 import type { LatheData } from '../domain/machines';
 import { figure, floorTo, term } from './figures';
-import { positive } from './surface';
+import { positive } from './sizes';
 import type { Figure } from './types';
 
 /** Half divisions are the finest a hand sets by eye. */
@@ -20,16 +20,17 @@ export interface Dial {
  * The cross-slide's dial on radius: a dial that reads diameter moves half of what it is marked.
  *
  * @param lathe - the lathe; null while not chosen.
+ * @param compoundFree - false where the compound slide traverses, and so cannot also feed.
  * @returns the dial; null without a lathe.
  */
-export function dialOf(lathe: LatheData | null): Dial | null {
+export function dialOf(lathe: LatheData | null, compoundFree = true): Dial | null {
   const marked = positive(lathe?.crossSlideDivisionMm ?? null);
   if (lathe === null || marked === null) return null;
   const divisionMm = lathe.crossSlideReads === 'diameter' ? marked / 2 : marked;
   return {
     divisionMm,
     stepMm: divisionMm * FINEST_SHARE,
-    compoundDivisionMm: positive(lathe.compoundDivisionMm),
+    compoundDivisionMm: compoundFree ? positive(lathe.compoundDivisionMm) : null,
   };
 }
 

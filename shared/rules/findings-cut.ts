@@ -1,36 +1,7 @@
 import type { FindingCatalogue } from './finding-catalogue';
 
-/** Findings about the work, the cut and the dressing. */
+/** Findings about the cut and the dressing. */
 export const CUT_FINDINGS = {
-  'clean-up-short': {
-    part: 'work',
-    levels: ['check'],
-    title: 'The stock is {shortfall} too small on diameter to clean up a run-out of {runOut}.',
-    remedy: 'Set the work truer, or accept a surface that is not ground all round.',
-    source: 'derived-round-clean-up',
-  },
-  'unit-doubt': {
-    part: 'work',
-    levels: ['note'],
-    title:
-      'Is {first} right beside {second}? One of them looks like {unit} typed as the other unit.',
-    remedy: 'Look at the unit of {firstLabel} and of {secondLabel}.',
-    source: 'derived-units',
-  },
-  'no-room-behind': {
-    part: 'work',
-    levels: ['stop'],
-    title: 'Behind the ground surface there is {room}, and the wheel runs {overrun} past it.',
-    remedy: 'Shorten the overrun, or open a relief behind the surface.',
-    source: 'practice-clearance',
-  },
-  'little-room-behind': {
-    part: 'work',
-    levels: ['check'],
-    title: 'Past the overrun only {gap} is left for the nut or screw in front of the wheel.',
-    remedy: 'Measure the nut, set a carriage stop, and try one full stroke by hand, power off.',
-    source: 'practice-clearance',
-  },
   'speed-ratio-low': {
     part: 'cut',
     levels: ['note', 'check'],
@@ -115,6 +86,29 @@ export const CUT_FINDINGS = {
     title: 'Half a division of the cross-slide, {half}, is coarser than the {infeed} wanted.',
     remedy: 'Feed with the compound slide, set over {angle} from the spindle axis.',
     source: 'lautard',
+  },
+  'dial-too-coarse-on-taper': {
+    part: 'cut',
+    levels: ['note', 'check'],
+    title: 'Half a division of the cross-slide, {half}, is coarser than the {infeed} wanted.',
+    remedy:
+      'The compound slide stands at the taper and cannot feed finely: read the cross-slide with an indicator.',
+    source: 'practice-dial',
+  },
+  'taper-too-long': {
+    part: 'cut',
+    levels: ['stop'],
+    title:
+      'The side of the cone with its overrun is {needed}; the compound slide travels {travel}.',
+    remedy: 'Shorten the overrun, or set the tailstock over where the taper is slow.',
+    source: 'derived-taper',
+  },
+  'crank-hurried': {
+    part: 'cut',
+    levels: ['note'],
+    title: 'The compound’s crank must turn {turns} times a second; once is what a hand keeps up.',
+    remedy: 'Take a slower lathe step or a finer traverse.',
+    source: 'practice-crank',
   },
   'many-passes': {
     part: 'cut',

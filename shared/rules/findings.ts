@@ -1,6 +1,7 @@
 import { CUT_FINDINGS } from './findings-cut';
 import { MACHINE_FINDINGS } from './findings-machine';
 import { WHEEL_FINDINGS } from './findings-wheel';
+import { WORK_FINDINGS } from './findings-work';
 import type { FindingCatalogue } from './finding-catalogue';
 import type { Finding, Quantity } from './types';
 
@@ -8,6 +9,7 @@ import type { Finding, Quantity } from './types';
 export const FINDINGS = {
   ...MACHINE_FINDINGS,
   ...WHEEL_FINDINGS,
+  ...WORK_FINDINGS,
   ...CUT_FINDINGS,
 } as const satisfies FindingCatalogue;
 

@@ -1,6 +1,7 @@
 import type { PlanInput } from '../domain/setups';
 import { cautionsFor } from './cautions';
 import { equivalentDiameter } from './contact';
+import { shrinkage } from './cooling';
 import { unknown } from './cut-figures';
 import { planDressing } from './dressing';
 import { deepestWithoutBurn, specificEnergy } from './energy';
@@ -8,12 +9,16 @@ import { effectiveQuill } from './mandrel';
 import { needsOf } from './needs';
 import { inputFindings } from './plan-checks';
 import { planCutOutcome } from './plan-cut';
+import { planHeight } from './plan-height';
 import { planQuill, stiffnessOf } from './plan-quill';
 import { planSpeed } from './plan-speed';
+import { planTaper } from './plan-taper';
 import { cuttingForce, planPower } from './power-plan';
 import { workRotation } from './rotation';
 import { jawPlanOf, stockOf } from './stock';
-import { surfaceOf } from './surface';
+import { notNegative, positive } from './sizes';
+import { squareTo, surfaceOf } from './surface';
+import { tailstockCorrection } from './taper';
 import { planTime } from './time';
 import type { Plan } from './types';
 import { byGravity, verdictOf } from './verdict';
@@ -22,7 +27,8 @@ import { markingOf } from './bond';
 import { planWorkSpeed, workSpeedFindings } from './work-speed';
 import { isSteel } from './work-table';
 
-export { assemblePlanInput, emptySetupInputs, typedWheelData } from './assemble';
+export { completeInputs, emptySetupInputs } from '../domain/setup-defaults';
+export { assemblePlanInput, typedWheelData } from './assemble';
 export { CAUTIONS } from './cautions';
 export { FINDINGS, findingWords, type FindingCode } from './findings';
 export { orderOfWork } from './order-of-work';
@@ -60,7 +66,7 @@ export function planSetup(given: PlanInput): Plan {
   const energy = specificEnergy(work.material);
   const steel = work.material !== null && isSteel(work.material);
   const wheelMm = wheel?.diameterNowMm ?? null;
-  const contact = equivalentDiameter(wheelMm, surface.diameterMm, surface.side);
+  const contact = equivalentDiameter(wheelMm, surface.contactDiameterMm, surface.side);
   const stiffness = stiffnessOf(input, surface);
   const outcome = planCutOutcome(
     {
@@ -89,7 +95,7 @@ export function planSetup(given: PlanInput): Plan {
     load,
     contact,
     removal: outcome.removal.rough,
-    infeedMm: (outcome.infeed.perTurn?.rough ?? outcome.infeed.rough).value,
+    infeedMm: squareTo(surface, (outcome.infeed.perTurn?.rough ?? outcome.infeed.rough).value),
     workMPerMin: turning.workSpeed.value,
     motorW: grinder?.motorPowerW ?? null,
     share: input.rules.powerShare,
@@ -117,6 +123,18 @@ export function planSetup(given: PlanInput): Plan {
     quill,
     workRotation: input.machine.workRotation,
   };
+  const cone = planTaper(input, {
+    surface,
+    overrun: outcome.traverse.overrun,
+    traverse: outcome.traverse.rough,
+    latheRpm: turning.latheRpm,
+  });
+  const high = planHeight({
+    belowMm: input.machine.belowCentreMm,
+    surface,
+    wheelMm,
+    grinder,
+  });
   const findings = byGravity([
     ...speed.findings,
     ...inputFindings(input, {
@@ -124,6 +142,8 @@ export function planSetup(given: PlanInput): Plan {
       overrun: outcome.traverse.overrun,
       turning: directions,
     }),
+    ...cone.findings,
+    ...high.findings,
     ...workSpeedFindings(turning, surface.diameterMm),
     ...outcome.findings,
     ...power.findings,
@@ -157,6 +177,19 @@ export function planSetup(given: PlanInput): Plan {
     infeed: outcome.infeed,
     stock,
     jaws,
+    taper: cone.taper,
+    height: high.height,
+    measuring: {
+      shrinkage: shrinkage(steel ? surface.diameterMm : null, notNegative(work.warmerK)),
+      tailstockMove: tailstockCorrection(
+        {
+          firstMm: positive(work.headEndMm),
+          secondMm: positive(work.tailEndMm),
+          apartMm: positive(work.endsApartMm),
+        },
+        positive(work.unsupportedLengthMm),
+      ),
+    },
     passes: outcome.schedule?.passes ?? [],
     cutFraction: {
       rough: outcome.cut.rough?.fraction ?? unknown('1', 'cut fraction'),

@@ -35,12 +35,15 @@ export function observedFraction(
   return fraction > 0 && fraction < 1 ? fraction : null;
 }
 
-/** What a stage cut with: traverse in mm per work revolution, work and wheel speed in m/s, all over 0. */
+/** What a stage cuts with: traverse in mm per work revolution, work and wheel speed in m/s, all over 0. */
 export interface CutConditions {
   traverseMm: number;
   workMPerS: number;
   wheelMPerS: number;
 }
+
+/** The same, null where it is not known yet. */
+type Expected = { [K in keyof CutConditions]: CutConditions[K] | null };
 
 /**
  * What a run teaches about quill, wheel and material together, freed of its traverse and speeds, so that it
@@ -66,13 +69,13 @@ export function softness(fraction: number, cut: CutConditions): number {
  * @source derived-spring
  * @example expectedFraction(100, { traverseMm: 0.5, workMPerS: 0.25, wheelMPerS: 25 }).value // 0.6667
  */
-export function expectedFraction(learned: number | null, cut: CutConditions): Figure {
+export function expectedFraction(learned: number | null, cut: Expected): Figure {
   return figure({
     unit: '1',
     formula: '{K} = 1 / (1 + {Λ} {s} {v_w}/{v_s})',
     source: 'derived-spring',
     terms: [
-      term('Λ', 'learned from runs, for each millimetre', [learned, '1']),
+      term('Λ', 'learned from runs, for each millimetre', [learned, '1/mm']),
       term('s', 'traverse per work revolution', [cut.traverseMm, 'mm/rev']),
       term('v_w', 'work speed', [cut.workMPerS, 'm/s']),
       term('v_s', 'wheel speed', [cut.wheelMPerS, 'm/s']),

@@ -1,4 +1,5 @@
 import type { PlanInput, SetupPart, TypedWheel, WorkInputs } from '../domain/setups';
+import { kindOf } from './surface';
 import type { Need } from './types';
 
 type Asked<T> = readonly [field: keyof T, label: string];
@@ -41,6 +42,22 @@ const OUTSIDE: readonly Asked<WorkInputs>[] = [
   ['unsupportedLengthMm', 'unsupported length'],
 ];
 
+const TAPER: readonly Asked<WorkInputs>[] = [
+  ['material', 'material'],
+  ['diameterMm', 'diameter at the big end'],
+  ['lengthMm', 'length of the taper'],
+];
+
+const TAPER_GIVEN: Record<WorkInputs['taperGiven'], Asked<WorkInputs>> = {
+  angle: ['includedAngleDeg', 'included angle'],
+  'small end': ['smallDiameterMm', 'diameter at the small end'],
+  taper: ['taperPerLength', 'taper'],
+};
+
+/** How round work is held outside; inside, whether the hole goes through. */
+const HELD = OUTSIDE.slice(-2);
+const HOLE = BORE.slice(-1);
+
 const TYPED_WHEEL: readonly Asked<TypedWheel>[] = [
   ['diameterNewMm', 'wheel diameter when new'],
   ['widthMm', 'wheel width'],
@@ -64,12 +81,37 @@ export function needsOf(input: PlanInput): Need[] {
 }
 
 function workNeeds({ operation, work }: PlanInput): Need[] {
-  const asked = operation === 'jaws' ? JAWS : operation === 'bore' ? BORE : OUTSIDE;
+  const asked = askedOf(operation, work);
   const missing = asked.filter(([field]) => work[field] === null && !answeredBy(work, field));
   const needs = missing.map(([field, label]) => need('work', `work.${field}`, label));
-  if (operation === 'bore' && work.throughBore === false && work.clearDepthMm === null)
+  if (
+    kindOf({ operation, work }) === 'bore' &&
+    work.throughBore === false &&
+    work.clearDepthMm === null
+  )
     needs.push(need('work', 'work.clearDepthMm', 'free depth behind the bore'));
   return needs;
+}
+
+function askedOf(
+  operation: PlanInput['operation'],
+  work: WorkInputs,
+): readonly Asked<WorkInputs>[] {
+  switch (operation) {
+    case 'jaws':
+      return JAWS;
+    case 'bore':
+      return BORE;
+    case 'outside':
+      return OUTSIDE;
+    case 'taper':
+      return [
+        ...TAPER,
+        TAPER_GIVEN[work.taperGiven],
+        ...ROUND_WORK,
+        ...(work.taperSide === 'outside' ? HELD : HOLE),
+      ];
+  }
 }
 
 /** Without run-out there is no high spot to find. */

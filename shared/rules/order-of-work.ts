@@ -17,6 +17,8 @@ interface Step {
   id: string;
   title: string;
   words: Words;
+  /** Left out of the steps of other work. */
+  when?: (input: PlanInput) => boolean;
   /** The figures its words name. */
   figures: (plan: Plan, input: PlanInput) => Record<string, Figure | number | null>;
 }
@@ -27,12 +29,14 @@ const HOLDING: Record<Operation, string> = {
   jaws: 'Close the jaws on the preload in the direction they will work, at {bore}. Note diameter and torque.',
   bore: 'Set the bore true in the chuck, and read its run-out at both ends.',
   outside: 'Set the work up as planned, and read its run-out at both ends.',
+  taper: 'Set the work up as planned, and read its run-out at both ends.',
 };
 
 const SURVEY: Record<Operation, string> = {
   jaws: 'Read run-out and high spot on a bar at two distances. About {stock} on radius is to come off.',
   bore: 'Read size and run-out at both ends. {stock} on radius is to come off.',
   outside: 'Read size and run-out at both ends. {stock} on radius is to come off.',
+  taper: 'Read size and run-out at both ends. {stock} at the cross-slide is to come off.',
 };
 
 const STEPS: readonly Step[] = [
@@ -47,6 +51,18 @@ const STEPS: readonly Step[] = [
     title: 'Hold',
     words: ({ operation }) => HOLDING[operation],
     figures: (_, { work }) => ({ bore: work.jawBoreMm }),
+  },
+  {
+    id: 'set-over',
+    title: 'Set over',
+    when: ({ operation }) => operation === 'taper',
+    words: setOverWords,
+    figures: ({ taper }) => ({
+      half: taper?.halfAngle ?? null,
+      across: taper?.compound?.fromCrossSlide ?? null,
+      along: taper?.compound?.fromSpindleAxis ?? null,
+      setover: taper?.setover ?? null,
+    }),
   },
   {
     id: 'wheel',
@@ -79,7 +95,10 @@ const STEPS: readonly Step[] = [
   {
     id: 'dress',
     title: 'Dress',
-    words: '{passes} of {depth}, each in {seconds} across the wheel. Then take the dresser out.',
+    words: ({ operation, work }) =>
+      operation === 'taper' && work.taperMethod === 'compound'
+        ? 'With the compound at the taper, so that the face lies along the cone: {passes} of {depth}, each in {seconds} across the wheel. Then take the dresser out.'
+        : '{passes} of {depth}, each in {seconds} across the wheel. Then take the dresser out.',
     figures: ({ dressing }) => dressFigures(dressing?.rough),
   },
   {
@@ -108,7 +127,10 @@ const STEPS: readonly Step[] = [
   {
     id: 'measure',
     title: 'Measure',
-    words: 'Withdraw, stop wheel and work, let the work cool, and measure both ends.',
+    words: ({ operation }) =>
+      operation === 'taper'
+        ? 'Withdraw, stop wheel and work, let the work cool, and try it with blue in its gauge.'
+        : 'Withdraw, stop wheel and work, let the work cool, and measure both ends.',
     figures: none,
   },
   {
@@ -153,12 +175,26 @@ const STEPS: readonly Step[] = [
  * @example orderOfWork(plan, planInput)[0]?.title // 'Survey'
  */
 export function orderOfWork(plan: Plan, input: PlanInput): WorkStep[] {
-  return STEPS.map(({ id, title, words, figures }) => ({
+  return STEPS.filter(({ when }) => when?.(input) ?? true).map(({ id, title, words, figures }) => ({
     id,
     title,
     words: typeof words === 'string' ? words : words(input),
     figures: quantities(figures(plan, input)),
   }));
+}
+
+function setOverWords({ work, lathe }: PlanInput): string {
+  if (work.taperMethod === 'tailstock')
+    return 'Set the tailstock over by {setover}, and try it with an indicator along the work.';
+  const trial = 'Run an indicator along a finished cone, or blue one, before you trust the scale.';
+  switch (lathe?.compoundZero ?? null) {
+    case 'cross-slide':
+      return `Set the compound to {across} on its scale: {half} from the spindle axis. ${trial}`;
+    case 'spindle-axis':
+      return `Set the compound to {along} on its scale: {half} from the spindle axis. ${trial}`;
+    default:
+      return `Set the compound {half} from the spindle axis: {across} on a scale with its zero across the bed, {along} with its zero along it. ${trial}`;
+  }
 }
 
 function quantities(figures: ReturnType<Step['figures']>): Record<string, Quantity> {

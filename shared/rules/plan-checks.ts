@@ -2,8 +2,9 @@ import type { PlanInput } from '../domain/setups';
 import { clearanceFindings } from './clearance';
 import { guardFindings } from './guard';
 import { rotationFindings, type Turning } from './rotation';
-import { stockFindings } from './stock';
-import { notNegative, type Surface } from './surface';
+import { shoulderFindings, stockFindings } from './stock';
+import { notNegative } from './sizes';
+import { kindOf, type Surface } from './surface';
 import type { Figure, Finding } from './types';
 import { unitFindings } from './unit-doubt';
 import { wheelFindings } from './wheel-checks';
@@ -21,13 +22,14 @@ export function inputFindings(
   input: PlanInput,
   { surface, overrun, turning }: { surface: Surface; overrun: Figure; turning: Turning },
 ): Finding[] {
-  const { operation, work, grinder, quill, wheelData: wheel } = input;
+  const { work, grinder, quill, wheelData: wheel } = input;
+  const kind = kindOf(input);
   const overrunMm = overrun.value;
-  const open = operation === 'bore' && work.throughBore !== false;
+  const open = kind === 'bore' && work.throughBore !== false;
   return [
     ...(wheel === null ? [] : ownFindings(input, wheel)),
     ...guardFindings({
-      operation,
+      kind,
       grinder,
       shieldFitted: input.machine.shieldFitted,
       overrunMm,
@@ -37,7 +39,7 @@ export function inputFindings(
     ...(surface.side === 'outside'
       ? []
       : clearanceFindings({
-          boreMm: surface.diameterMm,
+          boreMm: surface.leastDiameterMm ?? surface.diameterMm,
           lengthMm: surface.lengthMm,
           overrunMm,
           clearDepthMm: open ? null : notNegative(work.clearDepthMm),
@@ -45,6 +47,7 @@ export function inputFindings(
           quill,
         })),
     ...stockFindings(input),
+    ...shoulderFindings(surface),
     ...unitFindings(input),
   ];
 }

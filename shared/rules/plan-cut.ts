@@ -9,8 +9,9 @@ import {
 } from './cut-figures';
 import { planCut, type CutPlan } from './cut-plan';
 import type { CutBasis, StageCutPlan } from './cut-stage';
+import { squareTo } from './surface';
 import { planPasses, type Schedule, type StageFeed } from './schedule';
-import { notNegative, positive } from './surface';
+import { notNegative, positive } from './sizes';
 import { secondsPerPass, strokesPerPass } from './time';
 import {
   overrun,
@@ -49,11 +50,11 @@ export interface CutOutcome {
  * @example planCutOutcome(basis, plan.work.latheRpm).schedule?.counts.rough // 14
  */
 export function planCutOutcome(basis: CutBasis, latheRpm: Figure): CutOutcome {
-  const { input, stockMm } = basis;
+  const { input, surface, stockMm } = basis;
   const cut = planCut(basis);
   const traverse = traverseOf(basis, cut, latheRpm);
   const schedule = scheduleOf(basis, cut);
-  const lag = lagFigure(cut.rough);
+  const lag = lagFigure(cut.rough, surface);
   const strokes = strokesPerPass(input.cut.strokes);
   return {
     cut,
@@ -72,12 +73,12 @@ export function planCutOutcome(basis: CutBasis, latheRpm: Figure): CutOutcome {
     findings: [
       ...traverseFindings({
         widthMm: input.wheelData?.widthMm ?? null,
-        inside: basis.surface.side === 'inside',
+        inside: surface.side === 'inside',
         aims: cut.aims,
-        byHand: cut.rough?.byHand ?? false,
+        byHand: surface.slide === 'carriage' && (cut.rough?.byHand ?? false),
         traverse,
       }),
-      ...cutFindings({ cut, lag, schedule, stockMm, rules: input.rules }),
+      ...cutFindings({ cut, lag, schedule, stockMm, slide: surface.slide, rules: input.rules }),
     ],
   };
 }
@@ -96,7 +97,7 @@ function traverseOf(basis: CutBasis, cut: CutPlan, latheRpm: Figure): Plan['trav
     plungeMm === null
       ? overrun(widthMm, notNegative(input.cut.overrunMm))
       : overrunOfPlunge(widthMm, plungeMm);
-  const distance = travel(surface.lengthMm, widthMm, past);
+  const distance = travel(surface.lengthMm, widthMm, past, surface.shoulders);
   const roughRate = traverseRate(rough, latheRpm);
   return {
     rough,
@@ -125,7 +126,7 @@ function infeedOf(basis: CutBasis, { rough, finish }: CutPlan): Plan['infeed'] {
     governedBy: rough?.by ?? null,
     compoundAngle: finish?.setting.compoundAngle ?? rough?.setting.compoundAngle ?? null,
     wheelWear: wheelWear({
-      infeedMm: rough?.setting.infeedMm ?? null,
+      infeedMm: depthOf(rough, surface),
       workMm: surface.diameterMm,
       lengthMm: surface.lengthMm,
       wheelMm: input.wheelData?.diameterNowMm ?? null,
@@ -141,12 +142,13 @@ function removalOf(
   rate: Figure,
 ): Figure {
   const { diameterMm } = surface;
+  const perTurnMm = stage?.plunge?.perTurnMm ?? null;
   return plungeMm === null
-    ? removalRate(diameterMm, stage?.setting.infeedMm ?? null, rate.value)
+    ? removalRate(diameterMm, depthOf(stage, surface), rate.value)
     : plungeRemovalRate({
         workMm: diameterMm,
         widthMm: plungeMm,
-        infeedMmPerRev: stage?.plunge?.perTurnMm ?? null,
+        infeedMmPerRev: squareTo(surface, perTurnMm),
         workRpm: latheRpm,
       });
 }
@@ -159,6 +161,11 @@ function passSeconds(
   return plunge
     ? secondsPerSetting(pass.stage, pass.latheRpm)
     : secondsPerPass(secondsPerStroke(distance, rate), pass.strokes);
+}
+
+/** Depth of cut of a stage, square to the surface. */
+function depthOf(stage: StageCutPlan | null, surface: CutBasis['surface']): number | null {
+  return squareTo(surface, stage?.setting.infeedMm ?? null);
 }
 
 function scheduleOf(basis: CutBasis, cut: CutPlan): Schedule | null {

@@ -6,7 +6,7 @@ import { quantity, stated } from './figures';
 import { finding } from './findings';
 import { limitRpm, wheelLimits } from './limits';
 import { wheelSpeed, worstRpm } from './speed';
-import { positive } from './surface';
+import { positive } from './sizes';
 import type { Figure, Finding, Need, SpeedLimit } from './types';
 import { verdictOf } from './verdict';
 

@@ -2,7 +2,7 @@ import type { Material } from '../domain/materials';
 import type { WorkInputs } from '../domain/setups';
 import { assumedTerm, figure, stated, term, termOf } from './figures';
 import type { Surface } from './surface';
-import { positive } from './surface';
+import { positive } from './sizes';
 import type { Figure } from './types';
 
 /** Young's modulus of the work, N/mm2. */
@@ -35,7 +35,7 @@ function workModulus(material: Material): number {
  */
 export function workStiffness(work: WorkInputs, surface: Surface): Figure | 'stiff' {
   if (surface.side === 'inside') return 'stiff';
-  const free = work.holding === 'chuck';
+  const free = work.holding === 'chuck' || work.holding === 'spindle taper';
   const factor = work.holding === null ? null : free ? 3 : 48;
   const modulus = work.material === null ? null : workModulus(work.material);
   return figure({

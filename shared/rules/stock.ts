@@ -1,9 +1,12 @@
 import type { PlanInput } from '../domain/setups';
+import { toRadians } from './angles';
+import { coneOf } from './cone';
 import { finding } from './findings';
 import { assumedTerm, figure, quantity, term, termOf } from './figures';
 import { bellMouth, planJaws } from './jaws';
 import { offsetFromRunOut, offsetLine } from './offset';
-import { notNegative, positive, surfaceOf } from './surface';
+import { notNegative, positive } from './sizes';
+import { surfaceOf, type Surface } from './surface';
 import type { Figure, Finding, JawPlan } from './types';
 
 /** Where a chuck's pads begin: distances are measured from the chuck's face. */
@@ -64,12 +67,25 @@ function plane(distance: number | null, runOut: number | null, highSpot: number 
  * @example stockOf(planInput, jawPlanOf(planInput)).value // 0.1232 mm
  */
 export function stockOf(input: PlanInput, jaws: JawPlan | null): Figure {
-  if (input.operation !== 'jaws')
+  const { operation, work } = input;
+  if (operation === 'taper' && work.taperMethod === 'tailstock')
+    return figure({
+      unit: 'mm',
+      formula: '{z} cos {α} / 2',
+      source: 'derived-taper',
+      terms: [
+        term('z', 'stock on diameter', [positive(work.stockOnDiameterMm), 'mm']),
+        termOf('α', 'half angle', coneOf(work).half),
+      ],
+      compute: (onDiameter, half) => (onDiameter * Math.cos(toRadians(half))) / 2,
+      note: 'Square to the surface: with the tailstock set over it lies along the bed.',
+    });
+  if (operation !== 'jaws')
     return figure({
       unit: 'mm',
       formula: '{z} / 2',
       source: 'entered',
-      terms: [term('z', 'stock on diameter', [positive(input.work.stockOnDiameterMm), 'mm'])],
+      terms: [term('z', 'stock on diameter', [positive(work.stockOnDiameterMm), 'mm'])],
       compute: (onDiameter) => onDiameter / 2,
     });
   const cleanUp: Figure =
@@ -109,4 +125,14 @@ export function stockFindings({ operation, work }: PlanInput): Finding[] {
       figures: { shortfall: quantity(runOut - stock, 'mm'), runOut: quantity(runOut, 'mm') },
     }),
   ];
+}
+
+/**
+ * At a shoulder the wheel cannot run past the end of the surface.
+ *
+ * @param surface - the ground surface.
+ * @returns a note where there is a shoulder.
+ */
+export function shoulderFindings({ shoulders }: Surface): Finding[] {
+  return shoulders === 0 ? [] : [finding('shoulder')];
 }

@@ -61,7 +61,7 @@ export function halfOfIncluded(includedDeg: number | null): Figure {
  */
 export function taperPerLength(half: Figure): Figure {
   return figure({
-    unit: '1',
+    unit: 'taper',
     formula: '{k} = 2 tan {α}',
     source: 'derived-taper',
     terms: [termOf('α', 'half angle', half)],
@@ -70,20 +70,20 @@ export function taperPerLength(half: Figure): Figure {
 }
 
 /**
- * Half angle of a taper given in inches to the foot.
+ * Half angle of a taper given as diameter over length: 0.05 is 1 in 20, 1/12 an inch to the foot.
  *
- * @param inchesPerFoot - change of diameter, inches, for each foot of length, 0 or more.
+ * @param perLength - change of diameter for each unit of length along the axis, 0 or more.
  * @returns half angle, degrees, unrounded.
  * @source derived-taper
- * @example halfAngleOfTaperPerFoot(3.5).value // 8.297 degrees
+ * @example halfAngleOfTaper(3.5 / 12).value // 8.297 degrees
  */
-export function halfAngleOfTaperPerFoot(inchesPerFoot: number | null): Figure {
+export function halfAngleOfTaper(perLength: number | null): Figure {
   return figure({
     unit: 'deg',
-    formula: '{α} = atan({T} / 24)',
+    formula: '{α} = atan({k} / 2)',
     source: 'derived-taper',
-    terms: [term('T', 'taper, inches to the foot', [inchesPerFoot, '1'])],
-    compute: (taper) => (taper < 0 ? null : toDegrees(Math.atan(taper / 24))),
+    terms: [term('k', 'taper, diameter over length', [perLength, 'taper'])],
+    compute: (taper) => (taper < 0 ? null : toDegrees(Math.atan(taper / 2))),
   });
 }
 
@@ -94,7 +94,7 @@ export function halfAngleOfTaperPerFoot(inchesPerFoot: number | null): Figure {
  * @param taper - diameter over length, as from taperPerLength.
  * @returns setover, mm, unrounded.
  * @source jones-setover
- * @example tailstockSetover(228.6, stated('taper', [1 / 12, '1'])).value // 9.525 mm: three eighths of an inch
+ * @example tailstockSetover(228.6, stated('taper', [1 / 12, 'taper'])).value // 9.525 mm: three eighths of an inch
  */
 export function tailstockSetover(totalLengthMm: number | null, taper: Figure): Figure {
   return figure({

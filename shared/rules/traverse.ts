@@ -55,21 +55,28 @@ export function overrunOfPlunge(widthMm: number | null, lengthMm: number): Figur
  * @param lengthMm - length of the ground surface, mm.
  * @param widthMm - wheel width, mm.
  * @param past - the overrun.
+ * @param shoulders - ends at which the wheel stops at a shoulder instead.
  * @returns mm, 0 at least.
  * @source practice-overrun
  * @example travel(30, 12, overrun(12, null)).value // 26
  */
-export function travel(lengthMm: number | null, widthMm: number | null, past: Figure): Figure {
+export function travel(
+  lengthMm: number | null,
+  widthMm: number | null,
+  past: Figure,
+  shoulders: 0 | 1 | 2 = 0,
+): Figure {
+  const open = 2 - shoulders;
   return figure({
     unit: 'mm',
-    formula: '{L} + 2 {o} - {T}',
+    formula: open === 2 ? '{L} + 2 {o} - {T}' : open === 1 ? '{L} + {o} - {T}' : '{L} - {T}',
     source: 'practice-overrun',
     terms: [
       term('L', 'length of the ground surface', [lengthMm, 'mm']),
       termOf('o', 'overrun', past),
       term('T', 'wheel width', [widthMm, 'mm']),
     ],
-    compute: (length, over, width) => Math.max(length + 2 * over - width, 0),
+    compute: (length, over, width) => Math.max(length + open * over - width, 0),
   });
 }
 
@@ -111,6 +118,37 @@ export function traverseAims(
     rough: aim(row?.roughTraverseShare ?? null, shares.rough),
     finish: aim(row?.finishTraverseShare ?? null, shares.finish),
   };
+}
+
+/**
+ * Traverse aimed at where a hand turns the crank of the slide: a turn a second roughing, half a turn finishing,
+ * and never more than the share of the wheel.
+ *
+ * @param aims - from traverseAims.
+ * @param crank - what one turn moves the slide in mm, and the lathe's rpm; null while unknown.
+ * @returns mm per work revolution; the aims themselves while the crank is unknown.
+ * @source practice-crank
+ * @example handAims(traverseAims(16, 'tool-hardened', { rough: 1 / 8, finish: 1 / 16 }), { perTurnMm: 2, rpm: 180 }).rough.value // 0.6667
+ */
+export function handAims(
+  aims: TraverseAims,
+  { perTurnMm, rpm }: { perTurnMm: number | null; rpm: number | null },
+): TraverseAims {
+  if (perTurnMm === null || rpm === null) return aims;
+  const slowed = (aim: Figure, turnsPerMinute: number) =>
+    figure({
+      unit: 'mm/rev',
+      formula: `the smaller of {s} and ${turnsPerMinute} {p} / {n_w}`,
+      source: 'practice-crank',
+      terms: [
+        termOf('s', 'share of the wheel', aim),
+        term('p', 'slide for one turn of the crank', [perTurnMm, 'mm']),
+        term('n_w', 'lathe speed', [rpm, 'rpm']),
+      ],
+      compute: (share, perTurn, speed) => Math.min(share, (turnsPerMinute * perTurn) / speed),
+      note: `Fed by hand, ${turnsPerMinute} turns of the crank a minute.`,
+    });
+  return { rough: slowed(aims.rough, 60), finish: slowed(aims.finish, 30) };
 }
 
 /** A traverse that can be set: one of the lathe's feeds, or by hand where all of them are coarser. */

@@ -1,4 +1,5 @@
-import type { SetupPart, Verdict } from '../domain/setups';
+import type { CompoundZero } from '../domain/machines';
+import type { SetupPart, TaperMethod, Verdict } from '../domain/setups';
 import type { UnitName } from '../units/unit';
 import type { CautionId } from './cautions';
 import type { FindingCode } from './findings';
@@ -137,6 +138,44 @@ export interface DressStage {
   overlap: number;
 }
 
+/** How the slides are set for a taper. */
+export interface TaperPlan {
+  method: TaperMethod;
+  /** Between the cone's side and the spindle axis. */
+  halfAngle: Figure;
+  includedAngle: Figure;
+  /** Change of diameter over length. */
+  perLength: Figure;
+  smallDiameter: Figure;
+  slantLength: Figure;
+  /** Depth of cut, square to the surface, for each unit of infeed at the cross-slide. */
+  depthPerInfeed: Figure;
+  /** Null where the tailstock is set over. */
+  compound: {
+    /** How this lathe marks its scale; null while nobody has looked. */
+    zero: CompoundZero | null;
+    /** What the scale reads where its zero lies across the bed, and where it lies along it. */
+    fromCrossSlide: Figure;
+    fromSpindleAxis: Figure;
+    travel: Figure;
+    /** Turns of the crank in a second. */
+    crankRate: Figure;
+    /** The work speed at which one turn a second keeps the planned traverse. */
+    handFedSpeed: Figure;
+  } | null;
+  /** Null where the compound slide is set over. */
+  setover: Figure | null;
+}
+
+/** What the height of the wheel does, where it was measured. */
+export interface HeightPlan {
+  /** Share of the infeed that reaches the work. */
+  gain: Figure;
+  across: Figure;
+  /** Shims that raise the wheel to centre, thickest first; null where none do, or none are needed. */
+  shimsMm: number[] | null;
+}
+
 export interface Plan {
   rulesVersion: string;
   verdict: Verdict;
@@ -188,6 +227,14 @@ export interface Plan {
   /** Metal to remove on radius. */
   stock: Figure;
   jaws: JawPlan | null;
+  taper: TaperPlan | null;
+  height: HeightPlan | null;
+  measuring: {
+    /** How much the warm work still shrinks on diameter. */
+    shrinkage: Figure;
+    /** How far to move the tailstock, towards the wheel where positive, when the ends came out unlike. */
+    tailstockMove: Figure;
+  };
   passes: Pass[];
   cutFraction: { rough: Figure; finish: Figure };
   dressing: { rough: DressStage; finish: DressStage; diamond: Figure } | null;

@@ -3,7 +3,8 @@ import { MM_PER_INCH } from '../units/constants';
 import { finding } from './findings';
 import { quantity } from './figures';
 import { quillLength } from './quill';
-import { positive } from './surface';
+import { positive } from './sizes';
+import { kindOf } from './surface';
 import type { Finding } from './types';
 
 /** Two sizes that belong near each other, and the ratios (first over second) that are ordinary. */
@@ -50,7 +51,9 @@ function unitMistaken(ratio: number, { low, high }: Neighbours): 'inches' | 'mil
   return ratio < low && within(ratio * MM_PER_INCH) ? 'millimetres' : null;
 }
 
-function neighbours({ operation, work, wheelData, quill }: PlanInput): Neighbours[] {
+function neighbours(input: PlanInput): Neighbours[] {
+  const { work, wheelData, quill } = input;
+  const kind = kindOf(input);
   const wheel = ['wheel diameter', positive(wheelData?.diameterNowMm ?? null)] as const;
   const width = ['wheel width', positive(wheelData?.widthMm ?? null)] as const;
   const reach = [
@@ -59,7 +62,7 @@ function neighbours({ operation, work, wheelData, quill }: PlanInput): Neighbour
   ] as const;
   const length = ['length to grind', positive(work.lengthMm)] as const;
   const wheelOwn: Neighbours[] = [{ first: width, second: wheel, low: 0.04, high: 3 }];
-  if (operation === 'outside')
+  if (kind === 'outside')
     return [
       ...wheelOwn,
       {
@@ -70,7 +73,7 @@ function neighbours({ operation, work, wheelData, quill }: PlanInput): Neighbour
       },
     ];
   const bore =
-    operation === 'jaws'
+    kind === 'jaws'
       ? (['bore at the jaws', positive(work.jawBoreMm)] as const)
       : (['diameter of the bore', positive(work.diameterMm)] as const);
   const inside: Neighbours[] = [
@@ -78,7 +81,7 @@ function neighbours({ operation, work, wheelData, quill }: PlanInput): Neighbour
     ...wheelOwn,
     { first: length, second: reach, low: 0.05, high: 2.5 },
   ];
-  if (operation === 'bore') return inside;
+  if (kind === 'bore') return inside;
   return [
     ...inside,
     { first: ['width of a pad', positive(work.padWidthMm)], second: bore, low: 0.06, high: 1 },

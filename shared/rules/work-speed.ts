@@ -4,7 +4,7 @@ import { finding } from './findings';
 import { figure, quantity, stated, term } from './figures';
 import { rpmForSurfaceSpeed } from './speed';
 import type { Figure, Finding, LatheStep } from './types';
-import { positive } from './surface';
+import { positive } from './sizes';
 import { workRow } from './work-table';
 
 /** Usual and tolerable ratios of wheel speed to work speed. */

@@ -32,10 +32,12 @@ type Measure =
   | 'density'
   | 'time'
   | 'temperature change'
+  | 'taper'
   | 'share'
   | 'carats'
   | 'divisions'
   | 'passes'
+  | 'softness'
   | 'plain';
 
 interface EntryUnitRecord {
@@ -115,10 +117,14 @@ export const ENTRY_UNITS = {
   min: unit('time', SECONDS_PER_MINUTE, ['min', 1, 'minute', 'minutes']),
   K: unit('temperature change', 1, ['°C', 1, 'c']),
   '°F': unit('temperature change', 5 / 9, ['°F', 1, 'f']),
+  taper: unit('taper', 1, ['mm/mm', 5]),
+  'in/ft': unit('taper', MM_PER_INCH / MM_PER_FOOT, ['in/ft', 4]),
   '%': unit('share', 1, ['%', 1, 'percent']),
   ct: unit('carats', 1, ['ct', 2, 'carat', 'carats']),
   div: unit('divisions', 1, ['div', 1, 'divs', 'divisions']),
   passes: unit('passes', 1, ['passes', 0, 'pass']),
+  '1/mm': unit('softness', 1, ['1/mm', 2]),
+  '1/in': unit('softness', 1 / MM_PER_INCH, ['1/in', 0]),
   '1': unit('plain', 1, ['', 3]),
 } satisfies Record<UnitName, EntryUnitRecord> & Record<string, EntryUnitRecord>;
 
@@ -144,6 +150,8 @@ const INCH_UNITS: Partial<Record<UnitName, EntryUnit>> = {
   'J/mm3': 'hp·min/in3',
   kg: 'lb',
   K: '°F',
+  taper: 'in/ft',
+  '1/mm': '1/in',
 };
 
 /**

@@ -28,6 +28,8 @@ export const UNIT_NAMES = [
   'div',
   'passes',
   'K',
+  'taper',
+  '1/mm',
   '1',
 ] as const;
 

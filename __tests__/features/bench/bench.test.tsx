@@ -62,6 +62,7 @@ const lathe = {
     compoundZero: null,
     compoundDivisionMm: null,
     compoundTravelMm: null,
+    compoundMmPerTurn: null,
     spindleNose: null,
   },
 };

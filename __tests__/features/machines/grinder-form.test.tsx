@@ -149,6 +149,7 @@ it('shows an apprentice the facts of a grinder and no field', async () => {
       guard: 'none',
       postStiffnessNPerMm: null,
       wheelRotation: null,
+      shimsMm: [],
     },
     quills: [],
   };

@@ -82,6 +82,7 @@ describe('where it may run', () => {
       guard: 'fixed',
       postStiffnessNPerMm: null,
       wheelRotation: null,
+      shimsMm: [],
     },
     quills: [
       {

@@ -5,7 +5,7 @@ import { BORE_GRINDER, QUILL, SHAFT_GRINDER, SMALL_WHEEL } from '../../support/p
 
 const guard = (over: Partial<Parameters<typeof guardFindings>[0]>) =>
   guardFindings({
-    operation: 'bore',
+    kind: 'bore',
     grinder: BORE_GRINDER,
     shieldFitted: false,
     overrunMm: 4,
@@ -15,9 +15,9 @@ const guard = (over: Partial<Parameters<typeof guardFindings>[0]>) =>
 
 describe('the guard', () => {
   it('is asked for in outside work, and no shield takes its place', () => {
-    expect(guard({ operation: 'outside', grinder: SHAFT_GRINDER })).toEqual([]);
-    expect(guard({ operation: 'outside', shieldFitted: true })).toEqual(['stop guard-missing']);
-    expect(guard({ operation: 'outside', grinder: null })).toEqual([]);
+    expect(guard({ kind: 'outside', grinder: SHAFT_GRINDER })).toEqual([]);
+    expect(guard({ kind: 'outside', shieldFitted: true })).toEqual(['stop guard-missing']);
+    expect(guard({ kind: 'outside', grinder: null })).toEqual([]);
   });
 
   it('is the bore itself, as long as the wheel does not leave it', () => {
@@ -27,9 +27,9 @@ describe('the guard', () => {
   });
 
   it('is missing between jaws until a shield stands', () => {
-    expect(guard({ operation: 'jaws' })).toEqual(['check jaws-open']);
-    expect(guard({ operation: 'jaws', shieldFitted: true })).toEqual([]);
-    expect(guard({ operation: 'jaws', overrunMm: 12 })).toEqual(['stop wheel-leaves-work']);
+    expect(guard({ kind: 'jaws' })).toEqual(['check jaws-open']);
+    expect(guard({ kind: 'jaws', shieldFitted: true })).toEqual([]);
+    expect(guard({ kind: 'jaws', overrunMm: 12 })).toEqual(['stop wheel-leaves-work']);
   });
 });
 

@@ -197,7 +197,7 @@ describe('cautions', () => {
     expect(verdict).toBe('clear');
     expect(cautions[0]).toBe('marking-first');
     expect(cautions.length).toBeGreaterThan(20);
-    expect(cautions.includes('guard-outside')).toBe(operation === 'outside');
+    expect(cautions.includes('guard-outside')).toBe(['outside', 'taper'].includes(operation));
     expect(cautions.includes('jaws-fixed')).toBe(operation === 'jaws');
     expect(cautions).not.toContain('mounted-overhang');
   });
@@ -231,6 +231,7 @@ describe('the order of the work', () => {
       expect(steps.map(({ id }) => id)).toEqual([
         'survey',
         'holding',
+        ...(op === 'taper' ? ['set-over'] : []),
         'wheel',
         'clearance',
         'trial-run',

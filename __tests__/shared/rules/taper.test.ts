@@ -6,7 +6,7 @@ import { stated } from '@/shared/rules/figures';
 import {
   coneDiameter,
   halfAngle,
-  halfAngleOfTaperPerFoot,
+  halfAngleOfTaper,
   halfOfIncluded,
   normalInfeed,
   tailstockCorrection,
@@ -23,7 +23,7 @@ describe('the angle of a cone', () => {
       fc.property(anyHalf, fc.double({ min: 1, max: 500, noNaN: true }), (angle, length) => {
         const taper = taperPerLength(degrees(angle)).value ?? NaN;
         const back = halfAngle(10 + taper * length, 10, length).value ?? NaN;
-        const perFoot = halfAngleOfTaperPerFoot(12 * taper).value ?? NaN;
+        const perFoot = halfAngleOfTaper(taper).value ?? NaN;
         return Math.abs(back - angle) < 1e-9 && Math.abs(perFoot - angle) < 1e-9;
       }),
     );
@@ -34,7 +34,7 @@ describe('the angle of a cone', () => {
     expect(halfAngle(21, 20, 0).value).toBeNull();
     expect(halfAngle(20, 20, 10).value).toBe(0);
     expect(halfAngle(null, 20, 10).value).toBeNull();
-    expect(halfAngleOfTaperPerFoot(-1).value).toBeNull();
+    expect(halfAngleOfTaper(-1).value).toBeNull();
   });
 
   it('is half of an included angle short of a straight line', () => {

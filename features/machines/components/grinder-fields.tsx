@@ -1,13 +1,20 @@
 import { useFormikContext } from 'formik';
 
 import { TextField } from '@/features/forms';
-import { ChoiceField, EntryField, FieldRow, UNKNOWN } from '@/features/records';
+import {
+  ChoiceField,
+  EntryField,
+  FieldRow,
+  FormFold,
+  ListField,
+  UNKNOWN,
+} from '@/features/records';
 import { Stack } from '@/features/ui/card';
 import { Heading } from '@/features/ui/text';
 import { GUARDS, ROTATIONS } from '@/shared/domain/machines';
 import { TEXT_LIMITS } from '@/shared/domain/limits';
 
-import { GRINDER_FIELDS, type GrinderField } from '../fields';
+import { GRINDER_FIELDS, GRINDER_LISTS, type GrinderField } from '../fields';
 import type { GrinderValues } from '../grinder-values';
 import { GUARD_WORDS, ROTATION_WORDS } from '../words';
 
@@ -19,6 +26,7 @@ function Quantity({ name, required }: { name: GrinderField; required?: boolean }
 }
 
 export function GrinderFields() {
+  const { values } = useFormikContext<GrinderValues>();
   return (
     <Stack>
       <TextField
@@ -53,6 +61,13 @@ export function GrinderFields() {
         options={GUARDS.map((value) => ({ value, label: GUARD_WORDS[value] }))}
       />
       <Quantity name="postStiffnessNPerMm" />
+      <FormFold
+        label="Shims"
+        value={values.shimsMm.si?.length ? `${values.shimsMm.si.length} kept` : 'none recorded'}
+        names={['shimsMm']}
+      >
+        <ListField name="shimsMm" spec={GRINDER_LISTS.shimsMm} units={values.units} />
+      </FormFold>
     </Stack>
   );
 }

@@ -73,7 +73,7 @@ export function LatheFields() {
       <FormFold
         label="Compound slide"
         value={compound}
-        names={['compoundDivisionMm', 'compoundTravelMm']}
+        names={['compoundDivisionMm', 'compoundMmPerTurn', 'compoundTravelMm']}
       >
         <ChoiceField
           name="compoundZero"
@@ -86,6 +86,7 @@ export function LatheFields() {
           ]}
         />
         <Quantity name="compoundDivisionMm" />
+        <Quantity name="compoundMmPerTurn" />
         <Quantity name="compoundTravelMm" />
       </FormFold>
     </Stack>

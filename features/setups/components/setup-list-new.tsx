@@ -14,6 +14,7 @@ const OPERATION_DETAILS: Record<Operation, string> = {
   jaws: 'True the jaws of a chuck from the run-out of a bar',
   bore: 'A hole, true and to size',
   outside: 'A shaft or journal, true and to size',
+  taper: 'A cone outside or inside, or a lathe centre',
 };
 
 /** Starts a setup: asks for the operation, and leads to the planner under a new address. */
