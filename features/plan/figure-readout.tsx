@@ -6,7 +6,7 @@ import { ListRow } from '@/features/ui/list-row';
 import { Readout } from '@/features/ui/readout';
 import { Strong } from '@/features/ui/text';
 
-import { figureNumber, figureText, figureUnit } from './figure-text';
+import { bandText, figureNumber, figureText, figureUnit } from './figure-text';
 import { useReader } from './reader';
 
 interface FigureReadoutProps extends Pick<ComponentProps<typeof Readout>, 'size' | 'on'> {
@@ -47,10 +47,11 @@ export function FigureRow({
   detail,
 }: Pick<FigureReadoutProps, 'label' | 'figure' | 'options'> & { detail?: string }) {
   const { units, showWorking } = useReader();
+  const shown = detail ?? bandText(figure, units);
   return (
     <ListRow
       label={label}
-      {...(detail ? { detail } : {})}
+      {...(shown ? { detail: shown } : {})}
       aside={<Strong>{figureText(figure, units, options)}</Strong>}
       onPress={() => showWorking(label, figure, options)}
     />

@@ -26,6 +26,13 @@ export function figureText(figure: Figure, units: UnitSystem, options: FormatOpt
   return formatQuantity({ value: figure.value, unit: figure.unit }, units, options);
 }
 
+/** The least and greatest that the range of an input gives; null where that does not matter. */
+export function bandText({ band, unit }: Figure, units: UnitSystem): string | null {
+  if (!band) return null;
+  const low = formatQuantity({ value: band.low, unit }, units, { withUnit: false });
+  return `${low} to ${formatQuantity({ value: band.high, unit }, units)}`;
+}
+
 /** How findings write their quantities. */
 export const quantityText =
   (units: UnitSystem) =>
@@ -69,13 +76,7 @@ export function workingProps(figure: Figure, units: UnitSystem, options: FormatO
     })),
     result: figure.value === null ? null : `${exact(figure)}${shownAs(figure, units, options)}`,
     ...(figure.band
-      ? {
-          band: `The range of the values behind it gives ${formatQuantity(
-            { value: figure.band.low, unit: figure.unit },
-            units,
-            { withUnit: false },
-          )} to ${formatQuantity({ value: figure.band.high, unit: figure.unit }, units)}.`,
-        }
+      ? { band: `The range of the values behind it gives ${bandText(figure, units)}.` }
       : {}),
     ...(note ? { note } : {}),
     source: [title, place].filter(Boolean).join(', '),

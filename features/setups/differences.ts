@@ -2,7 +2,16 @@ import { getIn } from 'formik';
 
 import { QUANTITY_FIELDS, quantityField, type QuantityPath } from './fields';
 import { textOf, type SetupValues } from './form';
-import { HOLDING_WORDS, MATERIAL_WORDS, OPERATION_WORDS, PRELOAD_WORDS } from './words';
+import {
+  HOLDING_WORDS,
+  MATERIAL_WORDS,
+  OPERATION_WORDS,
+  PRELOAD_WORDS,
+  SHOULDER_WORDS,
+  SIDE_WORDS,
+  TAPER_GIVEN_WORDS,
+  TAPER_METHOD_WORDS,
+} from './words';
 
 export interface Difference {
   path: string;
@@ -16,6 +25,10 @@ const ANSWERS: { path: string; label: string; words?: Record<string, string> }[]
   { path: 'work.material', label: 'Material', words: MATERIAL_WORDS },
   { path: 'work.holding', label: 'Holding', words: HOLDING_WORDS },
   { path: 'work.preload', label: 'Preload', words: PRELOAD_WORDS },
+  { path: 'work.taperSide', label: 'Side of the taper', words: SIDE_WORDS },
+  { path: 'work.taperMethod', label: 'Taper made with', words: TAPER_METHOD_WORDS },
+  { path: 'work.taperGiven', label: 'Taper given by', words: TAPER_GIVEN_WORDS },
+  { path: 'work.shoulders', label: 'Shoulders', words: SHOULDER_WORDS },
   { path: 'work.interrupted', label: 'Interrupted surface' },
   { path: 'work.throughBore', label: 'Through bore' },
   { path: 'machine.latheId', label: 'Lathe' },

@@ -43,6 +43,37 @@ export const QUANTITY_FIELDS = {
     unit: 'mm',
     limit: 'clearDepthMm',
   },
+  'work.includedAngleDeg': {
+    label: 'Included angle',
+    hint: 'From side to side; a lathe centre has 60°.',
+    unit: 'deg',
+    limit: 'includedAngleDeg',
+  },
+  'work.smallDiameterMm': {
+    label: 'Diameter at the small end',
+    unit: 'mm',
+    limit: 'smallDiameterMm',
+  },
+  'work.taperPerLength': {
+    label: 'Taper',
+    hint: 'Diameter over length, as 1/20.',
+    unit: 'taper',
+    limit: 'taperPerLength',
+  },
+  'work.warmerK': {
+    label: 'Warmer than the gauge',
+    unit: 'K',
+    limit: 'warmerK',
+  },
+  'work.headEndMm': { label: 'Diameter near the headstock', unit: 'mm', limit: 'diameterMm' },
+  'work.tailEndMm': { label: 'Diameter near the tailstock', unit: 'mm', limit: 'diameterMm' },
+  'work.endsApartMm': { label: 'Distance between the two', unit: 'mm', limit: 'lengthMm' },
+  'machine.belowCentreMm': {
+    label: 'Wheel axis below centre',
+    hint: 'Minus where it stands above; 0 on centre.',
+    unit: 'mm',
+    limit: 'belowCentreMm',
+  },
   'work.jawCount': { label: 'Jaws', unit: '1', limit: 'jawCount', whole: true },
   'work.jawBoreMm': {
     label: 'Bore at the jaws',
@@ -149,6 +180,10 @@ export type QuantityPath = keyof typeof QUANTITY_FIELDS;
 const OPERATION_LABELS: Partial<Record<Operation, Partial<Record<QuantityPath, string>>>> = {
   jaws: { 'work.lengthMm': 'Pad length' },
   bore: { 'work.diameterMm': 'Bore before grinding' },
+  taper: {
+    'work.diameterMm': 'Diameter at the big end',
+    'work.lengthMm': 'Length along the axis',
+  },
 };
 
 export function quantityField(path: QuantityPath, operation: Operation): QuantitySpec {

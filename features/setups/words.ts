@@ -6,6 +6,10 @@ import type {
   Preload,
   SetupPart,
   SetupState,
+  Shoulders,
+  Side,
+  TaperGiven,
+  TaperMethod,
 } from '@/shared/domain/setups';
 
 export const OPERATION_WORDS: Record<Operation, string> = {
@@ -56,6 +60,33 @@ export const PRELOAD_WORDS: Record<Preload, string> = {
   ring: 'Ring gripped outside the pads',
   plug: 'Plug behind the pads',
   spider: 'Spider between the jaws',
+};
+
+/** Where four operations stand side by side. */
+export const OPERATION_SHORT: Record<Operation, string> = {
+  jaws: 'Jaws',
+  bore: 'Bore',
+  outside: 'Outside',
+  taper: 'Taper',
+};
+
+export const SIDE_WORDS: Record<Side, string> = { outside: 'Outside', inside: 'Inside' };
+
+export const TAPER_METHOD_WORDS: Record<TaperMethod, string> = {
+  compound: 'Compound slide',
+  tailstock: 'Tailstock',
+};
+
+export const TAPER_GIVEN_WORDS: Record<TaperGiven, string> = {
+  angle: 'Angle',
+  'small end': 'Small end',
+  taper: 'Taper',
+};
+
+export const SHOULDER_WORDS: Record<Shoulders, string> = {
+  none: 'None',
+  'one end': 'At one end',
+  'both ends': 'At both ends',
 };
 
 export const STROKE_WORDS: Record<PassStrokes, string> = {

@@ -32,6 +32,7 @@ export { assemblePlanInput, typedWheelData } from './assemble';
 export { CAUTIONS } from './cautions';
 export { FINDINGS, findingWords, type FindingCode } from './findings';
 export { orderOfWork } from './order-of-work';
+export { kindOf } from './surface';
 export { quickCheck, type QuickCheck, type QuickCheckInput } from './quick-check';
 export type * from './types';
 export type { PlanInput } from '../domain/setups';

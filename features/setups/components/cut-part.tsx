@@ -76,6 +76,26 @@ export function CutPart() {
           <PlannerQuantity path="cut.sparkOutPasses" remark="optional" />
         </QuantityRow>
       </Fold>
+      <Fold label="Dial and wheel wear" value={dialWords(infeed)}>
+        <List label="Dial and wheel wear">
+          {infeed.compoundAngle ? (
+            <FigureRow
+              label="Compound for fine infeed"
+              detail="from the spindle axis"
+              figure={infeed.compoundAngle}
+            />
+          ) : null}
+          {infeed.perTurn ? (
+            <FigureRow label="Infeed for each turn, rough" figure={infeed.perTurn.rough} />
+          ) : null}
+          <FigureRow
+            label="The wheel wears, each pass"
+            detail="on radius, fed apart from the schedule"
+            figure={infeed.wheelWear}
+            options={{ digits: 5 }}
+          />
+        </List>
+      </Fold>
       <Fold label="Force, power and heat" value="what the cut asks of the machine">
         <List label="Force, power and heat">
           <FigureRow label="Cut fraction, rough" figure={plan.cutFraction.rough} />
@@ -86,10 +106,24 @@ export function CutPart() {
           <FigureRow label="Force pressing the quill back" figure={plan.power.normalForce} />
           <FigureRow label="Power" figure={plan.power.power} />
           <FigureRow label="Burning begins above" figure={plan.power.burnThreshold} />
+          <FigureRow
+            label="Equivalent chip thickness"
+            figure={plan.power.chipThickness}
+            options={{ digits: 6 }}
+          />
+          <FigureRow label="Removed for each width of wheel" figure={plan.power.specificRemoval} />
         </List>
       </Fold>
     </Stack>
   );
+}
+
+/** Divisions to set at each pass, as they stand on the dial. */
+function dialWords({ roughDivisions, finishDivisions }: Plan['infeed']): string {
+  const words = [roughDivisions, finishDivisions].map((divisions) =>
+    divisions === null ? 'not by dial' : String(Math.round(divisions * 100) / 100),
+  );
+  return `${words.join(' and ')} divisions`;
 }
 
 function LatheSteps() {

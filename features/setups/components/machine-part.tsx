@@ -11,14 +11,16 @@ import { Small } from '@/features/ui/text';
 import { formatQuantity } from '@/shared/units/format';
 import type { UnitSystem } from '@/shared/domain/people';
 import type { QuillData } from '@/shared/domain/machines';
+import { kindOf } from '@/shared/rules';
 
 import { usePlanner } from '../planner-context';
+import { CentreHeight } from './centre-height';
 
 /** Which lathe, which grinder, which quill, and what stands around the wheel. */
 export function MachinePart() {
   const { shop, may } = useShop();
   const { values, setInput, setInputs, plan, lathes, grinders } = usePlanner();
-  const { operation, machine } = values.inputs;
+  const { machine } = values.inputs;
   const grinder = grinders.find(({ id }) => id === machine.grinderId);
   const add = (kind: 'lathes' | 'grinders', label: string) =>
     may('machine:edit') ? (
@@ -89,7 +91,7 @@ export function MachinePart() {
         name="machine.shieldFitted"
         label="A fixed shield stands around the open wheel"
         hint={
-          operation === 'outside'
+          kindOf(values.inputs) === 'outside'
             ? 'A shield does not take the place of the grinder’s own guard.'
             : 'Signed for before the wheel starts; the wheel starts and stops behind it.'
         }
@@ -108,11 +110,13 @@ export function MachinePart() {
           onChange={(next) => setInput('machine.workRotation', next)}
         />
       </Fold>
+      <CentreHeight />
       <Fold label="Quill" value="stiffness and bending">
         <List label="Quill figures">
           <FigureRow label="Stiffness of the quill" figure={plan.quill.stiffness} />
           <FigureRow label="Stiffness at the wheel" figure={plan.quill.stiffnessAtWheel} />
           <FigureRow label="First bending frequency" figure={plan.quill.firstFrequency} />
+          <FigureRow label="Taper that its bend leaves" figure={plan.quill.taper} />
         </List>
       </Fold>
     </Stack>

@@ -9,11 +9,14 @@ import { Engraved } from '@/features/ui/text';
 import { useLayout } from '@/features/ui/use-layout';
 import { MATERIALS } from '@/shared/domain/materials';
 import { HOLDINGS, OPERATIONS, PRELOADS } from '@/shared/domain/setups';
+import { kindOf } from '@/shared/rules';
 
 import { usePlanner } from '../planner-context';
-import { HOLDING_WORDS, MATERIAL_WORDS, OPERATION_WORDS, PRELOAD_WORDS } from '../words';
+import { HOLDING_WORDS, MATERIAL_WORDS, OPERATION_SHORT, PRELOAD_WORDS } from '../words';
 import { PlannerQuantity, QuantityRow } from './planner-fields';
 import { JawContactPicture } from './pictures/jaw-contact';
+import { RoundWorkFolds } from './round-work-folds';
+import { TaperFields, TaperFigures } from './taper-fields';
 
 /** What is ground, of what, and how it runs now. */
 export function WorkPart() {
@@ -24,7 +27,7 @@ export function WorkPart() {
       <Segmented
         name="operation"
         label="Operation"
-        options={OPERATIONS.map((value) => ({ value, label: OPERATION_WORDS[value] }))}
+        options={OPERATIONS.map((value) => ({ value, label: OPERATION_SHORT[value] }))}
         value={operation}
         onChange={(next) => setInput('operation', next)}
       />
@@ -37,9 +40,12 @@ export function WorkPart() {
         onChange={(next) => setInput('work.material', next)}
       />
       {operation === 'jaws' ? <JawFields /> : <RoundFields />}
+      {operation === 'taper' ? <TaperFigures /> : null}
       <List label="What the work asks for">
         <FigureRow
-          label="To come off, on radius"
+          label={
+            operation === 'taper' ? 'To come off, at the cross-slide' : 'To come off, on radius'
+          }
           figure={plan.stock}
           options={{ rounding: 'up' }}
         />
@@ -114,13 +120,17 @@ const jawFoldValue = (lastGround: number | null, bellMouth: number | null) =>
 function RoundFields() {
   const { values, setInput } = usePlanner();
   const { operation, work } = values.inputs;
-  const outside = operation === 'outside';
+  const outside = kindOf(values.inputs) === 'outside';
   return (
     <>
-      <QuantityRow>
-        <PlannerQuantity path="work.diameterMm" />
-        <PlannerQuantity path="work.lengthMm" />
-      </QuantityRow>
+      {operation === 'taper' ? (
+        <TaperFields />
+      ) : (
+        <QuantityRow>
+          <PlannerQuantity path="work.diameterMm" />
+          <PlannerQuantity path="work.lengthMm" />
+        </QuantityRow>
+      )}
       <QuantityRow>
         <PlannerQuantity path="work.stockOnDiameterMm" />
         <PlannerQuantity path="work.runOutMm" />
@@ -162,6 +172,7 @@ function RoundFields() {
         checked={work.interrupted}
         onChange={(next) => setInput('work.interrupted', next)}
       />
+      <RoundWorkFolds />
     </>
   );
 }
