@@ -22,7 +22,7 @@ function packagesAreCurrent() {
     .filter(([where]) => where !== '')
     .every(([where, { version, optional, devOptional, peer }]) =>
       where in installed
-        ? installed[where].version === version
+        ? installed[where].version === version && fs.existsSync(path.join(ROOT, where))
         : Boolean(optional ?? devOptional ?? peer),
     );
 }
