@@ -1,7 +1,7 @@
 import type { Browser, Page } from 'playwright-core';
 
 import { inspect, launchBrowser, openVisitor, type Size } from '../support/browser';
-import { PlannerPage, signIn } from './planner-page';
+import { newSetup, PlannerPage, signIn } from './planner-page';
 
 jest.setTimeout(240_000);
 
@@ -30,16 +30,7 @@ async function steadyPlan(page: Page): Promise<unknown> {
   );
 }
 
-async function newJawSetup(page: Page, wide: boolean) {
-  await page.getByRole('link', { name: 'Setups' }).first().click();
-  await page.getByRole('button', { name: 'New setup' }).filter({ visible: true }).click();
-  await page
-    .getByRole('dialog')
-    .getByRole('button', { name: /Chuck jaws/ })
-    .click();
-  await page.waitForURL(/setups\/[0-9a-f-]{36}/);
-  return new PlannerPage(page, wide);
-}
+const newJawSetup = (page: Page, wide: boolean) => newSetup(page, wide, /Chuck jaws/);
 
 describe.each(SIZES)('on a %s screen', (size) => {
   const wide = size === 'wide';

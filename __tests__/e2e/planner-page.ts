@@ -36,6 +36,15 @@ export async function signIn(page: Page, role: Role) {
   await page.getByRole('button', { name: 'Sign in', exact: true }).click();
 }
 
+/** Starts a setup for the operation, and stands in its planner. */
+export async function newSetup(page: Page, wide: boolean, operation: RegExp) {
+  await page.getByRole('link', { name: 'Setups' }).first().click();
+  await page.getByRole('button', { name: 'New setup' }).filter({ visible: true }).click();
+  await page.getByRole('dialog').getByRole('button', { name: operation }).click();
+  await page.waitForURL(/setups\/[0-9a-f-]{36}/);
+  return new PlannerPage(page, wide);
+}
+
 /** The planner of one setup, as a person works it on either size of screen. */
 export class PlannerPage {
   constructor(
@@ -69,11 +78,11 @@ export class PlannerPage {
     await this.choose('How the jaws are loaded', /Ring/);
   }
 
-  async chooseMachines() {
+  async chooseMachines([lathe, grinder, quill] = [/Tarnholt/, /inside/, /Stepped quill/]) {
     await this.part('Machine');
-    await this.choose('Lathe', /Tarnholt/);
-    await this.choose('Tool-post grinder', /inside/);
-    await this.choose('Quill or arbor', /Stepped quill/);
+    await this.choose('Lathe', lathe);
+    await this.choose('Tool-post grinder', grinder);
+    await this.choose('Quill or arbor', quill);
     await this.page.getByRole('checkbox', { name: /fixed shield/ }).click();
   }
 
