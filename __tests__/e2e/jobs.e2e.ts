@@ -1,7 +1,7 @@
 import type { Browser, Page } from 'playwright-core';
 
 import { inspect, launchBrowser, openVisitor, type Size } from '../support/browser';
-import { newSetup, PlannerPage, signIn } from './planner-page';
+import { newSetup, type PlannerPage, signIn } from './planner-page';
 
 jest.setTimeout(300_000);
 
