@@ -1,5 +1,6 @@
 import type { UnitSystem } from '@/shared/domain/people';
 import type { Figure, Quantity } from '@/shared/rules';
+import { isShopSetting } from '@/shared/rules/shop-settings';
 import { SOURCES, type SourceId } from '@/shared/rules/sources';
 import { displayUnit, ENTRY_UNITS } from '@/shared/units/entry-units';
 import { formatQuantity, type FormatOptions } from '@/shared/units/format';
@@ -98,7 +99,8 @@ function shownAs(figure: Figure, units: UnitSystem, options: FormatOptions): str
 
 export function sourceWords(id: SourceId): { title: string; place: string; mark: string } {
   const { title, place, mark } = SOURCES[id];
-  return { title, place, mark: MARK_WORDS[mark] };
+  const own = mark === 'memory' && isShopSetting(id) ? '; your shop can set its own value' : '';
+  return { title, place, mark: MARK_WORDS[mark] + own };
 }
 
 const MARK_WORDS = {
@@ -109,5 +111,5 @@ const MARK_WORDS = {
   derived: 'Derived from first principles, checked numerically',
   'common practice': 'Common practice, no source',
   entered: 'As entered',
-  memory: 'Recalled from memory, text not seen; your shop can set its own value',
+  memory: 'Recalled from memory, text not seen',
 } as const;

@@ -24,12 +24,22 @@ export interface ShopRules {
   /** Overlap ratio of dressing. */
   roughDressOverlap: number;
   finishDressOverlap: number;
+  /** Depth of a dressing pass, mm on the wheel's radius, and how many. */
+  roughDressDepthMm: number;
+  finishDressDepthMm: number;
+  roughDressPasses: number;
+  finishDressPasses: number;
   /** Diamond's tip radius where it is not known, mm. */
   assumedTipRadiusMm: number;
   /** Volume ground over wheel volume worn. */
   grindingRatio: number;
   /** Tangential over normal force. */
   forceRatio: number;
+  /** How many times as fast as the work the wheel usually runs. */
+  speedRatioLow: number;
+  speedRatioHigh: number;
+  /** Expansion of steel for each kelvin. */
+  steelExpansionPerK: number;
   /** Metal taken beyond clean-up on jaws, mm on radius. */
   jawAllowanceMm: number;
   /** Trial run after a wheel change, and each day, minutes. */
@@ -50,9 +60,16 @@ export const DEFAULT_SHOP_RULES: ShopRules = {
   finishTraverseShare: 1 / 16,
   roughDressOverlap: 3,
   finishDressOverlap: 6,
+  roughDressDepthMm: 0.025,
+  finishDressDepthMm: 0.0125,
+  roughDressPasses: 3,
+  finishDressPasses: 2,
   assumedTipRadiusMm: 0.38,
   grindingRatio: 20,
   forceRatio: 0.4,
+  speedRatioLow: 40,
+  speedRatioHigh: 120,
+  steelExpansionPerK: 11.5e-6,
   jawAllowanceMm: 0.025,
   trialRunMinutes: 3,
   dailyTrialRunMinutes: 1,

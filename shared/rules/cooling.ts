@@ -1,25 +1,28 @@
+import type { ShopRules } from '../domain/shop-rules';
 import { assumedTerm, figure, term } from './figures';
 import type { Figure } from './types';
-
-/** Expansion of steel for each kelvin. */
-const STEEL_PER_K = 11.5e-6;
 
 /**
  * How much a warm part shrinks on diameter while it cools: why it is measured cold.
  *
  * @param diameterMm - diameter, mm.
  * @param warmerK - how much warmer the part is than the gauge and the room, kelvin (the same as degrees C).
+ * @param rules - the shop's value for the expansion of steel, for each kelvin.
  * @returns shrinkage on diameter, mm, unrounded, for steel.
  * @source memory-expansion
- * @example shrinkage(50, 20).value // 0.0115 mm
+ * @example shrinkage(50, 20, rules).value // 0.0115 mm
  */
-export function shrinkage(diameterMm: number | null, warmerK: number | null): Figure {
+export function shrinkage(
+  diameterMm: number | null,
+  warmerK: number | null,
+  { steelExpansionPerK }: Pick<ShopRules, 'steelExpansionPerK'>,
+): Figure {
   return figure({
     unit: 'mm',
     formula: '{ΔD} = {α} {D} {ΔT}',
     source: 'memory-expansion',
     terms: [
-      assumedTerm('α', 'expansion of steel for each degree', [STEEL_PER_K, '1']),
+      assumedTerm('α', 'expansion of steel for each degree', [steelExpansionPerK, '1']),
       term('D', 'diameter', [diameterMm, 'mm']),
       term('ΔT', 'warmer than the gauge', [warmerK, 'K']),
     ],

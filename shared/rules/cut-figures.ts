@@ -1,5 +1,5 @@
 import type { StageCutPlan } from './cut-stage';
-import { figure, stated, term } from './figures';
+import { assumedTerm, figure, stated, term } from './figures';
 import { steadyLag } from './spring';
 import { squareTo, type Surface } from './surface';
 import type { Figure } from './types';
@@ -38,7 +38,12 @@ export function infeedFigure(stage: StageCutPlan | null): Figure {
   const terms = typed
     ? [term('a', CAP_WORDS.typed, [wantedMm, 'mm'])]
     : [
-        ...caps.map((cap) => term(`a_${cap.by}`, CAP_WORDS[cap.by], [cap.valueMm, 'mm'])),
+        ...caps.map((cap) =>
+          (cap.by === 'shop' ? assumedTerm : term)(`a_${cap.by}`, CAP_WORDS[cap.by], [
+            cap.valueMm,
+            'mm',
+          ]),
+        ),
         ...(caps.some((cap) => cap.by === by)
           ? []
           : [term(`a_${by}`, CAP_WORDS[by], [wantedMm, 'mm'])]),

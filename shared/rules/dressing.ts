@@ -7,10 +7,6 @@ import { finding } from './findings';
 import type { DressStage, Figure, Finding } from './types';
 
 /** Depth aimed at and passes taken where none are given, mm on the wheel's radius. */
-const USUAL = {
-  rough: { depthMm: 0.025, passes: 3 },
-  finish: { depthMm: 0.0125, passes: 2 },
-} as const;
 /** Printed as 0.025 mm and as 0.001 in: the same limit, so a dial in inches may stand on it. */
 const MOST_DEPTH_MM = MM_PER_INCH / 1000;
 const LEAST_OVERLAP = 2;
@@ -19,7 +15,7 @@ const OVERRUN_MM = 2;
 const SLACK = 1e-9;
 const SECONDS_PER_MINUTE = 60;
 
-type Stage = keyof typeof USUAL;
+type Stage = 'rough' | 'finish';
 
 /**
  * How wide a groove the diamond's tip cuts into the wheel.
@@ -139,7 +135,7 @@ export function dressCusp(depthMm: number | null, overlap: number | null): Figur
 /** What the dressing of a setup depends on. */
 export interface DressingInput extends DressingConditions {
   dress: DressInputs;
-  rules: Pick<ShopRules, 'roughDressOverlap' | 'finishDressOverlap' | 'assumedTipRadiusMm'>;
+  rules: ShopRules;
   /** Wheel diameter when new, mm. */
   diameterMm: number | null;
   widthMm: number | null;
@@ -183,10 +179,21 @@ function dressStage(stage: Stage, input: DressingInput): DressStage {
     stage === 'rough'
       ? { depth: dress.roughDepthMm, passes: dress.roughPasses, overlap: dress.roughOverlap }
       : { depth: dress.finishDepthMm, passes: dress.finishPasses, overlap: dress.finishOverlap };
-  const passes = chosen.passes ?? USUAL[stage].passes;
-  const overlap =
-    chosen.overlap ?? (stage === 'rough' ? rules.roughDressOverlap : rules.finishDressOverlap);
-  const depth = depthFigure(stage, chosen.depth);
+  const usual =
+    stage === 'rough'
+      ? {
+          depthMm: rules.roughDressDepthMm,
+          passes: rules.roughDressPasses,
+          overlap: rules.roughDressOverlap,
+        }
+      : {
+          depthMm: rules.finishDressDepthMm,
+          passes: rules.finishDressPasses,
+          overlap: rules.finishDressOverlap,
+        };
+  const passes = chosen.passes ?? usual.passes;
+  const overlap = chosen.overlap ?? usual.overlap;
+  const depth = depthFigure(usual.depthMm, chosen.depth);
   const tipRadius = dress.tipRadiusMm ?? rules.assumedTipRadiusMm;
   const lead = dressLead(dressWidth(tipRadius, depth.value, dress.tipRadiusMm === null), overlap);
   const traverseRate = dressTraverse(lead, input.spindle);
@@ -211,14 +218,14 @@ function dressStage(stage: Stage, input: DressingInput): DressStage {
   };
 }
 
-function depthFigure(stage: Stage, chosenMm: number | null): Figure {
+function depthFigure(usualMm: number, chosenMm: number | null): Figure {
   return figure({
     unit: 'mm',
     formula: '{a_d}',
     source: chosenMm === null ? 'memory-dress-depth' : 'entered',
     terms: [
       (chosenMm === null ? assumedTerm : term)('a_d', "depth on the wheel's radius", [
-        chosenMm ?? USUAL[stage].depthMm,
+        chosenMm ?? usualMm,
         'mm',
       ]),
     ],

@@ -145,7 +145,7 @@ export function planSetup(given: PlanInput): Plan {
     }),
     ...cone.findings,
     ...high.findings,
-    ...workSpeedFindings(turning, surface.diameterMm),
+    ...workSpeedFindings(turning, surface.diameterMm, input.rules),
     ...outcome.findings,
     ...power.findings,
     ...bent.findings,
@@ -181,7 +181,11 @@ export function planSetup(given: PlanInput): Plan {
     taper: cone.taper,
     height: high.height,
     measuring: {
-      shrinkage: shrinkage(steel ? surface.diameterMm : null, notNegative(work.warmerK)),
+      shrinkage: shrinkage(
+        steel ? surface.diameterMm : null,
+        notNegative(work.warmerK),
+        input.rules,
+      ),
       tailstockMove: tailstockCorrection(
         {
           firstMm: positive(work.headEndMm),

@@ -1,5 +1,6 @@
 import type { LatheData } from '../domain/machines';
 import type { Material } from '../domain/materials';
+import type { ShopRules } from '../domain/shop-rules';
 import { finding } from './findings';
 import { figure, quantity, stated, term } from './figures';
 import { rpmForSurfaceSpeed } from './speed';
@@ -7,8 +8,8 @@ import type { Figure, Finding, LatheStep } from './types';
 import { positive } from './sizes';
 import { workRow } from './work-table';
 
-/** Usual and tolerable ratios of wheel speed to work speed. */
-const RATIO = { low: 40, high: 120, poorLow: 20, poorHigh: 200 };
+/** Outside these ratios of wheel speed to work speed the plan is worth a Check. */
+const POOR = { low: 20, high: 200 };
 
 export interface WorkSpeed {
   target: Figure;
@@ -147,9 +148,14 @@ function latheSteps(
  *
  * @param plan - from planWorkSpeed.
  * @param diameterMm - diameter of the ground surface, mm.
+ * @param usual - the shop's usual ratios of wheel speed to work speed.
  * @returns notes and Checks.
  */
-export function workSpeedFindings(plan: WorkSpeed, diameterMm: number | null): Finding[] {
+export function workSpeedFindings(
+  plan: WorkSpeed,
+  diameterMm: number | null,
+  usual: Pick<ShopRules, 'speedRatioLow' | 'speedRatioHigh'>,
+): Finding[] {
   const found: Finding[] = [];
   const rpm = plan.latheRpm.value;
   const listed = plan.steps.map((step) => step.rpm);
@@ -167,17 +173,15 @@ export function workSpeedFindings(plan: WorkSpeed, diameterMm: number | null): F
   if (ratio === null || wanted === null) return found;
   const figures = {
     ratio: quantity(ratio, '1'),
-    low: quantity(RATIO.low, '1'),
-    high: quantity(RATIO.high, '1'),
+    low: quantity(usual.speedRatioLow, '1'),
+    high: quantity(usual.speedRatioHigh, '1'),
     rpm: quantity(wanted, 'rpm'),
   };
-  if (ratio < RATIO.low)
+  if (ratio < usual.speedRatioLow)
+    found.push(finding('speed-ratio-low', { level: ratio < POOR.low ? 'check' : 'note', figures }));
+  if (ratio > usual.speedRatioHigh)
     found.push(
-      finding('speed-ratio-low', { level: ratio < RATIO.poorLow ? 'check' : 'note', figures }),
-    );
-  if (ratio > RATIO.high)
-    found.push(
-      finding('speed-ratio-high', { level: ratio > RATIO.poorHigh ? 'check' : 'note', figures }),
+      finding('speed-ratio-high', { level: ratio > POOR.high ? 'check' : 'note', figures }),
     );
   return found;
 }

@@ -1,5 +1,6 @@
 import fc from 'fast-check';
 
+import { DEFAULT_SHOP_RULES } from '@/shared/domain/shop-rules';
 import { compoundReading, handFedWorkSpeed, slantTravel } from '@/shared/rules/compound';
 import { shrinkage } from '@/shared/rules/cooling';
 import { stated } from '@/shared/rules/figures';
@@ -105,9 +106,9 @@ describe('the tailstock', () => {
 
 describe('cooling', () => {
   it('shrinks steel by about a hundredth on 50 mm and 20 degrees', () => {
-    expect(shrinkage(50, 20).value).toBeCloseTo(0.0115, 9);
-    expect(shrinkage(50, 0).value).toBe(0);
-    expect(shrinkage(50, null).value).toBeNull();
-    expect(shrinkage(50, 20).working.terms[0]?.assumed).toBe(true);
+    expect(shrinkage(50, 20, DEFAULT_SHOP_RULES).value).toBeCloseTo(0.0115, 9);
+    expect(shrinkage(50, 0, DEFAULT_SHOP_RULES).value).toBe(0);
+    expect(shrinkage(50, null, DEFAULT_SHOP_RULES).value).toBeNull();
+    expect(shrinkage(50, 20, DEFAULT_SHOP_RULES).working.terms[0]?.assumed).toBe(true);
   });
 });
