@@ -1,7 +1,6 @@
+import { MarkingField } from '@/features/plan';
 import { Stack } from '@/features/ui/card';
-import { Field } from '@/features/ui/field';
 import { Select } from '@/features/ui/select';
-import { TEXT_LIMITS } from '@/shared/domain/limits';
 import { MARKING_PLACES } from '@/shared/domain/wheels';
 
 import { usePlanner } from '../planner-context';
@@ -16,13 +15,10 @@ export function TypedWheelFields() {
   const fills = plan.findings.some(({ code }) => code === 'wheel-fills-bore');
   return (
     <Stack>
-      <Field
+      <MarkingField
         name="wheel.typed.marking"
-        label="Marking"
-        hint="As printed: abrasive, grain, grade, structure, bond."
         value={typed.marking ?? ''}
         onChangeText={(text) => setInput('wheel.typed.marking', text === '' ? null : text)}
-        maxLength={TEXT_LIMITS.marking}
       />
       <QuantityRow>
         <PlannerQuantity

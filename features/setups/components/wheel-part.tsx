@@ -16,6 +16,7 @@ import { usePlanner } from '../planner-context';
 import { LOOK_WORDS, MARKING_PLACE_WORDS, RING_WORDS } from '../words';
 import { StepLimits } from './pictures/step-limits';
 import { TypedWheelFields } from './typed-wheel-fields';
+import { WheelMarks } from './wheel-marks';
 import { WheelPicker } from './wheel-picker';
 
 const LIMIT_WORDS: Record<SpeedLimit['kind'], string> = {
@@ -56,6 +57,7 @@ export function WheelPart() {
           </List>
         </Fold>
       ) : null}
+      <WheelMarks />
       <Soundness />
     </Stack>
   );

@@ -1,5 +1,5 @@
 import { readDraft, draftKey } from '@/features/forms';
-import { FindingList } from '@/features/plan';
+import { FindingList, MarkingFold } from '@/features/plan';
 import { Facts } from '@/features/records';
 import { useShop } from '@/features/session';
 import { Row, Stack } from '@/features/ui/card';
@@ -58,6 +58,7 @@ export function WheelDetail({ wheel, today }: WheelDetailProps) {
       {standingOf(wheel.data, today).usable ? (
         <WhereItMayRun wheel={wheel.data} today={today} />
       ) : null}
+      <MarkingFold marking={wheel.data.marking} />
       <Facts
         label={`Facts of ${wheel.tag}`}
         parts={wheelParts.filter(({ key }) => !shown.has(key))}

@@ -1,6 +1,7 @@
-import { useFormikContext } from 'formik';
+import { useField, useFormikContext } from 'formik';
 
 import { TextField } from '@/features/forms';
+import { MarkingField, MarkingFold } from '@/features/plan';
 import {
   ChoiceField,
   DateField,
@@ -46,6 +47,7 @@ function MandrelQuantity({ name, required }: { name: MandrelField; required?: bo
 
 /** Under which name it hangs, and what it is. */
 export function MarkingFields() {
+  const { values } = useFormikContext<WheelValues>();
   return (
     <Stack>
       <FieldRow>
@@ -56,14 +58,23 @@ export function MarkingFields() {
           maxLength={TEXT_LIMITS.tag}
           required
         />
-        <TextField
-          name="marking"
-          label="Marking"
-          hint="As it stands on the wheel, like A 60 K 8 V. Leave empty where nothing is legible."
-          maxLength={TEXT_LIMITS.marking}
-        />
+        <MarkingText />
       </FieldRow>
+      <MarkingFold marking={values.marking} />
     </Stack>
+  );
+}
+
+function MarkingText() {
+  const [input, meta, helpers] = useField<string>('marking');
+  return (
+    <MarkingField
+      name="marking"
+      value={input.value}
+      onChangeText={(text) => void helpers.setValue(text)}
+      onBlur={() => void helpers.setTouched(true)}
+      error={meta.touched ? meta.error : undefined}
+    />
   );
 }
 
