@@ -1,4 +1,5 @@
-import { figure, term } from './figures';
+import { LIMITS } from '../domain/limits';
+import { figure, term, termOf } from './figures';
 import type { Figure } from './types';
 
 /** A change smaller than this many steps of the gauge tells nothing. */
@@ -82,4 +83,82 @@ export function expectedFraction(learned: number | null, cut: Expected): Figure 
     ],
     compute: (lambda, traverse, work, wheel) => 1 / (1 + (lambda * traverse * work) / wheel),
   });
+}
+
+/** Why sizes read during spark-out teach nothing. */
+export type SparkOutSilence = 'too few' | 'too small' | 'not shrinking' | 'out of range';
+
+export interface SparkOutLesson {
+  /** The cut fraction that the changes show. */
+  fraction: Figure;
+  /** What it teaches for the next plan, 1/mm. */
+  softness: Figure;
+  /** Null where something was learned. */
+  silence: SparkOutSilence | null;
+}
+
+/**
+ * What sizes read during spark-out teach for the next plan, or why they teach nothing.
+ *
+ * @param changesMm - successive changes of diameter, mm, positive the way the grinding goes, the first pass first.
+ * @param resolutionMm - smallest step of the gauge, mm, over 0.
+ * @param cut - what the passes were cut with; null while unknown.
+ * @returns the share cut in a pass and the softness behind it; null values where nothing can be said.
+ * @source derived-spring
+ * @example sparkOutLesson([0.008, 0.004, 0.002], 0.0005, { traverseMm: 1, workMPerS: 0.25, wheelMPerS: 25 }).softness.value // 100
+ */
+export function sparkOutLesson(
+  changesMm: readonly number[],
+  resolutionMm: number,
+  cut: Expected,
+): SparkOutLesson {
+  const observed = observedFraction(changesMm, resolutionMm);
+  const fraction = figure({
+    unit: '1',
+    formula: '{K} = 1 - {q}',
+    source: 'derived-spring',
+    terms: [
+      term('q', 'each change as a share of the one before, fitted through all that count', [
+        observed === null ? null : 1 - observed,
+        '1',
+      ]),
+    ],
+    compute: (ratio) => 1 - ratio,
+    note: 'Only changes of more than three steps of the gauge count, and none after the first that is smaller.',
+  });
+  const softnessLearned = figure({
+    unit: '1/mm',
+    formula: '{Λ} = (1 / {K} - 1) {v_s} / ({v_w} {s})',
+    source: 'derived-spring',
+    terms: [
+      termOf('K', 'observed cut fraction', fraction),
+      term('v_s', 'wheel speed', [cut.wheelMPerS, 'm/s']),
+      term('v_w', 'work speed', [cut.workMPerS, 'm/s']),
+      term('s', 'traverse per work revolution', [cut.traverseMm, 'mm/rev']),
+    ],
+    compute: (share, wheelMPerS, workMPerS, traverseMm) =>
+      softness(share, { wheelMPerS, workMPerS, traverseMm }),
+  });
+  return {
+    fraction,
+    softness: softnessLearned,
+    silence: silenceOf(changesMm, resolutionMm, softnessLearned.value),
+  };
+}
+
+function silenceOf(
+  changesMm: readonly number[],
+  resolutionMm: number,
+  learned: number | null,
+): SparkOutSilence | null {
+  if (changesMm.length < LEAST_CHANGES) return 'too few';
+  if (observedFraction(changesMm, resolutionMm) === null) {
+    const usable = changesMm.slice(0, LEAST_CHANGES);
+    if (usable.some((change) => change < 0)) return 'not shrinking';
+    return usable.every((change) => change > LEAST_STEPS * resolutionMm)
+      ? 'not shrinking'
+      : 'too small';
+  }
+  const { min, max } = LIMITS.softnessPerMm;
+  return learned !== null && (learned < min || learned > max) ? 'out of range' : null;
 }

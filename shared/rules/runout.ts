@@ -1,5 +1,5 @@
 import { toRadians } from './angles';
-import { figure, term } from './figures';
+import { figure, term, termOf } from './figures';
 import { eccentricity, highSpot, type Offset } from './offset';
 import type { Figure } from './types';
 
@@ -23,6 +23,10 @@ export interface RunoutFit extends Offset {
   outOfRound: Figure;
   /** Highest less lowest reading. */
   runOut: Figure;
+  /** Run-out of the fitted circle alone: what is left when the surface itself is taken for round. */
+  circleRunOut: Figure;
+  /** The high spot, with its working. */
+  highSpot: Figure;
 }
 
 const FITTED_VALUES = 3;
@@ -71,16 +75,19 @@ export function fitRunout(readings: readonly Reading[]): RunoutFit | null {
   const [alongCos, alongSin] = [Math.cos(toRadians(high)), Math.sin(toRadians(high))];
   const variance =
     (alongCos ** 2 * ss - 2 * alongCos * alongSin * cs + alongSin ** 2 * cc) / (spread * count);
+  const offCentre = eccentricity({ aMm, bMm });
   return {
     aMm,
     bMm,
     meanMm,
     highSpotDeg: high,
     residualsMm,
-    eccentricity: eccentricity({ aMm, bMm }),
+    eccentricity: offCentre,
     uncertainty: uncertainty(residualsMm, variance),
     outOfRound: outOfRound(residualsMm),
     runOut: runOut(readings),
+    circleRunOut: runOutOfOffset(offCentre),
+    highSpot: highSpotFigure({ aMm, bMm }),
   };
 }
 
@@ -103,6 +110,38 @@ export function cleanUpStock(runOutMm: number | null, formErrorMm: number): Figu
       term('f', 'error of form', [formErrorMm, 'mm']),
     ],
     compute: (runOutRead, form) => runOutRead + form,
+  });
+}
+
+/**
+ * The run-out of a round surface that stands off centre: the indicator goes out and back in by its eccentricity.
+ *
+ * @param offCentre - eccentricity, mm, 0 or more.
+ * @returns run-out (TIR), mm.
+ * @source iso-1101
+ * @example runOutOfOffset(eccentricity({ aMm: 0.03, bMm: 0.04 })).value // 0.1 mm
+ */
+export function runOutOfOffset(offCentre: Figure): Figure {
+  return figure({
+    unit: 'mm',
+    formula: '{TIR} = 2 {e}',
+    source: 'iso-1101',
+    terms: [termOf('e', 'eccentricity of the fitted circle', offCentre)],
+    compute: (off) => 2 * off,
+  });
+}
+
+function highSpotFigure(offset: Offset): Figure {
+  return figure({
+    unit: 'deg',
+    formula: '{φ} = atan2({b}, {a})',
+    source: 'derived-least-squares',
+    terms: [
+      term('b', 'offset along 90 degrees', [offset.bMm, 'mm']),
+      term('a', 'offset along 0 degrees', [offset.aMm, 'mm']),
+    ],
+    compute: (bMm, aMm) => highSpot({ aMm, bMm }),
+    note: 'Counted from where the angles start, 0 to 360 degrees.',
   });
 }
 

@@ -2,7 +2,12 @@ import fc from 'fast-check';
 import { levenbergMarquardt } from 'ml-levenberg-marquardt';
 
 import { stated } from '@/shared/rules/figures';
-import { expectedFraction, observedFraction, softness } from '@/shared/rules/learning';
+import {
+  expectedFraction,
+  observedFraction,
+  softness,
+  sparkOutLesson,
+} from '@/shared/rules/learning';
 import { cutFraction, takePass } from '@/shared/rules/spring';
 
 const GAUGE_MM = 0.0005;
@@ -80,5 +85,44 @@ describe('what is learned', () => {
 
   it('is unknown until something was learned', () => {
     expect(expectedFraction(null, cut).value).toBeNull();
+  });
+});
+
+describe('what sizes read during spark-out teach', () => {
+  const cut = { traverseMm: 1, workMPerS: 0.25, wheelMPerS: 25 };
+  const lesson = (changesMm: number[], resolutionMm = 0.0005) =>
+    sparkOutLesson(changesMm, resolutionMm, cut);
+
+  it('is the softness that gives the observed fraction back', () => {
+    const { fraction, softness: learned, silence } = lesson([0.01, 0.006, 0.0036]);
+    expect(silence).toBeNull();
+    expect(fraction.value).toBeCloseTo(0.4, 9);
+    expect(expectedFraction(learned.value, cut).value).toBeCloseTo(0.4, 9);
+  });
+
+  it.each([
+    ['too few', [0.01]],
+    ['too small', [0.0016, 0.0012]],
+    ['too small', [0.0016, 0.0015]],
+    ['not shrinking', [0.004, 0.004]],
+    ['not shrinking', [0.004, 0.006]],
+    ['not shrinking', [-0.008, -0.004]],
+  ])('is nothing where the changes are %s', (why, changesMm) => {
+    const { fraction, softness: learned, silence } = lesson(changesMm);
+    expect(silence).toBe(why);
+    expect(fraction.value).toBeNull();
+    expect(learned.value).toBeNull();
+  });
+
+  it('waits for the speeds, with the fraction known already', () => {
+    const waiting = sparkOutLesson([0.008, 0.004], 0.0005, { ...cut, wheelMPerS: null });
+    expect(waiting.fraction.value).toBeCloseTo(0.5, 9);
+    expect(waiting.softness.value).toBeNull();
+    expect(waiting.silence).toBeNull();
+  });
+
+  it('leaves a softness that no plan can hold', () => {
+    const soft = sparkOutLesson([0.01, 0.0099], 0.0001, { ...cut, traverseMm: 0.0001 });
+    expect(soft.silence).toBe('out of range');
   });
 });

@@ -35,6 +35,13 @@ describe('the circle through readings', () => {
     expect(fit?.uncertainty.working.note).toMatch(/fewer than four/i);
   });
 
+  it('gives the run-out of its own circle, and where that stands highest', () => {
+    const fit = fitRunout(readings([0.5, 0.03, -0.04], [10, 95, 250, 310]));
+    expect(fit?.circleRunOut.value).toBeCloseTo(0.1, 12);
+    expect(fit?.highSpot.value).toBeCloseTo(306.8699, 4);
+    expect(fit?.highSpot.value).toBe(fit?.highSpotDeg);
+  });
+
   it('needs three readings that are spread out', () => {
     expect(fitRunout([])).toBeNull();
     expect(fitRunout(readings([0, 1, 0], [0, 180]))).toBeNull();
