@@ -154,6 +154,12 @@ export const QUANTITY_FIELDS = {
     unit: 'mm',
     limit: 'overrunMm',
   },
+  'cut.softnessPerMm': {
+    label: 'Softness learned from runs',
+    hint: 'For this quill, kind of wheel and material. Leave empty to compute the cut fraction.',
+    unit: '1/mm',
+    limit: 'softnessPerMm',
+  },
   'dress.tipRadiusMm': { label: 'Diamond tip radius', unit: 'mm', limit: 'tipRadiusMm' },
   'dress.diamondCarats': { label: 'Diamond', unit: 'ct', limit: 'diamondCarats' },
   'dress.roughDepthMm': { label: 'Depth, rough', unit: 'mm', limit: 'dressDepthMm' },

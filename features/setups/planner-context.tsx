@@ -33,6 +33,9 @@ export function usePlanner() {
     ...planner,
     values,
     setText: (path: QuantityPath, text: string) => void setValues(withText(values, path, text)),
+    /** Several fields at once, each read as if it were typed. */
+    setTexts: (texts: readonly (readonly [QuantityPath, string])[]) =>
+      void setValues(texts.reduce((typed, [path, text]) => withText(typed, path, text), values)),
     /** Sets one answer that is not a number; the path is that of SetupInputs. */
     setInput: (path: string, value: unknown) =>
       void setValues({ ...values, inputs: setIn(values.inputs, path, value) as SetupInputs }),

@@ -13,6 +13,7 @@ import { formatQuantity } from '@/shared/units/format';
 import { usePlanner } from '../planner-context';
 import { STROKE_WORDS } from '../words';
 import { InfeedPasses } from './pictures/infeed-passes';
+import { LearnedFraction } from './learned-fraction';
 import { PlannerQuantity, QuantityRow } from './planner-fields';
 
 const GOVERNOR_WORDS: Record<NonNullable<Plan['infeed']['governedBy']>, string> = {
@@ -96,6 +97,7 @@ export function CutPart() {
           />
         </List>
       </Fold>
+      <LearnedFraction />
       <Fold label="Force, power and heat" value="what the cut asks of the machine">
         <List label="Force, power and heat">
           <FigureRow label="Cut fraction, rough" figure={plan.cutFraction.rough} />

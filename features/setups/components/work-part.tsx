@@ -13,6 +13,7 @@ import { kindOf } from '@/shared/rules';
 
 import { usePlanner } from '../planner-context';
 import { HOLDING_WORDS, MATERIAL_WORDS, OPERATION_SHORT, PRELOAD_WORDS } from '../words';
+import { FromReadings } from './from-readings';
 import { PlannerQuantity, QuantityRow } from './planner-fields';
 import { JawContactPicture } from './pictures/jaw-contact';
 import { RoundWorkFolds } from './round-work-folds';
@@ -75,6 +76,7 @@ function JawFields() {
         <PlannerQuantity path="work.farRunOutMm" />
         <PlannerQuantity path="work.farHighSpotDeg" />
       </QuantityRow>
+      <FromReadings />
       {!wide && plan.jaws && work.jawBoreMm !== null && work.padWidthMm !== null ? (
         <JawContactPicture
           plan={plan.jaws}
@@ -135,6 +137,7 @@ function RoundFields() {
         <PlannerQuantity path="work.stockOnDiameterMm" />
         <PlannerQuantity path="work.runOutMm" />
       </QuantityRow>
+      <FromReadings />
       <PlannerQuantity path="work.toleranceMm" remark="optional" />
       {outside ? (
         <>

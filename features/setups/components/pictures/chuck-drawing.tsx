@@ -1,6 +1,7 @@
 import { Circle, G, Line, Path } from 'react-native-svg';
 
 import { PictureText, wordsWidth } from '@/features/ui/picture';
+import { polar } from '@/features/ui/polar';
 import { colors } from '@/features/ui/tokens';
 import type { UnitSystem } from '@/shared/domain/people';
 import type { JawContact, JawPlan } from '@/shared/rules/types';
@@ -10,7 +11,6 @@ import {
   hasFullLabels,
   jawOutline,
   pixelsPerMm,
-  polar,
   ring,
   type ChuckLayout,
 } from './jaw-geometry';

@@ -1,5 +1,6 @@
 import { arc } from 'd3-shape';
 
+import { polar, type Point } from '@/features/ui/polar';
 import type { JawContact, JawPlan } from '@/shared/rules/types';
 
 const ROUND = [1, 1.5, 2, 3, 4, 5, 6, 8];
@@ -7,17 +8,6 @@ const NICE = [1, 10, 100, 1000].flatMap((decade) => ROUND.map((step) => step * d
 /** The largest gap is drawn about this share of the bore's radius. */
 const GAP_SHARE = 0.38;
 const FACE_POINTS = 12;
-
-export interface Point {
-  x: number;
-  y: number;
-}
-
-/** Clockwise from straight up, as readings stand on a dial. */
-export function polar(centre: Point, radius: number, angleDeg: number): Point {
-  const angle = (angleDeg * Math.PI) / 180;
-  return { x: centre.x + radius * Math.sin(angle), y: centre.y - radius * Math.cos(angle) };
-}
 
 /** How many times too large gaps are drawn, so that the largest of them is plainly seen; a round number. */
 export function exaggeration(plans: readonly JawPlan[], boreMm: number): number {

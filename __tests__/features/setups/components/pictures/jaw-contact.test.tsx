@@ -7,9 +7,9 @@ import {
   chuckLayout,
   exaggeration,
   jawOutline,
-  type Point,
 } from '@/features/setups/components/pictures/jaw-geometry';
 import { jawLabel } from '@/features/setups/components/pictures/jaw-words';
+import type { Point } from '@/features/ui/polar';
 import { planJaws } from '@/shared/rules/jaws';
 import { planSetup, type JawPlan } from '@/shared/rules';
 

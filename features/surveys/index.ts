@@ -1,0 +1,1 @@
+export { ReadingsSheet } from './readings-sheet';
