@@ -15,6 +15,7 @@ import { kindOf } from '@/shared/rules';
 
 import { usePlanner } from '../planner-context';
 import { CentreHeight } from './centre-height';
+import { SetupPictureFold } from './setup-picture';
 
 /** Which lathe, which grinder, which quill, and what stands around the wheel. */
 export function MachinePart() {
@@ -111,6 +112,7 @@ export function MachinePart() {
         />
       </Fold>
       <CentreHeight />
+      <SetupPictureFold />
       <Fold label="Quill" value="stiffness and bending">
         <List label="Quill figures">
           <FigureRow label="Stiffness of the quill" figure={plan.quill.stiffness} />

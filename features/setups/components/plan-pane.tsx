@@ -13,6 +13,7 @@ import { Needs } from './findings-sheet';
 import { OrderOfWork } from './order-of-work';
 import { InfeedPasses } from './pictures/infeed-passes';
 import { JawContactPicture } from './pictures/jaw-contact';
+import { SetupPicturePane } from './setup-picture';
 
 /** The plan beside the form on a wide screen. */
 export function PlanPane({ onPart }: { onPart: (part: SetupPart) => void }) {
@@ -59,6 +60,7 @@ export function PlanPane({ onPart }: { onPart: (part: SetupPart) => void }) {
           <InfeedPasses passes={plan.passes} units={values.units} />
         </>
       ) : null}
+      <SetupPicturePane />
       <Fold label="Order of the work" value="from survey to the last measurement">
         <OrderOfWork />
       </Fold>
