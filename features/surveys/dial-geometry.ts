@@ -5,9 +5,11 @@ import type { Reading, RunoutFit } from '@/shared/rules/runout';
 
 const CIRCLE_POINTS = 72;
 const TURN = 360;
+/** Below this, mm, a departure is only the error of doubles, and is not enlarged. */
+const LEAST_DEPARTURE = 1e-7;
 /** Shares of the dial's radius: where no deviation stands, and how far the largest one goes. */
-const BASE_SHARE = 0.62;
-const SWING_SHARE = 0.3;
+const BASE_SHARE = 0.7;
+const SWING_SHARE = 0.22;
 export const TICKS_DEG = Array.from({ length: 12 }, (_, index) => index * 30);
 
 export interface DialLayout {
@@ -49,7 +51,7 @@ export function dialMarks(
     readings.reduce((sum, { readingMm }) => sum + readingMm, 0) / Math.max(readings.length, 1);
   const off = fit?.eccentricity.value ?? 0;
   const largest = Math.max(off, ...readings.map(({ readingMm }) => Math.abs(readingMm - mean)));
-  const pixels = largest > 0 ? (SWING_SHARE * radius) / largest : 0;
+  const pixels = largest > LEAST_DEPARTURE ? (SWING_SHARE * radius) / largest : 0;
   const at = (departureMm: number) => baseRadius + pixels * departureMm;
   const circle = (angleDeg: number) =>
     at(off * Math.cos(((angleDeg - (fit?.highSpotDeg ?? 0)) * Math.PI) / 180));
@@ -64,6 +66,7 @@ export function dialMarks(
     circle: fit
       ? outline(Array.from({ length: CIRCLE_POINTS }, (_, i) => (i * TURN) / CIRCLE_POINTS))
       : null,
-    hand: fit && off > 0 ? polar(centre, circle(fit.highSpotDeg), fit.highSpotDeg) : null,
+    hand:
+      fit && off > LEAST_DEPARTURE ? polar(centre, circle(fit.highSpotDeg), fit.highSpotDeg) : null,
   };
 }

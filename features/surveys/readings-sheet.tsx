@@ -1,7 +1,7 @@
 import { useState } from 'react';
 
 import { draftKey, readDraft, useLocalDraft } from '@/features/forms';
-import { FigureReadout, PlanReader } from '@/features/plan';
+import { FigureReadout, figureText, PlanReader, useReader } from '@/features/plan';
 import { useShop } from '@/features/session';
 import { Button } from '@/features/ui/button';
 import { Stack } from '@/features/ui/card';
@@ -161,6 +161,7 @@ export function ReadingsSheet({ open, onClose, ...props }: ReadingsSheetProps) {
 }
 
 function Fit({ fit, count, faulty }: { fit: RunoutFit | null; count: number; faulty: boolean }) {
+  const { units } = useReader();
   if (faulty || count === 0) return null;
   if (!fit)
     return (
@@ -179,6 +180,8 @@ function Fit({ fit, count, faulty }: { fit: RunoutFit | null; count: number; fau
           label="High spot"
           figure={fit.highSpot}
           options={{ digits: 0 }}
+          value={figureText(fit.highSpot, units, { digits: 0 })}
+          unit=""
         />
         <FigureReadout size="small" label="Run-out of the circle (TIR)" figure={fit.circleRunOut} />
         <FigureReadout size="small" label="Whole swing as read (TIR)" figure={fit.runOut} />

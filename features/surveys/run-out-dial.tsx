@@ -29,7 +29,6 @@ export function RunOutDial({ readings, fit, units }: RunOutDialProps) {
           maxWidth={WIDEST}
           height={(width, textScale) => dialLayout(width, textScale).height}
           description={`Dial with ${readings.length} readings${fit ? ', the circle fitted through them and its high spot' : ''}; the sentence below says what they show.`}
-          caption="Angles run clockwise here; readings enlarged to fill the dial."
         >
           {({ width, textScale }) => {
             const layout = dialLayout(width, textScale);
@@ -43,6 +42,7 @@ export function RunOutDial({ readings, fit, units }: RunOutDialProps) {
         </Picture>
       </View>
       <Small tone="text">{dialWords(readings, fit, units)}</Small>
+      <Small>Angles run clockwise here; readings are enlarged to fill the dial.</Small>
     </View>
   );
 }

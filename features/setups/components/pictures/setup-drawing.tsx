@@ -1,8 +1,8 @@
-import { G, Line, Path } from 'react-native-svg';
+import { G, Line, Path, Rect } from 'react-native-svg';
 
 import { PictureText, wordsWidth } from '@/features/ui/picture';
 import type { Point } from '@/features/ui/polar';
-import { colors } from '@/features/ui/tokens';
+import { colors, pictureType } from '@/features/ui/tokens';
 
 import type { SetupLayout } from './setup-layout';
 import type { SetupScene, ShapeKind } from './setup-scene';
@@ -18,6 +18,7 @@ interface SetupDrawingProps {
 const DASH = '6 4';
 const DOTS = '2 4';
 const CENTRE_LINE = '14 4 3 4';
+const LABEL_GAP = 12;
 
 const PAINT: Record<ShapeKind, { fill: string; stroke: string; dash?: string }> = {
   work: { fill: colors.metal, stroke: colors.metalEdge },
@@ -66,30 +67,49 @@ export function SetupDrawing({ scene, layout, width, textScale }: SetupDrawingPr
       {[scene.workArrow, scene.wheelArrow].map((arrow, index) =>
         arrow ? <TurnArrow key={index} ends={arrow.map(place)} /> : null,
       )}
-      {layout.marks.map((mark) => (
-        <G key={`${mark.words} ${mark.from}`}>
-          {[mark.from, mark.to].map((x) => (
-            <Line key={x} x1={x} x2={x} y1={layout.foot + 2} y2={mark.y + 4} stroke={colors.rule} />
-          ))}
-          <Line
-            x1={mark.from}
-            x2={mark.to}
-            y1={mark.y}
-            y2={mark.y}
-            stroke={colors.text}
-            strokeWidth={2}
-          />
-          <PictureText
-            x={mark.wordsAt}
-            y={mark.y - 5 * textScale}
-            anchor="middle"
-            size="small"
-            textScale={textScale}
-          >
-            {mark.words}
-          </PictureText>
-        </G>
-      ))}
+      <Dimensions layout={layout} textScale={textScale} />
+    </>
+  );
+}
+
+/** Lines first, words over them on the ground of the sheet, so that no line runs through a word. */
+function Dimensions({
+  layout: { marks, foot },
+  textScale,
+}: Omit<SetupDrawingProps, 'scene' | 'width'>) {
+  const small = pictureType.small * textScale;
+  return (
+    <>
+      {marks.flatMap(({ words, from, to, y }) =>
+        [from, to].map((x) => (
+          <Line key={`${words} ${x}`} x1={x} x2={x} y1={foot + 2} y2={y + 4} stroke={colors.rule} />
+        )),
+      )}
+      {marks.map(({ words, from, to, y, wordsAt }) => {
+        const half = wordsWidth(words, 'small', textScale) / 2;
+        const baseline = y - 5 * textScale;
+        return (
+          <G key={`${words} ${from}`}>
+            <Rect
+              x={wordsAt - half}
+              y={baseline - small}
+              width={2 * half}
+              height={small * 1.25}
+              fill={colors.sheet}
+            />
+            <Line x1={from} x2={to} y1={y} y2={y} stroke={colors.text} strokeWidth={2} />
+            <PictureText
+              x={wordsAt}
+              y={baseline}
+              anchor="middle"
+              size="small"
+              textScale={textScale}
+            >
+              {words}
+            </PictureText>
+          </G>
+        );
+      })}
     </>
   );
 }
@@ -142,8 +162,8 @@ function Compound({ compound, layout: { place }, width, textScale }: CompoundPro
   const [from, to] = compound.travel.map(place);
   if (!from || !to) return null;
   const words = `compound ${angleWords(compound.angleDeg)}`;
-  const half = wordsWidth(words, 'small', textScale) / 2;
-  const below = Math.max(from.y, to.y) - 6;
+  const [start, end] = from.x < to.x ? [from, to] : [to, from];
+  const fits = end.x + LABEL_GAP + wordsWidth(words, 'small', textScale) <= width;
   return (
     <>
       <Stroke
@@ -157,9 +177,9 @@ function Compound({ compound, layout: { place }, width, textScale }: CompoundPro
         <Line key={x} x1={x} x2={x} y1={y - 6} y2={y + 6} stroke={colors.mark} strokeWidth={2} />
       ))}
       <PictureText
-        x={Math.min(Math.max(to.x + half + 10, half), width - half)}
-        y={below}
-        anchor="middle"
+        x={fits ? end.x + LABEL_GAP : start.x - LABEL_GAP}
+        y={(from.y + to.y) / 2}
+        anchor={fits ? 'start' : 'end'}
         size="small"
         textScale={textScale}
       >

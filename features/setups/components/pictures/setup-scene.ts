@@ -51,7 +51,7 @@ export function setupScene(input: PlanInput, plan: Plan): SetupScene | null {
   const work = surface.side === 'outside' ? outsideWork(input, path) : insideWork(input, path);
   const wheel = wheelShapes(input, path);
   const shapes = [...work.shapes, ...wheel.shapes];
-  const compound = compoundOf(path, wheel.radius * 2);
+  const compound = compoundOf(path, wheel.diameterMm);
   const points = [...shapes.flatMap(({ points: all }) => all), ...(compound?.travel ?? [])];
   const [left, right] = span(points.map(({ x }) => x));
   const arrowAt = left - (right - left) * ARROW_SHARE;
@@ -63,29 +63,26 @@ export function setupScene(input: PlanInput, plan: Plan): SetupScene | null {
     axis: path.axis(left, right),
     compound,
     dimensions: [...work.dimensions, ...wheel.dimensions],
-    workArrow: turned(plan.work.rotation.work, { x: arrowAt, y: 0 }, arrowHalf),
-    wheelArrow: wheel.middle
-      ? turned(input.grinder?.wheelRotation ?? null, wheel.middle, wheel.radius * 0.6)
-      : null,
+    workArrow: turned(plan.work.rotation.work, [
+      { x: arrowAt, y: -arrowHalf },
+      { x: arrowAt, y: arrowHalf },
+    ]),
+    wheelArrow: wheel.across ? turned(input.grinder?.wheelRotation ?? null, wheel.across) : null,
     bounds: { left: arrowAt - (right - left) * ARROW_SHARE, right, top, bottom },
   };
 }
 
 /** Seen from the tailstock, what turns clockwise moves away from the operator on top. */
-function turned(rotation: Rotation | null, { x, y }: Point, half: number): [Point, Point] | null {
+function turned(rotation: Rotation | null, ends: [Point, Point]): [Point, Point] | null {
   if (rotation === null) return null;
-  const [near, far] = [
-    { x, y: y + half },
-    { x, y: y - half },
-  ];
+  const [far, near] = ends[0].y < ends[1].y ? ends : [ends[1], ends[0]];
   return rotation === 'clockwise' ? [near, far] : [far, near];
 }
 
 function wheelShapes(input: PlanInput, path: Path) {
   const { wheelData } = input;
   const quill = effectiveQuill(input.quill, wheelData);
-  const none = { shapes: [], dimensions: [], middle: null, radius: 0 };
-  if (wheelData === null) return none;
+  if (wheelData === null) return { shapes: [], dimensions: [], across: null, diameterMm: 0 };
   const { diameterNowMm: across, widthMm: width } = wheelData;
   const start = path.fromMm;
   const block = (from: number, to: number, half: number) =>
@@ -110,7 +107,13 @@ function wheelShapes(input: PlanInput, path: Path) {
     path.tilted || overhang <= 0
       ? []
       : [{ name: 'overhang', mm: overhang, from: start, to: start + overhang }];
-  return { shapes, dimensions, middle: path.at(start + width / 2, across / 2), radius: across / 2 };
+  const middle = start + width / 2;
+  return {
+    shapes,
+    dimensions,
+    across: [path.at(middle, across * 0.2), path.at(middle, across * 0.8)] as [Point, Point],
+    diameterMm: across,
+  };
 }
 
 /** Behind the wheel, so that it lies over nothing. */

@@ -78,8 +78,8 @@ function overrunWords(overruns: readonly Dimension[], units: UnitSystem): string
   const [first] = overruns;
   const mm = length(first?.mm ?? 0, units);
   return overruns.length > 1
-    ? `It runs ${mm} past each end.`
-    : `It runs ${mm} past one end and stops at a shoulder at the other.`;
+    ? `The wheel runs ${mm} past each end.`
+    : `The wheel runs ${mm} past one end and stops at a shoulder at the other.`;
 }
 
 function compoundWords(angleDeg: number, plan: Plan, units: UnitSystem): string[] {
