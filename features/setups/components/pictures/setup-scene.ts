@@ -67,7 +67,7 @@ export function setupScene(input: PlanInput, plan: Plan): SetupScene | null {
       { x: arrowAt, y: -arrowHalf },
       { x: arrowAt, y: arrowHalf },
     ]),
-    wheelArrow: wheel.across ? turned(input.grinder?.wheelRotation ?? null, wheel.across) : null,
+    wheelArrow: wheel.face ? turned(input.grinder?.wheelRotation ?? null, wheel.face) : null,
     bounds: { left: arrowAt - (right - left) * ARROW_SHARE, right, top, bottom },
   };
 }
@@ -82,7 +82,7 @@ function turned(rotation: Rotation | null, ends: [Point, Point]): [Point, Point]
 function wheelShapes(input: PlanInput, path: Path) {
   const { wheelData } = input;
   const quill = effectiveQuill(input.quill, wheelData);
-  if (wheelData === null) return { shapes: [], dimensions: [], across: null, diameterMm: 0 };
+  if (wheelData === null) return { shapes: [], dimensions: [], face: null, diameterMm: 0 };
   const { diameterNowMm: across, widthMm: width } = wheelData;
   const start = path.fromMm;
   const block = (from: number, to: number, half: number) =>
@@ -108,10 +108,11 @@ function wheelShapes(input: PlanInput, path: Path) {
       ? []
       : [{ name: 'overhang', mm: overhang, from: start, to: start + overhang }];
   const middle = start + width / 2;
+  const face: [Point, Point] = [path.at(middle, across * 0.2), path.at(middle, across * 0.8)];
   return {
     shapes,
     dimensions,
-    across: [path.at(middle, across * 0.2), path.at(middle, across * 0.8)] as [Point, Point],
+    face,
     diameterMm: across,
   };
 }
