@@ -11,7 +11,7 @@ import { surfaceOf } from '@/shared/rules/surface';
 import { BORE_GRINDER, jawsInput, LATHE, QUILL, SMALL_WHEEL } from '../../support/plan-inputs';
 
 const ROOT = join(__dirname, '../../../shared');
-const FOLDERS = ['rules', 'units'];
+const FOLDERS = ['rules', 'rules/published', 'units'];
 
 interface Example {
   file: string;

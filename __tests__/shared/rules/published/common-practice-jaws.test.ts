@@ -4,6 +4,11 @@
  */
 import { planJaws } from '@/shared/rules/jaws';
 import { offsetFromRunOut } from '@/shared/rules/offset';
+import { commonPracticeJaws } from '@/shared/rules/published/common-practice-jaws';
+
+import { checkPublished } from '../../../support/published';
+
+checkPublished(commonPracticeJaws);
 
 const THOU = 0.0254;
 

@@ -1,40 +1,13 @@
 /** From first principles, checked numerically: infeed against spring, and the stepped quill. */
 import { Solver } from 'odex';
 
+import { firstPrinciplesSpring } from '@/shared/rules/published/first-principles-spring';
 import { bendingOf, QUILL_MATERIAL } from '@/shared/rules/quill';
 import { planPasses } from '@/shared/rules/schedule';
-import { sparkOutPasses, takePass } from '@/shared/rules/spring';
 
-describe('spring at a cut fraction of 0.5 (derived)', () => {
-  it('lets six infeeds of 10 um cut 5, 7.5, 8.75, 9.375, 9.6875 and 9.84375 um', () => {
-    const cuts: number[] = [];
-    let springMm = 0;
-    for (let pass = 0; pass < 6; pass += 1) {
-      const taken = takePass(0.01, springMm, 0.5);
-      springMm = taken.springMm;
-      cuts.push(taken.cutMm * 1000);
-    }
-    [5, 7.5, 8.75, 9.375, 9.6875, 9.84375].forEach((expected, pass) =>
-      expect(cuts[pass]).toBeCloseTo(expected, 9),
-    );
-  });
-});
+import { checkPublished } from '../../../support/published';
 
-describe('sparking 20 um of spring out to 0.5 um (derived)', () => {
-  it.each([
-    [0.5, 6],
-    [0.7, 4],
-  ])('takes at a cut fraction of %d %d passes', (fraction, passes) => {
-    expect(sparkOutPasses(0.02, 0.0005, fraction)).toBe(passes);
-  });
-});
-
-describe('three time constants of spark-out (Marinescu et al., ch. 18; textbook)', () => {
-  it('leave 5 %: three passes when each lasts one time constant', () => {
-    expect(sparkOutPasses(1, 0.05, 1 - Math.exp(-1))).toBe(3);
-    expect(sparkOutPasses(1, 0.049, 1 - Math.exp(-1))).toBe(4);
-  });
-});
+checkPublished(firstPrinciplesSpring);
 
 describe('a whole schedule against the differential equation of decay (odex; derived)', () => {
   /** dx/dt = -x/tau for one pass: what is cut is what the spring loses. */
@@ -82,11 +55,6 @@ describe('a stepped steel quill, 30 mm of 10 mm at the wheel and 50 mm of 20 mm 
     { lengthMm: 30, diameterMm: 10 },
     { lengthMm: 50, diameterMm: 20 },
   ];
-
-  it('bends 0.0188926 mm under 100 N', () => {
-    const bent = bendingOf(segments, QUILL_MATERIAL.steel);
-    expect(100 * (bent?.deflectionMmPerN ?? NaN)).toBeCloseTo(0.0188926, 7);
-  });
 
   it('agrees with the double integral of its curvature', () => {
     const steps = 200_000;

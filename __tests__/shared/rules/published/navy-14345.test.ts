@@ -1,11 +1,5 @@
-/** US Navy training course 14345: taper turning. */
-import { halfAngle, tailstockSetover, taperPerLength } from '@/shared/rules/taper';
+import { navy14345 } from '@/shared/rules/published/navy-14345';
 
-const INCH = 25.4;
+import { checkPublished } from '../../../support/published';
 
-describe('US Navy 14345', () => {
-  it('sets over 1/2 in for a piece 12 in long that tapers from 3 to 2 in', () => {
-    const taper = taperPerLength(halfAngle(3 * INCH, 2 * INCH, 12 * INCH));
-    expect((tailstockSetover(12 * INCH, taper).value ?? NaN) / INCH).toBeCloseTo(1 / 2, 9);
-  });
-});
+checkPublished(navy14345);

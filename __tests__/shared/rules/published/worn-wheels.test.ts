@@ -1,11 +1,14 @@
-/** Hong Kong Cap. 59L reg. 5(3) gives the figures; the strict laws keep the marked rpm for a worn wheel. */
 import { planSetup } from '@/shared/rules';
+import { wornWheels } from '@/shared/rules/published/worn-wheels';
 
 import { outsideInput } from '../../../support/plan-inputs';
+import { checkPublished } from '../../../support/published';
 
-const worn = () => {
+checkPublished(wornWheels);
+
+describe('a plan with a worn wheel', () => {
   const input = outsideInput();
-  return {
+  const { limits } = planSetup({
     ...input,
     wheelData: input.wheelData && {
       ...input.wheelData,
@@ -14,13 +17,9 @@ const worn = () => {
       markedRpm: 4456,
       markedSpeedMPerS: null,
     },
-  };
-};
+  });
 
-describe('a wheel marked 4 456 rpm at 150 mm, worn to 120 mm (Hong Kong Cap. 59L reg. 5(3); law)', () => {
-  const { limits } = planSetup(worn());
-
-  it('keeps 4 456 rpm as its limit', () => {
+  it('keeps the marked 4 456 rpm as its limit', () => {
     expect(limits.governing?.kind).toBe('marked rpm');
     expect(limits.governing?.rpm.value).toBe(4456);
   });

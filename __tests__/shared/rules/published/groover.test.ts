@@ -1,0 +1,5 @@
+import { groover } from '@/shared/rules/published/groover';
+
+import { checkPublished } from '../../../support/published';
+
+checkPublished(groover);

@@ -1,0 +1,5 @@
+import { guards } from '@/shared/rules/published/guards';
+
+import { checkPublished } from '../../../support/published';
+
+checkPublished(guards);

@@ -1,0 +1,5 @@
+import { marinescu } from '@/shared/rules/published/marinescu';
+
+import { checkPublished } from '../../../support/published';
+
+checkPublished(marinescu);

@@ -1,0 +1,5 @@
+import { trialRun } from '@/shared/rules/published/trial-run';
+
+import { checkPublished } from '../../../support/published';
+
+checkPublished(trialRun);
