@@ -27,6 +27,8 @@ const router = {
   push: visit,
   replace: visit,
   dismissTo: visit,
+  canGoBack: () => false,
+  back: () => undefined,
   setParams: (changed: Params) => {
     params = { ...params, ...changed };
     listeners.forEach((listener) => listener());

@@ -81,6 +81,7 @@ export function workingProps(figure: Figure, units: UnitSystem, options: FormatO
       : {}),
     ...(note ? { note } : {}),
     source: [title, place].filter(Boolean).join(', '),
+    sourceHref: { pathname: '/numbers', params: { source } } as const,
     mark,
   };
 }

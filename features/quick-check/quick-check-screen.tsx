@@ -8,7 +8,7 @@ import { PlanReader } from '@/features/plan';
 import { afterSignIn, sessionQueries } from '@/features/session';
 import { readStored, writeStored } from '@/features/transport';
 import { Cell, Row, Stack } from '@/features/ui/card';
-import { ButtonLink } from '@/features/ui/link';
+import { ButtonLink, TextLink } from '@/features/ui/link';
 import { Screen } from '@/features/ui/screen';
 import { Segmented } from '@/features/ui/segmented';
 import { Body, Heading, Small } from '@/features/ui/text';
@@ -145,6 +145,7 @@ function QuickCheckForm() {
           The wheel’s marking, the makers’ manuals and local law come first. This page advises; a
           competent person decides.
         </Small>
+        <TextLink label="Where the numbers come from" href="/numbers" />
       </Stack>
     </PlanReader>
   );

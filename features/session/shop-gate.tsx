@@ -1,5 +1,5 @@
 import { useQuery } from '@tanstack/react-query';
-import { Redirect, useGlobalSearchParams, usePathname } from 'expo-router';
+import { Redirect, useLocalSearchParams, usePathname } from 'expo-router';
 import { useState, type ReactNode } from 'react';
 
 import { isRefusal, problemOf, problemWords } from '@/features/transport';
@@ -18,7 +18,7 @@ import { ShopProvider } from './shop-context';
  * the sign-in page, which leads back here.
  */
 export function ShopGate({ children }: { children: ReactNode }) {
-  const { shopId } = useGlobalSearchParams<{ shopId: string }>();
+  const { shopId } = useLocalSearchParams<{ shopId: string }>();
   const path = usePathname();
   const session = useQuery(sessionQueries.current());
   const person = session.data;

@@ -29,6 +29,11 @@ export function ShopScreen() {
                 detail="Lathes, tool-post grinders, quills and arbors"
                 href={{ pathname: '/shops/[shopId]/machines', params: { shopId: shop.id } }}
               />
+              <ListRow
+                label="Where the numbers come from"
+                detail="The books, standards and laws behind the rules, and what is checked against them"
+                href="/numbers"
+              />
             </List>
             <Stack gap={2}>
               <Heading>The shop</Heading>

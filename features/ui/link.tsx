@@ -15,14 +15,17 @@ interface TextLinkProps {
   href: Href;
   tone?: Extract<TextTone, 'text' | 'action' | 'onEnamel'>;
   replace?: boolean;
+  /** What else happens when it is pressed: a sheet closes. */
+  onPress?: () => void;
 }
 
 /** A link inside or beside running words: underlined, the words' own size. */
-export function TextLink({ label, href, tone = 'action', replace }: TextLinkProps) {
+export function TextLink({ label, href, tone = 'action', replace, onPress }: TextLinkProps) {
   return (
     <Link
       href={href}
       replace={replace}
+      onPress={onPress}
       style={[type.body, styles.underlined, { color: colors[tone] }]}
     >
       {label}

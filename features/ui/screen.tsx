@@ -20,6 +20,8 @@ interface ScreenProps {
   over?: string;
   /** Where "back" leads, for screens that stand outside the tabs. */
   backTo?: Href;
+  /** Goes back to wherever the reader came from, and to `backTo` where that is not known. */
+  backToLast?: boolean;
   /** At the right of the header: one or two buttons (kind onEnamel). */
   actions?: ReactNode;
   /** Under the title, on the enamel: parts, tabs, a sentence. */
@@ -40,6 +42,7 @@ export function Screen({
   title,
   over,
   backTo,
+  backToLast = false,
   actions,
   header,
   children,
@@ -65,7 +68,9 @@ export function Screen({
                 label="Back"
                 icon="back"
                 color="onEnamel"
-                onPress={() => router.dismissTo(backTo)}
+                onPress={() =>
+                  backToLast && router.canGoBack() ? router.back() : router.dismissTo(backTo)
+                }
               />
             </View>
           )}

@@ -1,8 +1,10 @@
+import type { Href } from 'expo-router';
 import { StyleSheet, View } from 'react-native';
 
 import { Card } from './card';
 import { FormulaLines, SymbolText } from './formula';
 import type { FormulaTerm } from './formula';
+import { TextLink } from './link';
 import { Sheet } from './sheet';
 import { Body, Label, Small, Subheading } from './text';
 import { colors, space, stroke } from './tokens';
@@ -18,12 +20,24 @@ export interface WorkingProps {
   note?: string;
   /** Title and place: "29 CFR 1910.215(d)(1)". */
   source: string;
+  /** Where the source and what is checked against it can be read. */
+  sourceHref?: Href;
   /** What kind of source: law, standard, handbook, memory. */
   mark: string;
 }
 
 /** How a number was found: formula, values, terms, note, source. */
-function WorkingBlock({ formula, terms, result, band, note, source, mark }: WorkingProps) {
+function WorkingBlock({
+  formula,
+  terms,
+  result,
+  band,
+  note,
+  source,
+  sourceHref,
+  mark,
+  onLeave,
+}: WorkingProps & { onLeave: () => void }) {
   return (
     <View style={styles.block}>
       <Card>
@@ -53,7 +67,11 @@ function WorkingBlock({ formula, terms, result, band, note, source, mark }: Work
       ) : null}
       <View>
         <Subheading>Source</Subheading>
-        <Body>{source}</Body>
+        {sourceHref === undefined ? (
+          <Body>{source}</Body>
+        ) : (
+          <TextLink label={source} href={sourceHref} onPress={onLeave} />
+        )}
         <Small>{mark}</Small>
       </View>
     </View>
@@ -71,7 +89,7 @@ interface WorkingSheetProps extends WorkingProps {
 export function WorkingSheet({ title, open, onClose, ...working }: WorkingSheetProps) {
   return (
     <Sheet open={open} onClose={onClose} title={title}>
-      <WorkingBlock {...working} />
+      <WorkingBlock {...working} onLeave={onClose} />
     </Sheet>
   );
 }
