@@ -90,8 +90,8 @@ function OnlyOne({ entry, onLeave }: { entry: SourceEntry | undefined; onLeave: 
     );
   return (
     <Stack>
-      <Groups entries={[entry]} opened={entry.id} />
       <Row>{way}</Row>
+      <Groups entries={[entry]} opened={entry.id} />
     </Stack>
   );
 }

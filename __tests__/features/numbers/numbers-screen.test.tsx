@@ -1,4 +1,4 @@
-import { render, screen, within } from '@testing-library/react';
+import { configure, render, screen, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 
 import { NumbersScreen } from '@/features/numbers/numbers-screen';
@@ -9,6 +9,9 @@ import { addressParams, openAddress } from '../../support/router';
 
 jest.mock('expo-router', () => jest.requireActual('../../support/router'));
 jest.mock('expo-router/head', () => () => null);
+
+// Asking jsdom of each element whether it is shown takes seconds on a long page.
+configure({ defaultHidden: true });
 
 const sources = new Set(PUBLISHED.map(({ source }) => source)).size;
 const folds = () => screen.getAllByRole('button', { name: /: / });

@@ -40,35 +40,29 @@ const COLUMNS: Column<Check>[] = [
       </>
     ),
   },
-  {
-    id: 'inputs',
-    label: 'From',
-    cell: ({ inputs, at }) => (
-      <>
-        {inputs}
-        {at === null ? null : <Small>{`\n${at}`}</Small>}
-      </>
-    ),
-  },
+  { id: 'inputs', label: 'From', cell: fromWords },
   { id: 'expected', label: 'Source', numeric: true, cell: ({ expected }) => expected },
   { id: 'got', label: 'Here', numeric: true, cell: ({ got }) => got },
-  { id: 'tolerance', label: 'May differ', numeric: true, cell: ({ tolerance }) => tolerance },
-  { id: 'ok', label: '', whole: true, cell: ({ ok }) => <Answer ok={ok} /> },
+  { id: 'tolerance', label: 'Tolerance', numeric: true, cell: ({ tolerance }) => tolerance },
+  { id: 'ok', label: 'Result', whole: true, cell: ({ ok }) => <Answer ok={ok} /> },
 ];
+
+function fromWords({ inputs, at }: Check): string {
+  return at === null ? inputs : `${inputs} · ${at}`;
+}
 
 const Answer = ({ ok }: { ok: boolean }) =>
   ok ? <Small>agrees</Small> : <Strong tone="stop">differs</Strong>;
 
 function CheckRow({ check }: { check: Check }) {
-  const from = [check.inputs, check.at].filter(Boolean).join(' · ');
   return (
     <View role="listitem" style={styles.row}>
       <Label>{check.checks}</Label>
-      <Small>{from}</Small>
+      <Small>{fromWords(check)}</Small>
       <View style={styles.figures}>
         <Figure name="Source" value={check.expected} />
         <Figure name="Here" value={check.got} />
-        <Figure name="May differ" value={check.tolerance} />
+        <Figure name="Tolerance" value={check.tolerance} />
       </View>
       {check.ok ? null : <Answer ok={false} />}
       {check.note === null ? null : <Small>{check.note}</Small>}

@@ -25,7 +25,7 @@ const reading = (checks: string, expected: number, got: () => number | null): Nu
 
 const leastSquares = casesOf('derived-least-squares', [
   reading(
-    'Mean reading, R₀',
+    'Mean reading',
     100,
     fitted(({ meanMm }) => meanMm),
   ),

@@ -1,6 +1,7 @@
 import { ansiFlanges } from './ansi-flanges';
 import { beamWithTipMass } from './beam-with-tip-mass';
 import { colvin } from './colvin';
+import { commonPracticeBoreWheel } from './common-practice-bore-wheel';
 import { commonPracticeJaws } from './common-practice-jaws';
 import { commonPracticeOverrun } from './common-practice-overrun';
 import { firstPrinciplesDressing } from './first-principles-dressing';
@@ -34,7 +35,7 @@ import { woodTurning } from './wood-turning';
 import { wornWheels } from './worn-wheels';
 
 export { allowance, expectedWords, gotWords, isNumberCheck, judge, toleranceWords } from './case';
-export type { Outcome, PublishedCase, PublishedCheck } from './types';
+export type { PublishedCase } from './types';
 
 /** Everything the rules are held against outside the project, by kind of source. */
 export const PUBLISHED: readonly PublishedCase[] = [
@@ -45,6 +46,6 @@ export const PUBLISHED: readonly PublishedCase[] = [
   ...[jones, jonesSetover, navy14345, colvin, woodTurning, lautard],
   ...[groover, kalpakjian, marinescu, nptelRotorDynamics, beamWithTipMass],
   ...[firstPrinciplesSpeed, firstPrinciplesDressing, firstPrinciplesRunOut, firstPrinciplesSpring],
-  ...[commonPracticeJaws, commonPracticeOverrun],
+  ...[commonPracticeJaws, commonPracticeOverrun, commonPracticeBoreWheel],
   ...[recalledMaterials, gradeWords, grooverProblems],
 ].flat();

@@ -1,0 +1,5 @@
+import { commonPracticeBoreWheel } from '@/shared/rules/published/common-practice-bore-wheel';
+
+import { checkPublished } from '../../../support/published';
+
+checkPublished(commonPracticeBoreWheel);
