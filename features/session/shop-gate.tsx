@@ -1,5 +1,5 @@
 import { useQuery } from '@tanstack/react-query';
-import { Redirect, useLocalSearchParams, usePathname } from 'expo-router';
+import { Redirect, useGlobalSearchParams, usePathname } from 'expo-router';
 import { useState, type ReactNode } from 'react';
 
 import { isRefusal, problemOf, problemWords } from '@/features/transport';
@@ -18,8 +18,8 @@ import { ShopProvider } from './shop-context';
  * the sign-in page, which leads back here.
  */
 export function ShopGate({ children }: { children: ReactNode }) {
-  const { shopId } = useLocalSearchParams<{ shopId: string }>();
-  const path = usePathname();
+  const [open, setOpen] = useState(false);
+  const { shopId, path } = useShopAddress(open);
   const session = useQuery(sessionQueries.current());
   const person = session.data;
   const shop = useQuery({ ...sessionQueries.shop(shopId), enabled: Boolean(person) });
@@ -48,11 +48,27 @@ export function ShopGate({ children }: { children: ReactNode }) {
   if (!person || !shop.data) return <Waiting />;
   const role = person.memberships.find((membership) => membership.shopId === shopId)?.role;
   if (!role) return <NoSuchShop />;
+  if (!open) setOpen(true);
   return (
     <ShopProvider key={shopId} shop={shop.data} person={person} role={role}>
       {children}
     </ShopProvider>
   );
+}
+
+/**
+ * The shop and the path of the address. Pages that lie over the shop's screens name no shop, and until those screens
+ * stand the router may forget what follows the shop: the last address that was known holds.
+ */
+function useShopAddress(screensStand: boolean) {
+  const { shopId } = useGlobalSearchParams<{ shopId?: string }>();
+  const path = usePathname();
+  const [held, setHeld] = useState({ shopId: shopId ?? '', path });
+  const known = shopId !== undefined && (screensStand || shopId !== held.shopId);
+  if (!known || (shopId === held.shopId && path === held.path)) return held;
+  const now = { shopId, path };
+  setHeld(now);
+  return now;
 }
 
 /** Holds the address that was asked for: with the shop's screens gone, the router forgets it. */
