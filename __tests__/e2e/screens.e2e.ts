@@ -42,11 +42,19 @@ async function settled(page: Page) {
 }
 
 describe.each(SIZES)('on a %s screen', (size) => {
-  it.each(['/', '/sign-in', '/sign-up', '/nowhere'])('%s is clean to a visitor', async (path) => {
+  it.each([
+    '/',
+    '/sign-in',
+    '/sign-up',
+    '/numbers',
+    '/numbers?source=mh31-1318',
+    '/numbers?show=all',
+    '/nowhere',
+  ])('%s is clean to a visitor', async (path) => {
     const { context, page, complaints } = await openVisitor(browser, size);
     await page.goto(path);
     await settled(page);
-    const name = path === '/' ? 'home' : path.slice(1);
+    const name = path === '/' ? 'home' : path.slice(1).replace(/\W/g, '-');
     expect(await inspect(page, `${name}-${size}`)).toEqual([]);
     expect(complaints).toEqual([]);
     await context.close();
