@@ -8,6 +8,7 @@ import type { SetupInputs } from '@/shared/domain/setups';
 import type { WheelData } from '@/shared/domain/wheels';
 
 import type { Server } from './composition';
+import { Refusal } from './refusals';
 
 interface DemoPerson {
   id: string;
@@ -37,8 +38,19 @@ export interface DemoShop {
   setups: readonly { id: string; name: string; inputs: SetupInputs }[];
 }
 
-/** Puts the demo shop in, the way its people would: what is there already stays as it is. */
+/**
+ * Puts the demo shop in, the way its people would: what is there already stays as it is. A demo shop that an
+ * earlier version put in, or that people have changed since, refuses what no longer fits; it is left as it stands.
+ */
 export async function seedDemo(services: Server['services'], demo: DemoShop): Promise<void> {
+  try {
+    await plant(services, demo);
+  } catch (error) {
+    if (!(error instanceof Refusal)) throw error;
+  }
+}
+
+async function plant(services: Server['services'], demo: DemoShop): Promise<void> {
   const { lead, password } = demo;
   const caller = { personId: lead.id, shopId: demo.id };
   await services.accounts.signUp(

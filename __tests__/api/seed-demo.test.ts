@@ -73,6 +73,17 @@ describe('the demo shop', () => {
     expect((await lead.get(path)).body.name).toBe('Renamed');
   });
 
+  it('is left as it stands where an earlier version, or its people, made it otherwise', async () => {
+    const [lathe, ...lathes] = demoShop.lathes;
+    if (!lathe) throw new Error('The demo shop has no lathe.');
+    const other = { ...lathe, data: { ...lathe.data, compoundTravelMm: 95 } };
+    await seedDemo(api.services, { ...demoShop, lathes: [other, ...lathes] });
+    await seedDemo(api.services, { ...demoShop, password: 'walnut ferry under the bridge' });
+    const lead = await visit('lead');
+    const { items } = latheList.parse((await lead.get(`${path}/lathes`)).body);
+    expect(items.find(({ id }) => id === lathe.id)?.data).toEqual(lathe.data);
+  });
+
   it('has a password that anybody could have chosen', () => {
     const names = [demoShop.name, ...signIns.flatMap(({ name, email }) => [name, email])];
     expect(weaknessOf(demoShop.password, names)).toBeNull();
