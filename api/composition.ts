@@ -5,6 +5,9 @@ import type { Logger } from 'pino';
 import type { Database, Transaction } from '@/db/client';
 
 import { createApp } from './app';
+import { appointmentsRepository } from './appointments/appointments-repository';
+import { appointmentsRoutes } from './appointments/appointments-routes';
+import { appointmentsService } from './appointments/appointments-service';
 import { auditRepository } from './audit/audit-repository';
 import { auditTrail } from './audit/audit-trail';
 import { accounts } from './auth/accounts';
@@ -29,6 +32,8 @@ import { membersRepository } from './shops/members-repository';
 import { shopsRepository } from './shops/shops-repository';
 import { shopsRoutes } from './shops/shops-routes';
 import { shopsService } from './shops/shops-service';
+import { wheelEntriesRepository } from './wheels/wheel-entries-repository';
+import { wheelLifeService } from './wheels/wheel-life-service';
 import { wheelsRepository } from './wheels/wheels-repository';
 import { wheelsRoutes } from './wheels/wheels-routes';
 import { wheelsService } from './wheels/wheels-service';
@@ -52,6 +57,8 @@ const shopRepositories = (tx: Transaction, shopId: string) => ({
   lathes: lathesRepository(tx, shopId),
   grinders: grindersRepository(tx, shopId),
   wheels: wheelsRepository(tx, shopId),
+  wheelEntries: wheelEntriesRepository(tx, shopId),
+  appointments: appointmentsRepository(tx, shopId),
   setups: setupsRepository(tx, shopId),
 });
 
@@ -97,7 +104,9 @@ export function composeServer(options: ServerOptions) {
     shops: shopsService(inShop, recompute),
     lathes: lathesService({ inShop, recompute }),
     grinders: grindersService({ inShop, recompute }),
-    wheels: wheelsService(inShop, recompute),
+    wheels: wheelsService({ inShop, recompute, now }),
+    wheelLives: wheelLifeService({ inShop, recompute, now }),
+    appointments: appointmentsService({ inShop, now }),
     setups: setupsService({ inShop, refreshOutdated: refreshOutdated(now), now }),
   };
 
@@ -122,7 +131,8 @@ export function composeServer(options: ServerOptions) {
     ...sessionRoutes({ accounts: services.accounts, sessions: signedIn, limits }),
     ...shopsRoutes(services.shops),
     ...machinesRoutes(services),
-    ...wheelsRoutes(services.wheels),
+    ...wheelsRoutes(services),
+    ...appointmentsRoutes(services.appointments),
     ...setupsRoutes(services.setups),
   ];
 

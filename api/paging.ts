@@ -34,6 +34,14 @@ export const isText = (part: string): boolean => part !== '' && !part.includes('
 export const isTime = (part: string): boolean =>
   !Number.isNaN(Date.parse(part)) && new Date(part).toISOString() === part;
 
+/** A finite number as cursors carry it. */
+export const isNumber = (part: string): boolean =>
+  part.trim() !== '' && Number.isFinite(Number(part));
+
+/** A date as cursors carry it; 'infinity' is that of what has none. */
+export const isDate = (part: string): boolean =>
+  part === 'infinity' || (/^\d{4}-\d\d-\d\d$/.test(part) && isTime(`${part}T00:00:00.000Z`));
+
 /** Of one row more than the page holds: the page, and where the next one starts. */
 export function pageOf<Row, Item>(
   rows: Row[],

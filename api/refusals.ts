@@ -6,6 +6,7 @@ interface RefusalDetails {
   detail?: string;
   errors?: FieldErrors;
   current?: unknown;
+  rule?: string;
   retryAfterSeconds?: number;
 }
 

@@ -1,11 +1,13 @@
+import { createAppointmentRequest } from '@/shared/contracts/appointments';
 import { createGrinderRequest, createLatheRequest } from '@/shared/contracts/machines';
 import { signUpRequest } from '@/shared/contracts/session';
 import { createSetupRequest } from '@/shared/contracts/setups';
+import { recordEntryRequest } from '@/shared/contracts/wheel-entries';
 import { createWheelRequest } from '@/shared/contracts/wheels';
 import type { GrinderData, LatheData, QuillData } from '@/shared/domain/machines';
 import type { Role, UnitSystem } from '@/shared/domain/people';
 import type { SetupInputs } from '@/shared/domain/setups';
-import type { WheelData } from '@/shared/domain/wheels';
+import type { WheelRecord } from '@/shared/domain/wheels';
 
 import type { Server } from './composition';
 import { Refusal } from './refusals';
@@ -34,7 +36,10 @@ export interface DemoShop {
   others: readonly DemoPerson[];
   lathes: readonly Named<LatheData>[];
   grinders: readonly (Named<GrinderData> & { quills: readonly Named<QuillData>[] })[];
-  wheels: readonly { id: string; tag: string; data: WheelData }[];
+  wheels: readonly { id: string; tag: string; data: WheelRecord; received: object }[];
+  appointments: readonly { id: string; personId: string }[];
+  /** After the wheels came, in order. */
+  wheelEntries: readonly { wheelId: string; personId: string; entry: object }[];
   setups: readonly { id: string; name: string; inputs: SetupInputs }[];
 }
 
@@ -74,6 +79,14 @@ async function plant(services: Server['services'], demo: DemoShop): Promise<void
     await services.grinders.create(caller, createGrinderRequest.parse({ ...grinder, typed }));
   for (const wheel of demo.wheels)
     await services.wheels.create(caller, createWheelRequest.parse({ ...wheel, typed }));
+  for (const appointment of demo.appointments)
+    await services.appointments.create(caller, createAppointmentRequest.parse(appointment));
+  for (const { wheelId, personId, entry } of demo.wheelEntries)
+    await services.wheelLives.record(
+      { personId, shopId: demo.id },
+      wheelId,
+      recordEntryRequest.parse(entry),
+    );
   for (const setup of demo.setups)
     await services.setups.create(caller, createSetupRequest.parse({ ...setup, typed }));
 }

@@ -1,11 +1,13 @@
 import type { Role } from '@/shared/domain/people';
 
+import type { AppointmentsRepository } from './appointments/appointments-repository';
 import type { AuditTrail } from './audit/audit-trail';
 import type { GrindersRepository } from './machines/grinders-repository';
 import type { LathesRepository } from './machines/lathes-repository';
 import type { MembersRepository } from './shops/members-repository';
 import type { ShopsRepository } from './shops/shops-repository';
 import type { SetupsRepository } from './setups/setups-repository';
+import type { WheelEntriesRepository } from './wheels/wheel-entries-repository';
 import type { WheelsRepository } from './wheels/wheels-repository';
 
 /** Who asks, and in which shop. */
@@ -23,6 +25,8 @@ export interface ShopScope {
   lathes: LathesRepository;
   grinders: GrindersRepository;
   wheels: WheelsRepository;
+  wheelEntries: WheelEntriesRepository;
+  appointments: AppointmentsRepository;
   setups: SetupsRepository;
   audit: AuditTrail;
 }

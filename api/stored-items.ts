@@ -101,7 +101,7 @@ export async function updateItem<T extends Item, Content>(
 }
 
 /** The same for two requests that say the same, in whatever order of their keys. */
-function digestOf(request: unknown): string {
+export function digestOf(request: unknown): string {
   return createHash('sha256').update(JSON.stringify(request, sortedKeys)).digest('hex');
 }
 

@@ -1,8 +1,10 @@
 import { setup, setupPage, type Setup } from '@/shared/contracts/setups';
+import type { RecordEntryRequest } from '@/shared/contracts/wheel-entries';
 import { demoShop } from '@/db/seed';
 import { RULES_VERSION } from '@/shared/rules';
 
 import { auditOf, makeShop, startApi, type Api, type TestShop } from '../support/api';
+import { entryBody } from '../support/bodies';
 
 const [lathe] = demoShop.lathes;
 const [, grinder] = demoShop.grinders;
@@ -64,7 +66,12 @@ describe('a draft', () => {
       .filter(({ level }) => level === 'stop')
       .map(({ code }) => code);
 
-  const setAside = { state: 'set aside', setAsideReason: 'A chip at the edge.' };
+  const record = (step: RecordEntryRequest['step'], over: Partial<RecordEntryRequest> = {}) =>
+    shop.as.lead
+      .post(`${shop.path}/wheels/${wheel?.id}/entries`)
+      .send({ ...entryBody(step), happenedOn: '2026-03-02', ...over });
+  const setAside = () =>
+    record({ kind: 'set aside', reason: 'A chip at the edge.' }, { version: null });
 
   it('reads Clear in the demo, from the rules as they are', async () => {
     expect(await read()).toMatchObject({ plan: { verdict: 'clear', rulesVersion: RULES_VERSION } });
@@ -73,14 +80,14 @@ describe('a draft', () => {
 
   it('stops at once when its wheel is set aside, and says so in the trail', async () => {
     const before = await read();
-    await putWheel(setAside).expect(200);
+    await setAside().expect(201);
     const { rows } = await api.owner.query('select verdict from setups where shop_id = $1', [
       shop.shopId,
     ]);
     expect(rows).toEqual([{ verdict: 'stop' }]);
     const after = await read();
     expect(after.plan.verdict).toBe('stop');
-    expect(codes(after)).not.toEqual([]);
+    expect(codes(after)).toContain('wheel-set-aside');
     // It was not edited: nobody's edit in progress becomes stale by it.
     expect(after).toMatchObject({ version: before.version, updatedAt: before.updatedAt });
     expect(
@@ -93,8 +100,13 @@ describe('a draft', () => {
         after: { verdict: 'stop', rulesVersion: RULES_VERSION },
       }),
     ]);
-    const back = { ...wheel?.data };
-    await put(`wheels/${wheel?.id}`, { version: 2, tag: wheel?.tag, data: back }).expect(200);
+    await record({ kind: 'inspected', look: 'sound', diameterMm: null }, { version: 2 }).expect(
+      201,
+    );
+    await record({ kind: 'returned' }, { version: 3 }).expect(201);
+    // It is on the rack again, and not rung since.
+    expect(codes(await read())).toEqual(['ring-missing']);
+    await record({ kind: 'ring test', ring: 'silent' }, { version: 4 }).expect(201);
     expect(await listedVerdict()).toBe('clear');
   });
 
@@ -161,7 +173,7 @@ describe('a draft', () => {
   it('stays as it was once it is retired', async () => {
     const retire = `${shop.path}/setups/${shop.setupId}/retire`;
     await shop.as.lead.post(retire).send({ version: 1 }).expect(200);
-    await putWheel(setAside).expect(200);
+    await setAside().expect(201);
     expect(await listedVerdict()).toBe('clear');
   });
 
@@ -169,9 +181,9 @@ describe('a draft', () => {
     const { name, inputs, typed } = await read();
     const [saved, changed] = await Promise.all([
       put(`setups/${shop.setupId}`, { name: `${name}, again`, inputs, typed }),
-      putWheel(setAside),
+      setAside(),
     ]);
-    expect([saved.status, changed.status]).toEqual([200, 200]);
+    expect([saved.status, changed.status]).toEqual([200, 201]);
     expect(await listedVerdict()).toBe('stop');
   });
 });

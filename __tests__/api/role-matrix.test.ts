@@ -6,15 +6,16 @@ import {
   type TestShop,
   type Visitor,
 } from '../support/api';
-import { grinderBody, latheBody, setupBody, wheelBody } from '../support/bodies';
+import { appointmentBody, grinderBody, latheBody, setupBody, wheelBody } from '../support/bodies';
 import { problemOf } from '../support/item-tests';
 import { CALLERS, ROLE_MATRIX, type CallerName } from './role-matrix';
 
 const BODIES = {
-  lathes: latheBody,
-  grinders: grinderBody,
-  wheels: wheelBody,
-  setups: setupBody,
+  lathes: () => latheBody(),
+  grinders: () => grinderBody(),
+  wheels: () => wheelBody(),
+  setups: () => setupBody(),
+  appointments: ({ lead }: { lead: string }) => appointmentBody(lead),
 } as const;
 
 /** A session that such an operation ends or replaces is not one that others go on to use. */
@@ -37,7 +38,7 @@ describe('who may do what', () => {
   };
 
   const make = async (of: keyof typeof BODIES): Promise<string> => {
-    const body = BODIES[of]();
+    const body = BODIES[of](shop.ids);
     await shop.as.lead.post(`${shop.path}/${of}`).send(body).expect(201);
     return body.id;
   };
@@ -54,7 +55,7 @@ describe('who may do what', () => {
         if (caller === 'stranger' && ENDS_SESSION.has(path)) continue;
         const where = path.replace(':shopId', shop.shopId).replace(':id', of ? await make(of) : '');
         const version = of ? undefined : await shopVersion();
-        const sent = body && { ...body(), ...(method === 'patch' ? { version } : {}) };
+        const sent = body && { ...body(shop.ids), ...(method === 'patch' ? { version } : {}) };
         const response = await visitorFor(caller)[method](`/api${where}`).send(sent);
         expect([caller, response.status]).toEqual([caller, answers[index]]);
         if (response.status >= 400) problemOf(response);

@@ -1,6 +1,13 @@
 import { v7 as uuidv7 } from 'uuid';
 
-import { grinderBody, latheBody, setupBody, wheelBody } from '../support/bodies';
+import {
+  grinderBody,
+  latheBody,
+  setupBody,
+  wheelBody,
+  entryBody,
+  appointmentBody,
+} from '../support/bodies';
 
 /** Who knocks: nobody, the three roles of the shop, and the lead of another shop. */
 export const CALLERS = ['anonymous', 'apprentice', 'machinist', 'lead', 'stranger'] as const;
@@ -13,13 +20,17 @@ interface Operation {
   /** What each caller is answered, in the order of CALLERS. */
   answers: readonly [number, number, number, number, number];
   /** What is sent; `id` is of a thing the shop has, in its first version. */
-  body?: () => object;
+  body?: (ids: { lead: string }) => object;
   /** What the thing at `:id` is. */
-  of?: 'lathes' | 'grinders' | 'wheels' | 'setups';
+  of?: 'lathes' | 'grinders' | 'wheels' | 'setups' | 'appointments';
 }
 
 const shop = '/shops/:shopId';
 const renamed = ({ id: _id, ...content }: { id: string }) => ({ version: 1, ...content });
+const editedWheel = () => {
+  const { received: _received, ...body } = wheelBody();
+  return renamed(body);
+};
 
 const READ = [401, 200, 200, 200, 404] as const;
 const EDIT_BY_SKILLED = [401, 403, 200, 200, 404] as const;
@@ -99,7 +110,32 @@ export const ROLE_MATRIX: readonly Operation[] = [
     path: `${shop}/wheels/:id`,
     of: 'wheels',
     answers: EDIT_BY_SKILLED,
-    body: () => renamed(wheelBody()),
+    body: editedWheel,
+  },
+  { method: 'get', path: `${shop}/wheel-places`, answers: READ },
+  { method: 'get', path: `${shop}/wheels/:id/life`, of: 'wheels', answers: READ },
+  { method: 'get', path: `${shop}/wheels/:id/entries`, of: 'wheels', answers: READ },
+  {
+    method: 'post',
+    path: `${shop}/wheels/:id/entries`,
+    of: 'wheels',
+    answers: CREATE_BY_ALL,
+    body: () => entryBody({ kind: 'ring test', ring: 'clear' }),
+  },
+
+  { method: 'get', path: `${shop}/appointments`, answers: READ },
+  {
+    method: 'post',
+    path: `${shop}/appointments`,
+    answers: [401, 403, 403, 201, 404],
+    body: ({ lead }) => appointmentBody(lead),
+  },
+  {
+    method: 'post',
+    path: `${shop}/appointments/:id/end`,
+    of: 'appointments',
+    answers: BY_LEAD,
+    body: () => ({ version: 1 }),
   },
 
   { method: 'get', path: `${shop}/setups`, answers: READ },

@@ -1,6 +1,6 @@
 import { wheel, wheelPage, type Wheel } from '@/shared/contracts/wheels';
 
-import { auditOf, makeShop, startApi, type Api, type TestShop } from '../support/api';
+import { makeShop, startApi, type Api, type TestShop } from '../support/api';
 import { wheelBody } from '../support/bodies';
 import { describeItem, problemOf } from '../support/item-tests';
 
@@ -9,21 +9,28 @@ describeItem({
   subject: 'wheel',
   contract: wheel,
   body: () => wheelBody(),
-  edited: (body) => ({ ...body, data: { ...body.data, diameterNowMm: 24.1 } }),
+  edited: (body) => ({ ...body, data: { ...body.data, place: 'Peg 11' } }),
+  onlyAtFirst: ['received'],
   wrong: {
     tag: 'x'.repeat(21),
     'data.marking': '',
+    'data.shape': '99',
     'data.diameterNewMm': 0,
-    'data.diameterNowMm': 26,
     'data.widthMm': -5,
-    'data.holeMm': 24.5,
+    'data.holeMm': 25,
     'data.markedRpm': 0,
     'data.markedSpeedMPerS': 201,
     'data.markingReadOn': 'memory',
     'data.mounted': { mandrelDiameterMm: 6 },
-    'data.expiresOn': '2026-02-30',
-    'data.state': 'lost',
-    'data.setAsideReason': 'It looks odd.',
+    'data.smallestUsableMm': 8,
+    'data.madeOn': '2026-02-30',
+    'data.expiresOn': '2025-11-02',
+    'data.place': 'x'.repeat(41),
+    'data.notes': '',
+    'received.on': 'yesterday',
+    'received.diameterMm': 25.1,
+    'received.looked': 'fine',
+    'received.rung': 'loud',
   },
 });
 
@@ -40,7 +47,7 @@ describe('the wheels of a shop', () => {
   const make = async (change: Partial<ReturnType<typeof wheelBody>> = {}) => {
     const body = wheelBody(change);
     await shop.as.lead.post(at()).send(body).expect(201);
-    const { id, ...content } = body;
+    const { id, received: _received, ...content } = body;
     return { id, content };
   };
   const list = async (query: Record<string, string | number>) =>
@@ -100,52 +107,45 @@ describe('the wheels of a shop', () => {
       threaded: false,
       makerMaximumRpm: 34_500,
     };
-    const { id } = await make({ data: { ...wheelBody().data, holeMm: 0, mounted } });
+    const { id } = await make({ data: { ...wheelBody().data, shape: '52', holeMm: 0, mounted } });
     const { body } = await shop.as.lead.get(at(id)).expect(200);
     expect(wheel.parse(body).data.mounted).toEqual(mounted);
   });
 
-  it('are set aside by an apprentice, with the reason, and by nothing else changed', async () => {
+  it('say nothing in an edit of what their entries say', async () => {
     const { id, content } = await make();
-    const setAside = {
-      ...content.data,
-      state: 'set aside' as const,
-      setAsideReason: 'A chip at the edge.',
-    };
-    const edit = (data: typeof content.data) =>
-      shop.as.apprentice.put(at(id)).send({ version: 1, ...content, data });
-    await edit({ ...content.data, diameterNowMm: 20 }).expect(403);
-    await edit({ ...setAside, diameterNowMm: 20 }).expect(403);
-    const unreasoned = await edit({ ...setAside, setAsideReason: null }).expect(400);
-    expect(problemOf(unreasoned).errors?.map(({ path }) => path)).toEqual(['data.setAsideReason']);
-    await edit(setAside).expect(200);
-    expect((await auditOf(api, id)).at(-1)).toMatchObject({
-      person_id: shop.ids.apprentice,
-      action: 'update',
-    });
+    for (const field of [
+      'state',
+      'diameterNowMm',
+      'looked',
+      'rung',
+      'setAsideReason',
+      'unsigned',
+    ]) {
+      const data = { ...content.data, [field]: null };
+      const answer = await shop.as.lead
+        .put(at(id))
+        .send({ version: 1, ...content, data })
+        .expect(400);
+      expect(problemOf(answer).errors?.map(({ path }) => path)).toEqual([`data.${field}`]);
+    }
   });
 
-  it.each(['set aside', 'scrapped'] as const)('come back from %s by a lead only', async (state) => {
-    const setAsideReason = state === 'set aside' ? 'Rang dull.' : null;
-    const { id, content } = await make({
-      data: { ...wheelBody().data, state, setAsideReason },
-    });
-    const back = {
-      version: 1,
-      ...content,
-      data: { ...content.data, state: 'on the rack', setAsideReason: null },
-    };
-    await shop.as.apprentice.put(at(id)).send(back).expect(403);
-    await shop.as.machinist.put(at(id)).send(back).expect(403);
-    await shop.as.lead.put(at(id)).send(back).expect(200);
+  it('never become in an edit what their entries rule out', async () => {
+    const { id, content } = await make();
+    const edit = (data: Partial<typeof content.data>) =>
+      shop.as.lead.put(at(id)).send({ version: 1, ...content, data: { ...content.data, ...data } });
+    // It came with 24.5 mm.
+    const smaller = await edit({ diameterNewMm: 24.4, smallestUsableMm: null }).expect(422);
+    expect(problemOf(smaller).errors?.map(({ path }) => path)).toEqual(['data.diameterNewMm']);
+    const hollow = await edit({ holeMm: 24.5, smallestUsableMm: null }).expect(422);
+    expect(problemOf(hollow).errors?.map(({ path }) => path)).toEqual(['data.holeMm']);
+    await edit({ diameterNewMm: 24.5, holeMm: 24.4, smallestUsableMm: null }).expect(200);
   });
 
-  it('are scrapped by a machinist, also from set aside', async () => {
-    const aside = { state: 'set aside' as const, setAsideReason: 'Cracked.' };
-    const { id, content } = await make({ data: { ...wheelBody().data, ...aside } });
-    const scrapped = { ...content.data, state: 'scrapped', setAsideReason: null };
-    const edit = { version: 1, ...content, data: scrapped };
-    await shop.as.apprentice.put(at(id)).send(edit).expect(403);
-    await shop.as.machinist.put(at(id)).send(edit).expect(200);
+  it('came on a day that has been', async () => {
+    const received = { on: '2099-01-01', diameterMm: null, looked: null, rung: null };
+    const answer = await shop.as.lead.post(at()).send(wheelBody({ received })).expect(422);
+    expect(problemOf(answer).errors?.map(({ path }) => path)).toEqual(['received.on']);
   });
 });

@@ -129,13 +129,14 @@ describe('the catalogue', () => {
     expect(await namesOf(views)).toEqual([]);
   });
 
-  it('lets nobody run a function with the owner’s rights but the one that finds credentials', async () => {
+  it('lets nobody run a function with the owner’s rights but those that find credentials and wheels', async () => {
     const definers = `select p.proname as name from pg_proc p join pg_namespace n on n.oid = p.pronamespace
       where n.nspname = 'public' and p.prosecdef`;
-    expect(await namesOf(definers)).toEqual(['credentials_of']);
-    await expect(
-      db.as.backup.query("select * from credentials_of('a@example.test')"),
-    ).rejects.toThrow('permission denied');
+    expect(await namesOf(`${definers} order by 1`)).toEqual(['credentials_of', 'wheels_holding']);
+    for (const call of ["credentials_of('a@example.test')", "wheels_holding('%', 10)"])
+      await expect(db.as.backup.query(`select * from ${call}`)).rejects.toThrow(
+        'permission denied',
+      );
   });
 });
 

@@ -1,7 +1,9 @@
 import { v7 as uuidv7 } from 'uuid';
 
+import type { CreateAppointmentRequest } from '@/shared/contracts/appointments';
 import type { CreateGrinderRequest, CreateLatheRequest } from '@/shared/contracts/machines';
 import type { CreateSetupRequest } from '@/shared/contracts/setups';
+import type { RecordEntryRequest } from '@/shared/contracts/wheel-entries';
 import type { CreateWheelRequest } from '@/shared/contracts/wheels';
 import { emptySetupInputs } from '@/shared/rules';
 
@@ -84,19 +86,20 @@ export const wheelBody = (over: Partial<CreateWheelRequest> = {}): CreateWheelRe
   data: {
     marking: 'A 60 K 7 V',
     diameterNewMm: 25,
-    diameterNowMm: 24.5,
     widthMm: 20,
     holeMm: 8,
     markedRpm: 26_700,
     markedSpeedMPerS: 35,
     markingReadOn: 'box',
     mounted: null,
-    looked: 'sound',
-    rung: 'clear',
+    shape: '1',
+    smallestUsableMm: 12,
+    madeOn: '2025-11-03',
     expiresOn: '2099-06-30',
-    state: 'on the rack',
-    setAsideReason: null,
+    place: 'Drawer 2',
+    notes: null,
   },
+  received: { on: null, diameterMm: 24.5, looked: 'sound', rung: 'clear' },
   typed: { widthMm: '20' },
   ...over,
 });
@@ -106,5 +109,31 @@ export const setupBody = (over: Partial<CreateSetupRequest> = {}): CreateSetupRe
   name: 'Jaws of the small chuck',
   inputs: emptySetupInputs('jaws'),
   typed: { 'work.jawBoreMm': '2 3/8 in' },
+  ...over,
+});
+
+/** A step of a wheel in its first version, on a day that is past whenever the tests run. */
+export const entryBody = (
+  step: RecordEntryRequest['step'],
+  over: Partial<RecordEntryRequest> = {},
+): RecordEntryRequest => ({
+  id: uuidv7(),
+  version: 1,
+  happenedOn: new Date().toISOString().slice(0, 10),
+  note: null,
+  step,
+  ...over,
+});
+
+export const appointmentBody = (
+  personId: string,
+  over: Partial<CreateAppointmentRequest> = {},
+): CreateAppointmentRequest => ({
+  id: uuidv7(),
+  personId,
+  tasks: ['mount', 'dress', 'trial run'],
+  wheelClass: 'All wheels of the shop',
+  from: '2026-01-05',
+  until: null,
   ...over,
 });

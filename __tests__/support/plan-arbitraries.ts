@@ -185,11 +185,13 @@ const wheel: fc.Arbitrary<WheelData> = fc.record({
     }),
     { nil: null, freq: 1 },
   ),
+  smallestUsableMm: field('wheelDiameterMm'),
   looked: maybe(oneOf(LOOK_RESULTS)),
   rung: maybe(oneOf(RING_RESULTS)),
   expiresOn: maybe(fc.constantFrom('2020-01-01', '2030-01-01')),
   state: oneOf(WHEEL_STATES),
   setAsideReason: maybe(fc.constant('dropped')),
+  unsigned: fc.boolean(),
 });
 
 const inputs: fc.Arbitrary<SetupInputs> = fc.record({

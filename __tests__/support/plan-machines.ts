@@ -117,11 +117,13 @@ export const SMALL_WHEEL: WheelData = {
   markedSpeedMPerS: null,
   markingReadOn: 'box',
   mounted: null,
+  smallestUsableMm: null,
   looked: 'sound',
   rung: 'clear',
   expiresOn: null,
   state: 'on the rack',
   setAsideReason: null,
+  unsigned: false,
 };
 
 export const LARGE_WHEEL: WheelData = {

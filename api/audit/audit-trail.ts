@@ -4,8 +4,8 @@ import type { AuditEntry, AuditRepository } from './audit-repository';
 
 /** What was done to what. `before` is null for what is new. */
 export type AuditedWrite = Pick<AuditEntry, 'subjectId' | 'before' | 'after'> & {
-  action: 'create' | 'update' | 'recompute' | 'retire';
-  subject: 'shop' | 'membership' | 'lathe' | 'grinder' | 'wheel' | 'setup';
+  action: 'create' | 'update' | 'recompute' | 'retire' | 'record' | 'end';
+  subject: 'shop' | 'membership' | 'lathe' | 'grinder' | 'wheel' | 'setup' | 'appointment';
 };
 
 /** Writes down who did what, in the transaction in which they do it. */

@@ -22,7 +22,7 @@ const PROBLEMS: Record<ProblemCode, { status: number; title: string }> = {
   unavailable: { status: 503, title: 'The server cannot answer now' },
 };
 
-type Details = Pick<ProblemDetails, 'detail' | 'errors' | 'current'>;
+type Details = Pick<ProblemDetails, 'detail' | 'errors' | 'current' | 'rule'>;
 
 /** Answers with problem details (RFC 9457). */
 export function sendProblem(res: Response, code: ProblemCode, details: Details = {}): void {

@@ -31,6 +31,7 @@ export interface SetupSearch {
   search?: string | undefined;
   operation?: Operation | undefined;
   state?: SetupState | undefined;
+  wheelId?: string | undefined;
   after?: string | undefined;
   limit: number;
 }
@@ -79,7 +80,14 @@ export const setupsRepository = (tx: Transaction, shopId: string) => {
   return {
     find,
 
-    async list({ search, operation, state, after, limit }: SetupSearch): Promise<SetupPage> {
+    async list({
+      search,
+      operation,
+      state,
+      wheelId,
+      after,
+      limit,
+    }: SetupSearch): Promise<SetupPage> {
       const [time, id] = after === undefined ? [] : keyOf(after, isTime, isUuid);
       const rows = await tx
         .select({ ...summary, updatedByName: persons.name })
@@ -90,6 +98,7 @@ export const setupsRepository = (tx: Transaction, shopId: string) => {
             eq(setups.shopId, shopId),
             operation && eq(setups.operation, operation),
             state && eq(setups.state, state),
+            wheelId === undefined ? undefined : eq(setups.wheelId, wheelId),
             search ? ilike(setups.name, containing(search)) : undefined,
             time && id
               ? sql`(${setups.updatedAt}, ${setups.id}) < (${time}::timestamptz, ${id}::uuid)`

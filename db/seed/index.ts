@@ -1,6 +1,8 @@
+import { appointments } from './appointments';
 import { inchLathe, insideGrinder, metricLathe, outsideGrinder } from './machines';
 import { lead, others, password } from './people';
 import { setups } from './setups';
+import { wheelEntries } from './wheel-lives';
 import { wheels } from './wheels';
 
 export { signIns } from './people';
@@ -17,5 +19,7 @@ export const demoShop = {
   lathes: [metricLathe, inchLathe],
   grinders: [outsideGrinder, insideGrinder],
   wheels,
+  appointments,
+  wheelEntries,
   setups,
 } as const;

@@ -19,13 +19,17 @@ import { UNIT_SYSTEMS, type UnitSystem } from '@/shared/domain/people';
 import type {
   LookResult,
   MarkingPlace,
+  RackWheel,
   RingResult,
-  WheelData,
+  WheelRecord,
   WheelState,
 } from '@/shared/domain/wheels';
 
 import { MANDREL_FIELDS, WHEEL_FIELDS, type MandrelField, type WheelField } from './fields';
 import { SPEED_UNITS, storedSpeed, typedSpeed, type SpeedUnit } from './marked-speed';
+
+/** What of a wheel is not asked for here, and goes back as it came. */
+type Unasked = Pick<WheelRecord, 'shape' | 'smallestUsableMm' | 'madeOn' | 'place' | 'notes'>;
 
 interface MandrelValues extends Entries<MandrelField> {
   threaded: boolean;
@@ -42,8 +46,11 @@ export interface WheelValues extends RecordValues, Entries<WheelField> {
   looked: LookResult | typeof UNKNOWN;
   rung: RingResult | typeof UNKNOWN;
   expiresOn: string;
+  /** As the wheel's entries have it: shown, and not edited here. */
   state: WheelState;
   setAsideReason: string;
+  unsigned: boolean;
+  unasked: Unasked;
 }
 
 const SPEED_UNIT_KEY = '@speedUnit';
@@ -74,6 +81,8 @@ export function newWheel(units: UnitSystem): WheelValues {
     expiresOn: '',
     state: 'on the rack',
     setAsideReason: '',
+    unsigned: false,
+    unasked: { shape: null, smallestUsableMm: null, madeOn: null, place: null, notes: null },
   };
 }
 
@@ -112,6 +121,14 @@ export function valuesOf({ id, tag, data, typed }: Wheel, units: UnitSystem): Wh
     expiresOn: data.expiresOn ?? '',
     state: data.state,
     setAsideReason: data.setAsideReason ?? '',
+    unsigned: data.unsigned,
+    unasked: {
+      shape: data.shape,
+      smallestUsableMm: data.smallestUsableMm,
+      madeOn: data.madeOn,
+      place: data.place,
+      notes: data.notes,
+    },
   };
   return changed(values, recallTexts(typed, units));
 }
@@ -134,24 +151,27 @@ export const withSpeedUnit = (values: WheelValues, speedUnit: SpeedUnit): WheelV
 });
 
 /** The wheel as far as it is typed; null while a size is missing or cannot be read. */
-export function wheelDataOf(values: WheelValues): WheelData | null {
-  const { mounted, isMounted } = values;
+export function wheelDataOf(values: WheelValues): RackWheel | null {
+  const record = recordOf(values);
+  if (!record) return null;
+  return {
+    ...record,
+    diameterNowMm: values.diameterNowMm.si ?? record.diameterNewMm,
+    looked: knownOrNull(values.looked),
+    rung: knownOrNull(values.rung),
+    state: values.state,
+    setAsideReason: values.setAsideReason || null,
+    unsigned: values.unsigned,
+  };
+}
+
+function recordOf(values: WheelValues): WheelRecord | null {
+  const { mounted, isMounted, unasked, expiresOn } = values;
   const { diameterNewMm, widthMm, holeMm, ...plate } = plateOf(values);
   if (diameterNewMm === null || widthMm === null || holeMm === null) return null;
   if (isMounted && (mounted.mandrelDiameterMm.si === null || mounted.overhangMm.si === null))
     return null;
-  return {
-    ...plate,
-    diameterNewMm,
-    diameterNowMm: values.diameterNowMm.si ?? diameterNewMm,
-    widthMm,
-    holeMm,
-    looked: knownOrNull(values.looked),
-    rung: knownOrNull(values.rung),
-    expiresOn: readDate(values.expiresOn),
-    state: values.state,
-    setAsideReason: values.state === 'set aside' ? values.setAsideReason.trim() : null,
-  };
+  return { ...plate, ...unasked, diameterNewMm, widthMm, holeMm, expiresOn: readDate(expiresOn) };
 }
 
 /** What stands on the wheel's plate while it is typed; null where a size is missing. */
@@ -180,11 +200,17 @@ export function plateOf(values: WheelValues) {
  * @throws {RangeError} when a size is missing; the schema refuses that before.
  */
 export function toRequest(values: WheelValues): CreateWheelRequest {
-  const data = wheelDataOf(values);
+  const data = recordOf(values);
   if (!data) throw new RangeError('A wheel without its sizes cannot be sent.');
   const typed = collectTexts(values.units, (change) => changed(values, change));
   typed[SPEED_UNIT_KEY] = values.speedUnit;
-  return { id: values.id, tag: values.tag.trim(), data, typed };
+  const received = {
+    on: null,
+    diameterMm: values.diameterNowMm.si,
+    looked: knownOrNull(values.looked),
+    rung: knownOrNull(values.rung),
+  };
+  return { id: values.id, tag: values.tag.trim(), data, received, typed };
 }
 
 /** Guards what comes back from the device's storage. */
@@ -197,6 +223,7 @@ export function isWheelValues(value: unknown): value is WheelValues {
     UNIT_SYSTEMS.some((system) => system === shape.units) &&
     typeof shape.tag === 'string' &&
     typeof shape.diameterNewMm?.text === 'string' &&
-    typeof shape.mounted?.overhangMm?.text === 'string'
+    typeof shape.mounted?.overhangMm?.text === 'string' &&
+    typeof shape.unasked === 'object'
   );
 }

@@ -84,3 +84,8 @@ export const wheelParts: Part<WheelValues>[] = [
     take: (into, { state, setAsideReason }) => ({ ...into, state, setAsideReason }),
   },
 ];
+
+const FROM_ENTRIES = new Set(['diameterNowMm', 'looked', 'rung', 'state']);
+
+/** Those that are edited; the others follow from the wheel's entries. */
+export const recordParts = wheelParts.filter(({ key }) => !FROM_ENTRIES.has(key));

@@ -11,6 +11,7 @@ import {
   type CreateWheelRequest,
   type UpdateWheelRequest,
 } from '@/shared/contracts/wheels';
+import { recordedEntry, type RecordEntryRequest } from '@/shared/contracts/wheel-entries';
 import { request, STALE } from '@/features/transport';
 
 const at = (shopId: string, id?: string) => `/api/shops/${shopId}/wheels${id ? `/${id}` : ''}`;
@@ -49,5 +50,15 @@ export function useSaveWheel(shopId: string) {
         ? request(wheel, at(shopId, save.id), { method: 'PUT', body: save.body })
         : request(wheel, at(shopId), { method: 'POST', body: save.body }),
     onSuccess: () => client.invalidateQueries({ queryKey: wheelQueries.all(shopId) }),
+  });
+}
+
+/** Writes down a step of a wheel's life. */
+export function useRecordEntry(shopId: string, wheelId: string) {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: (body: RecordEntryRequest) =>
+      request(recordedEntry, `${at(shopId, wheelId)}/entries`, { method: 'POST', body }),
+    onSettled: () => client.invalidateQueries({ queryKey: wheelQueries.all(shopId) }),
   });
 }

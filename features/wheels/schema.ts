@@ -29,7 +29,7 @@ const holeFits = (units: UnitSystem) =>
     return createError({ message: `Hole is smaller than the wheel, ${limit}.` });
   });
 
-export function wheelSchema({ units, speedUnit, isMounted, state }: WheelValues) {
+export function wheelSchema({ units, speedUnit, isMounted }: WheelValues) {
   const rules = entryRules(WHEEL_FIELDS, units, ['diameterNewMm', 'widthMm']);
   return yup.object({
     tag: yup
@@ -53,14 +53,5 @@ export function wheelSchema({ units, speedUnit, isMounted, state }: WheelValues)
         }
       : {}),
     expiresOn: dateText('Expires on'),
-    ...(state === 'set aside'
-      ? {
-          setAsideReason: yup
-            .string()
-            .trim()
-            .required('Enter why the wheel is set aside.')
-            .max(TEXT_LIMITS.note, `The reason has at most ${TEXT_LIMITS.note} characters.`),
-        }
-      : {}),
   });
 }

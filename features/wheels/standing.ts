@@ -1,5 +1,6 @@
 import { dayWords } from '@/features/records';
 import type { WheelData } from '@/shared/domain/wheels';
+import { isOrganic, markingOf } from '@/shared/rules/bond';
 import type { FindingCode } from '@/shared/rules/findings';
 import { limitRpm, wheelLimits } from '@/shared/rules/limits';
 import type { SpeedLimit } from '@/shared/rules/types';
@@ -21,6 +22,8 @@ const SHORT: Partial<Record<FindingCode, (wheel: WheelData) => string>> = {
   'wheel-damaged': () => 'damaged',
   'ring-dull': () => 'dull ring',
   'ring-silent-large': () => 'does not ring',
+  'wheel-worn-out': () => 'worn out',
+  'wheel-unsigned': () => 'waits for a signature',
   'unmarked-wheel': () => 'no speed marked',
   'mounted-no-figure': () => "no maker's rpm",
   'wheel-not-looked-at': () => 'close look due',
@@ -28,7 +31,13 @@ const SHORT: Partial<Record<FindingCode, (wheel: WheelData) => string>> = {
 };
 
 export const wheelFindingsOn = (wheel: WheelData, today: string) =>
-  wheelFindings({ wheel, quill: null, organicBond: null, typed: false, today });
+  wheelFindings({
+    wheel,
+    quill: null,
+    organicBond: isOrganic(markingOf(wheel.marking)),
+    typed: false,
+    today,
+  });
 
 /** What the rack says of a wheel: the gravest thing against it, else where it is. */
 export function standingOf(wheel: WheelData, today: string): Standing {

@@ -15,7 +15,7 @@ import { WhereItMayRun } from './components/where-it-may-run';
 import { MarkingFields, SizeFields, SpeedFields, StateFields } from './components/wheel-fields';
 import { isWheelValues, newWheel, plateOf, valuesOf, wheelDataOf, type WheelValues } from './form';
 import { inUnits, toRequest } from './form';
-import { wheelParts } from './parts';
+import { recordParts, wheelParts } from './parts';
 import { wheelSchema } from './schema';
 import { useSaveWheel, wheelQueries } from './queries';
 
@@ -46,12 +46,12 @@ export function WheelForm({ wheel, backTo }: WheelFormProps) {
         isValues={isWheelValues}
         schema={wheelSchema}
         inUnits={inUnits}
-        parts={() => wheelParts}
+        parts={() => (wheel ? recordParts : wheelParts)}
         save={(values, version) => {
-          const { id, ...body } = toRequest(values);
+          const { id, received, ...body } = toRequest(values);
           return save.mutateAsync({
             id,
-            body: version === null ? { id, ...body } : { version, ...body },
+            body: version === null ? { id, received, ...body } : { version, ...body },
           });
         }}
         stored={storedWheel}
@@ -64,9 +64,9 @@ export function WheelForm({ wheel, backTo }: WheelFormProps) {
         {() => (
           <>
             <MarkingFields />
-            <SizeFields />
+            <SizeFields isNew={wheel === null} />
             <SpeedFields />
-            <StateFields before={wheel?.data.state ?? null} />
+            <StateFields isNew={wheel === null} />
           </>
         )}
       </RecordForm>

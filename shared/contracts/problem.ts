@@ -33,6 +33,8 @@ export const problemDetails = z.object({
   requestId: z.string().optional(),
   errors: z.array(z.object({ path: z.string(), message: z.string() })).optional(),
   current: z.unknown().optional(),
+  /** Which rule refused, where several could: stable, for a client to act on. */
+  rule: z.string().optional(),
 });
 
 export type ProblemDetails = z.infer<typeof problemDetails>;

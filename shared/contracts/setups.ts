@@ -16,9 +16,10 @@ import {
   VERDICTS,
   type SetupInputs,
 } from '../domain/setups';
+import { LOOK_RESULTS, RING_RESULTS } from '../domain/wheels';
 import { expectedVersion, id, name, page, pageQuery, stored, within } from './common';
 import { typedTexts } from './machines';
-import { wheelData } from './wheels';
+import { wheelRecord } from './wheels';
 
 const maybe = (range: { min: number; max: number }) => within(range).nullable();
 const whole = (range: { min: number; max: number }) =>
@@ -76,16 +77,16 @@ const setupInputs = z.strictObject({
     wheelId: id.nullable(),
     typed: z
       .strictObject({
-        marking: wheelData.shape.marking,
+        marking: wheelRecord.shape.marking,
         diameterNewMm: maybe(LIMITS.wheelDiameterMm),
         diameterNowMm: maybe(LIMITS.wheelDiameterMm),
         widthMm: maybe(LIMITS.wheelWidthMm),
         holeMm: maybe(LIMITS.wheelHoleMm),
-        markedRpm: wheelData.shape.markedRpm,
-        markedSpeedMPerS: wheelData.shape.markedSpeedMPerS,
-        markingReadOn: wheelData.shape.markingReadOn,
-        looked: wheelData.shape.looked,
-        rung: wheelData.shape.rung,
+        markedRpm: wheelRecord.shape.markedRpm,
+        markedSpeedMPerS: wheelRecord.shape.markedSpeedMPerS,
+        markingReadOn: wheelRecord.shape.markingReadOn,
+        looked: z.enum(LOOK_RESULTS).nullable(),
+        rung: z.enum(RING_RESULTS).nullable(),
       })
       .nullable(),
   }),
@@ -155,6 +156,7 @@ export const setupQuery = z.strictObject({
   search: z.string().trim().max(TEXT_LIMITS.name).optional(),
   operation: z.enum(OPERATIONS).optional(),
   state: z.enum(SETUP_STATES).optional(),
+  wheelId: id.optional(),
 });
 
 /** A copy under a new id and name, with the inputs as they stand. */

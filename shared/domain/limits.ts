@@ -65,6 +65,9 @@ export const LIMITS = {
   dressDepthMm: { min: 0.001, max: 0.2 },
   dressPasses: { min: 1, max: 50 },
   dressOverlap: { min: 1, max: 30 },
+  // Rack
+  trialRunMinutes: { min: 0.5, max: 60 },
+  usedMinutes: { min: 1, max: 1440 },
 } as const satisfies Record<string, Range>;
 
 export type LimitName = keyof typeof LIMITS;
@@ -76,6 +79,8 @@ export const TEXT_LIMITS = {
   note: 2000,
   marking: 40,
   tag: 20,
+  place: 40,
+  wheelClass: 120,
   typed: 40,
   passwordMin: 15,
   passwordMax: 128,

@@ -21,9 +21,11 @@ export function typedWheelData(typed: TypedWheel): WheelData | null {
     widthMm,
     holeMm,
     mounted: null,
+    smallestUsableMm: null,
     expiresOn: null,
     state: 'on the rack',
     setAsideReason: null,
+    unsigned: false,
   };
 }
 

@@ -37,6 +37,13 @@ export const WHEEL_FINDINGS = {
     remedy: 'Choose another wheel.',
     source: 'osha-1910-215-d1',
   },
+  'wheel-unsigned': {
+    part: 'wheel',
+    levels: ['stop'],
+    title: 'An appointed person has not yet signed for the work done on this wheel.',
+    remedy: 'Have it looked at and countersigned by somebody the shop has appointed.',
+    source: 'hk-59l-7',
+  },
   'wheel-damaged': {
     part: 'wheel',
     levels: ['stop'],
@@ -92,6 +99,13 @@ export const WHEEL_FINDINGS = {
     title: 'The wheel is entered as {now} now and {fresh} when new; a wheel only gets smaller.',
     remedy: 'Measure it, and read the diameter when new from its marking.',
     source: 'derived-geometry',
+  },
+  'wheel-worn-out': {
+    part: 'wheel',
+    levels: ['stop'],
+    title: 'The wheel is worn to {now}; its smallest usable diameter is {smallest}.',
+    remedy: 'Scrap it and choose another.',
+    source: 'entered',
   },
   'hole-too-small': {
     part: 'wheel',

@@ -1,15 +1,14 @@
 import type { Material } from '../domain/materials';
+import type { Abrasive } from '../domain/wheels';
 import { MM_PER_INCH } from '../units/constants';
 import { finding } from './findings';
 import { GRAINS, parseMarking, type WheelMarking } from './marking';
 import type { SourceId } from './sources';
 import type { Finding } from './types';
 
-type Family = 'aluminium oxide' | 'silicon carbide' | 'diamond' | 'cBN';
-
 /** A range of marks that suit some work. */
 export interface RecommendedMark {
-  family: Family;
+  family: Abrasive;
   grain: { coarsest: number; finest: number };
   grade: { softest: string; hardest: string };
   bond: 'V';
@@ -37,7 +36,7 @@ const POINTS = { family: 40, grain: 25, grade: 25, bond: 10 };
 const POINTS_LOST_PER_STEP = 5;
 
 function mark(
-  family: Family,
+  family: Abrasive,
   [coarsest, finest]: [number, number],
   [softest, hardest]: [string, string],
 ): RecommendedMark {
@@ -102,7 +101,7 @@ export function scoreMark(
   material: Material,
   recommended: RecommendedMark,
 ): MarkScore {
-  const family = familyOf(marking);
+  const family = abrasiveFamily(marking);
   if (family === 'diamond' && isFerrous(material))
     return { score: 0, reasons: ['Diamond wears away chemically on steel and iron.'] };
   const suits = suitsFamily(family, material, recommended);
@@ -151,7 +150,7 @@ export function markFindings(text: string | null, material: Material | null): Fi
   const parsed = parseMarking(text);
   if (!parsed.ok) return [finding('marking-not-read', { names: { marking: text } })];
   if (material === null) return [];
-  const family = familyOf(parsed.marking);
+  const family = abrasiveFamily(parsed.marking);
   if (family === 'diamond' && isFerrous(material)) return [finding('diamond-on-steel')];
   const recommended = recommendedMark(material, 'outside', null);
   return suitsFamily(family, material, recommended)
@@ -182,7 +181,15 @@ function range(from: string, to: string): string {
   return from === to ? from : `${from}-${to}`;
 }
 
-function familyOf(marking: WheelMarking): Family {
+/**
+ * What kind of grain a marking names.
+ *
+ * @param marking - from parseMarking.
+ * @returns the family.
+ * @source iso-525
+ * @example abrasiveFamily(markingOf('GC 80 J 6 V')) // 'silicon carbide'
+ */
+export function abrasiveFamily(marking: WheelMarking): Abrasive {
   if (marking.kind === 'superabrasive') return marking.abrasive === 'D' ? 'diamond' : 'cBN';
   return marking.abrasive === 'C' || marking.abrasive === 'GC'
     ? 'silicon carbide'
@@ -190,7 +197,7 @@ function familyOf(marking: WheelMarking): Family {
 }
 
 /** cBN suits hardened steel as well as aluminium oxide does. */
-function suitsFamily(family: Family, material: Material, recommended: RecommendedMark): boolean {
+function suitsFamily(family: Abrasive, material: Material, recommended: RecommendedMark): boolean {
   return (
     family === recommended.family ||
     (family === 'cBN' && recommended.family === 'aluminium oxide' && material.endsWith('-hardened'))

@@ -15,6 +15,7 @@ const RINGING_FROM_MM = 4 * MM_PER_INCH;
  */
 const FREE_FIT_MM = 0.25;
 const SAME_SIZE_MM = 0.005;
+const SLACK_MM = 1e-9;
 /** Marked rpm and m/s are rounded on a wheel; beyond this they say different things. */
 const ROUNDING_OF_MARKS = 0.02;
 
@@ -55,6 +56,7 @@ export function wheelFindings(use: WheelUse): Finding[] {
           }),
         ]
       : []),
+    ...wornFindings(wheel),
     ...(quill === null ? [] : fitFindings(wheel, quill.seatDiameterMm)),
   ];
 }
@@ -101,6 +103,7 @@ function stateFindings(wheel: WheelData, today: string): Finding[] {
       finding('wheel-set-aside', { names: { reason: wheel.setAsideReason ?? 'no reason given' } }),
     );
   if (wheel.state === 'scrapped') found.push(finding('wheel-scrapped'));
+  if (wheel.unsigned) found.push(finding('wheel-unsigned'));
   if (wheel.expiresOn !== null && wheel.expiresOn < today)
     found.push(finding('wheel-expired', { names: { date: wheel.expiresOn } }));
   return found;
@@ -126,8 +129,38 @@ function ringFindings({ wheel, organicBond, typed }: WheelUse): Finding[] {
       ];
 }
 
-/** The hole, or the mandrel of a mounted wheel, against the seat or collet. */
-function fitFindings(wheel: WheelData, seatMm: number): Finding[] {
+function wornFindings({ diameterNowMm, smallestUsableMm }: WheelData): Finding[] {
+  if (smallestUsableMm === null || !isBelow(diameterNowMm, smallestUsableMm)) return [];
+  const figures = {
+    now: quantity(diameterNowMm, 'mm'),
+    smallest: quantity(smallestUsableMm, 'mm'),
+  };
+  return [finding('wheel-worn-out', { figures })];
+}
+
+/**
+ * Whether a diameter is below a smallest one, beyond what repeated subtraction can be off by.
+ *
+ * @param diameterMm - mm.
+ * @param smallestMm - mm.
+ * @returns true when it is.
+ * @source none: a matter of arithmetic
+ * @example isBelow(25 - 0.1 - 0.1 - 0.1, 24.7) // false
+ */
+export function isBelow(diameterMm: number, smallestMm: number): boolean {
+  return diameterMm < smallestMm - SLACK_MM;
+}
+
+/**
+ * The hole, or the mandrel of a mounted wheel, against the seat or collet.
+ *
+ * @param wheel - the wheel, mm.
+ * @param seatMm - diameter of the seat or the collet's bore, mm.
+ * @returns a Stop where the wheel does not go on or would sit loose.
+ * @source cal-t8-3580
+ * @example fitFindings(wheel, quill.seatDiameterMm) // []
+ */
+export function fitFindings(wheel: WheelData, seatMm: number): Finding[] {
   const figures = (hole: number) => ({
     hole: quantity(hole, 'mm'),
     seat: quantity(seatMm, 'mm'),

@@ -17,11 +17,13 @@ const sound: WheelData = {
   markedSpeedMPerS: 25,
   markingReadOn: 'box',
   mounted: null,
+  smallestUsableMm: null,
   looked: 'sound',
   rung: 'clear',
   expiresOn: null,
   state: 'on the rack',
   setAsideReason: null,
+  unsigned: false,
 };
 
 it('says where a usable wheel is', () => {

@@ -9,6 +9,7 @@ import { SOURCES } from '@/shared/rules/sources';
 import { surfaceOf } from '@/shared/rules/surface';
 
 import { BORE_GRINDER, jawsInput, LATHE, QUILL, SMALL_WHEEL } from '../../support/plan-inputs';
+import { caseOf, lifeOf, MOUNTED, RECEIVED, RECORD, TAKEN_OFF } from '../../support/wheel-lives';
 
 const ROOT = join(__dirname, '../../../shared');
 const FOLDERS = ['rules', 'rules/published', 'units'];
@@ -40,11 +41,20 @@ const basis: CutBasis = {
   plungeMm: null,
 };
 
+const [received, mounted, takenOff] = lifeOf(
+  [RECEIVED, { id: 'received', happenedOn: '2026-01-05' }],
+  [MOUNTED, { id: 'mounted' }],
+  [TAKEN_OFF, { id: 'taken-off' }],
+);
+const [justReceived] = lifeOf(RECEIVED);
+const stepCase = caseOf(justReceived ? [justReceived] : []);
+const rackWheel = { ...RECORD, ...stepCase.standing };
+
 /** What an example may name: every export of the rules and units, and the machines of one good setup. */
 const scope: Record<string, unknown> = Object.assign(
   { planInput, plan, basis },
   { lathe: LATHE, grinder: BORE_GRINDER, quill: QUILL, wheel: SMALL_WHEEL },
-  { rules: DEFAULT_SHOP_RULES },
+  { rules: DEFAULT_SHOP_RULES, rackWheel, stepCase, received, mounted, takenOff },
   ...files.map(({ path }) => jest.requireActual<Record<string, unknown>>(path)),
 );
 

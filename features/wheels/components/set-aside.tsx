@@ -1,8 +1,7 @@
-import { useQueryClient } from '@tanstack/react-query';
 import { useState } from 'react';
 
 import { FormProblem } from '@/features/forms';
-import { isRefusal } from '@/features/transport';
+import { newId } from '@/features/transport';
 import { Button } from '@/features/ui/button';
 import { Field } from '@/features/ui/field';
 import { Sheet } from '@/features/ui/sheet';
@@ -10,14 +9,20 @@ import { Body } from '@/features/ui/text';
 import type { Wheel } from '@/shared/contracts/wheels';
 import { TEXT_LIMITS } from '@/shared/domain/limits';
 
-import { useSaveWheel, wheelQueries } from '../queries';
+import { useRecordEntry } from '../queries';
 
 const MISSING = 'Enter why: what was seen or heard, in a few words.';
 
+interface SetAsideProps {
+  shopId: string;
+  wheel: Wheel;
+  /** ISO date of the shop. */
+  today: string;
+}
+
 /** Anybody may set a wheel aside; it then stops every setup that uses it. */
-export function SetAside({ shopId, wheel }: { shopId: string; wheel: Wheel }) {
-  const client = useQueryClient();
-  const save = useSaveWheel(shopId);
+export function SetAside({ shopId, wheel, today }: SetAsideProps) {
+  const save = useRecordEntry(shopId, wheel.id);
   const [open, setOpen] = useState(false);
   const [reason, setReason] = useState('');
   const [error, setError] = useState<string>();
@@ -25,20 +30,21 @@ export function SetAside({ shopId, wheel }: { shopId: string; wheel: Wheel }) {
   if (state === 'set aside' || state === 'scrapped') return null;
 
   const setAside = () => {
-    const setAsideReason = reason.trim();
-    if (!setAsideReason) {
+    const why = reason.trim();
+    if (!why) {
       setError(MISSING);
       return;
     }
     setError(undefined);
-    const { tag, typed, version } = wheel;
-    const data = { ...wheel.data, state: 'set aside' as const, setAsideReason };
     save.mutate(
-      { id: wheel.id, body: { version, tag, typed, data } },
       {
-        onSuccess: () => setOpen(false),
-        onError: () => void client.invalidateQueries({ queryKey: wheelQueries.all(shopId) }),
+        id: newId(),
+        version: null,
+        happenedOn: today,
+        note: null,
+        step: { kind: 'set aside', reason: why },
       },
+      { onSuccess: () => setOpen(false) },
     );
   };
 
@@ -63,13 +69,7 @@ export function SetAside({ shopId, wheel }: { shopId: string; wheel: Wheel }) {
         <Body>
           Every setup that uses this wheel stops at once. Only a lead returns it to the rack.
         </Body>
-        {isRefusal(save.error, 'stale-version') ? (
-          <Body>
-            Somebody changed this wheel in the meantime. Look at it again, then press once more.
-          </Body>
-        ) : (
-          <FormProblem error={save.error} />
-        )}
+        <FormProblem error={save.error} />
         <Field
           name="setAsideReason"
           label="Reason"

@@ -53,7 +53,7 @@ export function WheelDetail({ wheel, today }: WheelDetailProps) {
       <FindingList findings={wheelFindingsOn(wheel.data, today)} sourced />
       <Row>
         {mayEdit ? edit('Edit') : null}
-        {may('wheel:set-aside') ? <SetAside shopId={shop.id} wheel={wheel} /> : null}
+        {may('wheel:set-aside') ? <SetAside shopId={shop.id} wheel={wheel} today={today} /> : null}
       </Row>
       {standingOf(wheel.data, today).usable ? (
         <WhereItMayRun wheel={wheel.data} today={today} />

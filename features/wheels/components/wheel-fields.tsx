@@ -10,21 +10,19 @@ import {
   FormFold,
   UNKNOWN,
 } from '@/features/records';
-import { useShop } from '@/features/session';
 import { Stack } from '@/features/ui/card';
 import { Checkbox } from '@/features/ui/checkbox';
 import { Field } from '@/features/ui/field';
 import { Segmented } from '@/features/ui/segmented';
 import { Heading } from '@/features/ui/text';
 import { TEXT_LIMITS } from '@/shared/domain/limits';
-import { LOOK_RESULTS, MARKING_PLACES, RING_RESULTS, WHEEL_STATES } from '@/shared/domain/wheels';
-import type { WheelState } from '@/shared/domain/wheels';
+import { LOOK_RESULTS, MARKING_PLACES, RING_RESULTS } from '@/shared/domain/wheels';
 import { ENTRY_UNITS } from '@/shared/units/entry-units';
 
 import { MANDREL_FIELDS, WHEEL_FIELDS, type MandrelField, type WheelField } from '../fields';
 import { withSpeedUnit, type WheelValues } from '../form';
 import { SPEED_UNITS, speedHint, typedSpeed } from '../marked-speed';
-import { LOOK_WORDS, MARKING_PLACE_WORDS, RING_WORDS, STATE_WORDS } from '../words';
+import { LOOK_WORDS, MARKING_PLACE_WORDS, RING_WORDS } from '../words';
 
 function WheelQuantity({ name, required }: { name: WheelField; required?: boolean }) {
   const { values } = useFormikContext<WheelValues>();
@@ -130,7 +128,8 @@ function MarkedSpeed() {
   );
 }
 
-export function SizeFields() {
+/** A wheel that has entries is as large as they make it; only of a new one is that asked. */
+export function SizeFields({ isNew }: { isNew: boolean }) {
   const { values, setFieldValue } = useFormikContext<WheelValues>();
   const { isMounted } = values;
   return (
@@ -138,7 +137,7 @@ export function SizeFields() {
       <Heading>Sizes</Heading>
       <FieldRow>
         <WheelQuantity name="diameterNewMm" required />
-        <WheelQuantity name="diameterNowMm" />
+        {isNew ? <WheelQuantity name="diameterNowMm" /> : null}
       </FieldRow>
       <FieldRow>
         <WheelQuantity name="widthMm" required />
@@ -174,60 +173,40 @@ export function SizeFields() {
   );
 }
 
-/** What was seen and heard, and whether the wheel is in use. `before` is the state as stored. */
-export function StateFields({ before }: { before: WheelState | null }) {
-  const { values } = useFormikContext<WheelValues>();
-  const { may } = useShop();
-  const isOut = before === 'set aside' || before === 'scrapped';
-  const locked = isOut && !may('wheel:return') ? 'Only a lead returns a wheel.' : undefined;
+/** Until when it may run; of a new wheel also what was seen and heard when it came. */
+export function StateFields({ isNew }: { isNew: boolean }) {
   return (
     <Stack>
       <Heading>Checks</Heading>
-      <ChoiceField
-        name="looked"
-        label="Close look"
-        hint="Clean and dry, in good light: cracks, chips, stains."
-        as="rows"
-        options={[
-          ...LOOK_RESULTS.map((value) => ({ value, label: LOOK_WORDS[value] })),
-          { value: UNKNOWN, label: 'Not recorded' },
-        ]}
-      />
-      <ChoiceField
-        name="rung"
-        label="Ring test"
-        hint="Wheels of 4 in and under, and soft bonds, may not ring: then the look decides."
-        as="rows"
-        options={[
-          ...RING_RESULTS.map((value) => ({ value, label: RING_WORDS[value] })),
-          { value: UNKNOWN, label: 'Not recorded' },
-        ]}
-      />
+      {isNew ? (
+        <>
+          <ChoiceField
+            name="looked"
+            label="Close look"
+            hint="Clean and dry, in good light: cracks, chips, stains."
+            as="rows"
+            options={[
+              ...LOOK_RESULTS.map((value) => ({ value, label: LOOK_WORDS[value] })),
+              { value: UNKNOWN, label: 'Not recorded' },
+            ]}
+          />
+          <ChoiceField
+            name="rung"
+            label="Ring test"
+            hint="Wheels of 4 in and under, and soft bonds, may not ring: then the look decides."
+            as="rows"
+            options={[
+              ...RING_RESULTS.map((value) => ({ value, label: RING_WORDS[value] })),
+              { value: UNKNOWN, label: 'Not recorded' },
+            ]}
+          />
+        </>
+      ) : null}
       <DateField
         name="expiresOn"
         label="Expires on"
         hint="The last day on which it may run. Leave empty where no date is given."
       />
-      <ChoiceField
-        name="state"
-        label="State"
-        as="rows"
-        options={WHEEL_STATES.map((value) => ({
-          value,
-          label: STATE_WORDS[value],
-          ...(value === 'on the rack' || value === 'mounted' ? { lockedBecause: locked } : {}),
-        }))}
-      />
-      {values.state === 'set aside' ? (
-        <TextField
-          name="setAsideReason"
-          label="Reason"
-          hint="Shown wherever the wheel is."
-          lines={3}
-          maxLength={TEXT_LIMITS.note}
-          required
-        />
-      ) : null}
     </Stack>
   );
 }
