@@ -2,6 +2,7 @@ import type {
   RecordedEntry,
   RecordEntryRequest,
   WheelEntryPage,
+  WheelEntryView,
   WheelLife,
 } from '@/shared/contracts/wheel-entries';
 import type { Wheel } from '@/shared/contracts/wheels';
@@ -107,7 +108,10 @@ export const wheelLifeService = ({ inShop, recompute, now }: LifeContext) => {
 
 export type WheelLifeService = ReturnType<typeof wheelLifeService>;
 
-const recorded = (change: { before: Wheel; after: Wheel }): AuditedWrite => ({
+const recorded = (change: {
+  before: Wheel;
+  after: Wheel & { entry: WheelEntryView };
+}): AuditedWrite => ({
   action: 'record',
   subject: 'wheel',
   subjectId: change.before.id,
