@@ -236,9 +236,9 @@ describe('roles', () => {
     const scrap = { kind: 'scrapped' as const, reason: 'Worn out.' };
     const id = await on.make([{ kind: 'set aside', reason: 'Dropped.' }, LOOK]);
     for (const role of ['machinist', 'apprentice'] as const)
-      expect((await on.record(id, { kind: 'returned' }, role)).status).toBe(403);
+      expect(await on.refusalOf(id, { kind: 'returned' }, role)).toEqual([403, 'lead-returns']);
     await on.recorded(id, { kind: 'returned' }, 'lead');
-    expect((await on.record(id, scrap, 'apprentice')).status).toBe(403);
+    expect(await on.refusalOf(id, scrap, 'apprentice')).toEqual([403, 'role']);
     const { entry } = await on.recorded(id, scrap, 'machinist');
     const back = { kind: 'correction' as const, entryId: entry.id, reason: 'Not that one.' };
     expect(await on.refusalOf(id, back, 'machinist')).toEqual([403, 'lead-unscraps']);

@@ -2,8 +2,11 @@ import { OPERATIONS } from '@/shared/domain/setups';
 import { seedDemo } from '@/api/seed-demo';
 import { weaknessOf } from '@/api/auth/password-policy';
 import { demoShop, signIns } from '@/db/seed';
+import { droppedWheel, outsideWheel, untestedWheel, wornWheel } from '@/db/seed/wheels';
+import { appointmentList } from '@/shared/contracts/appointments';
 import { grinderList, latheList } from '@/shared/contracts/machines';
 import { setupPage } from '@/shared/contracts/setups';
+import { wheelLife } from '@/shared/contracts/wheel-entries';
 import { wheelPage } from '@/shared/contracts/wheels';
 
 import { signIn, startApi, type Api } from '../support/api';
@@ -51,6 +54,37 @@ describe('the demo shop', () => {
     expect(has(({ marking, markedRpm }) => marking === null && markedRpm === null)).toBe(true);
     expect(has(({ mounted }) => mounted !== null)).toBe(true);
     expect(has((wheel) => wheel.diameterNowMm < wheel.diameterNewMm)).toBe(true);
+  });
+
+  it('has wheels with a life: one that runs, one that waits for a signature, one set aside', async () => {
+    const lead = await visit('lead');
+    const lifeOf = async (id: string) =>
+      wheelLife.parse((await lead.get(`${path}/wheels/${id}/life`).expect(200)).body);
+    const running = await lifeOf(outsideWheel.id);
+    expect(running.wheel.data).toMatchObject({ state: 'mounted', unsigned: false });
+    // 125 - 2 x 0.02 x 3 = 124.88
+    expect(running.wheel.data.diameterNowMm).toBeCloseTo(124.88, 9);
+    expect(running.setups).toHaveLength(1);
+    const worn = await lifeOf(wornWheel.id);
+    // 107.5 mm is what was measured last.
+    expect(worn.wheel.data).toMatchObject({ diameterNowMm: 107.5, looked: 'sound', rung: 'clear' });
+    const { standing } = await lifeOf(untestedWheel.id);
+    expect(standing.waiting).toMatchObject([
+      { kind: 'ring test', needs: 'skilled', refusal: null },
+    ]);
+    const dropped = await lifeOf(droppedWheel.id);
+    expect(dropped.steps.find(({ kind }) => kind === 'mounted')?.refusal?.words).toMatch(/dropped/);
+  });
+
+  it('has appointed its lead and its machinist', async () => {
+    const { body } = await (await visit('apprentice')).get(`${path}/appointments`).expect(200);
+    const { items } = appointmentList.parse(body);
+    expect(
+      items
+        .filter(({ holds }) => holds)
+        .map(({ personName }) => personName)
+        .sort(),
+    ).toEqual(['Desmond Okafor-Lund', 'Ottilie Brandvik']);
   });
 
   it('has a setup for each operation that may run', async () => {

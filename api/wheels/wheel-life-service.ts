@@ -7,10 +7,10 @@ import type {
 } from '@/shared/contracts/wheel-entries';
 import type { Wheel } from '@/shared/contracts/wheels';
 import type { WheelEntry, WheelStep } from '@/shared/domain/wheel-life';
-import { can, mayRecord } from '@/shared/roles/roles';
+import { can } from '@/shared/roles/roles';
 import { foldWheelLife } from '@/shared/rules/wheel-life';
 import { signerFor } from '@/shared/rules/wheel-signatures';
-import { stepRefusal } from '@/shared/rules/wheel-steps';
+import { roleRefusal, stepRefusal } from '@/shared/rules/wheel-steps';
 
 import type { AuditedWrite } from '../audit/audit-trail';
 import { demand, idReused, refusedByRule, staleVersion } from '../refusals';
@@ -44,10 +44,11 @@ export const wheelLifeService = ({ inShop, recompute, now }: LifeContext) => {
       return { isNew: false, item: { wheel: before, entry } };
     }
     const { step, happenedOn, note, version } = request;
-    if (step.kind !== 'countersigned') demand(mayRecord(scope.role, step.kind));
+    const cases = await casesOf(scope, now());
+    const byRole = roleRefusal(step.kind, cases.actor);
+    if (byRole !== null) throw stepForbidden(byRole, cases.units);
     if (version !== null && version !== before.version) throw staleVersion(before);
 
-    const cases = await casesOf(scope, now());
     const entries = await scope.wheelEntries.of(wheelId);
     const given = await caseFor(cases, { wheel: before, entries, step, happenedOn });
     const refusal = stepRefusal(step, given);

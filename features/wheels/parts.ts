@@ -7,6 +7,7 @@ import {
   type Part,
   type TypedEntry,
 } from '@/features/records';
+import { SHAPE_WORDS } from '@/shared/domain/wheels';
 import type { UnitName } from '@/shared/units/unit';
 import { formatQuantity } from '@/shared/units/format';
 
@@ -34,6 +35,23 @@ function mandrelWords({ mounted, isMounted }: WheelValues, values: WheelValues):
     mounted.threaded ? 'threaded' : 'plain',
     `maker's rpm ${quantity(makerMaximumRpm.unit)(mounted.makerMaximumRpm, values)}`,
   ].join(', ');
+}
+
+/** What is kept of a wheel beside the form's own fields, in one line. */
+function unaskedWords({ unasked, units }: WheelValues): string {
+  const { shape, smallestUsableMm, madeOn, place, notes } = unasked;
+  const size = (value: number) => formatQuantity({ value, unit: 'mm' }, units);
+  return (
+    [
+      shape && `type ${shape}, ${SHAPE_WORDS[shape]}`,
+      smallestUsableMm && `usable down to ${size(smallestUsableMm)}`,
+      madeOn && `made ${dayWords(madeOn)}`,
+      place,
+      notes,
+    ]
+      .filter(Boolean)
+      .join('; ') || NOT_GIVEN
+  );
 }
 
 /** Everything a wheel's form holds, fact by fact. */
@@ -76,6 +94,12 @@ export const wheelParts: Part<WheelValues>[] = [
     const date = readDate(text);
     return date ? dayWords(date) : text.trim() || NOT_GIVEN;
   }),
+  {
+    key: 'unasked',
+    label: 'Type, place and notes',
+    words: unaskedWords,
+    take: (into, { unasked }) => ({ ...into, unasked }),
+  },
   {
     key: 'state',
     label: 'State',

@@ -134,7 +134,7 @@ const spindle = z.strictObject({
 
 const entryRef = { entryId: id };
 
-export const wheelStanding = z.strictObject({
+const wheelStanding = z.strictObject({
   onSpindle: z
     .strictObject({ ...entryRef, grinderId: id.nullable(), quillId: id.nullable() })
     .nullable(),

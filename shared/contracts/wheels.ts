@@ -118,7 +118,7 @@ export const wheel = z.strictObject({
 });
 export const wheelPage = page(wheel);
 
-export const WHEEL_SORTS = ['tag', 'diameter', 'due', 'latest'] as const;
+const WHEEL_SORTS = ['tag', 'diameter', 'due', 'latest'] as const;
 
 const number = (range: { min: number; max: number }) =>
   z.coerce.number().min(range.min).max(range.max).optional();

@@ -58,6 +58,21 @@ export function stepRefusal(step: WheelStep, given: StepCase): StepRefusal | nul
   );
 }
 
+/**
+ * Whether a person's role lets them record a step, whatever the wheel.
+ *
+ * @param kind - the step.
+ * @param actor - who would record it.
+ * @returns why not; null where it does.
+ * @source none: the roles are our own
+ * @example roleRefusal('returned', { personId: 'p', role: 'machinist', tasks: [] }).code // 'lead-returns'
+ */
+export function roleRefusal(kind: EntryKind, { role }: Actor): StepRefusal | null {
+  // Who may sign hangs on what is signed.
+  if (kind === 'countersigned' || mayRecord(role, kind)) return null;
+  return refuse(kind === 'returned' ? 'lead-returns' : 'role');
+}
+
 export interface StepChoice {
   kind: EntryKind;
   refusal: StepRefusal | null;
@@ -100,7 +115,8 @@ function kindRefusal(kind: EntryKind, given: StepCase): StepRefusal | null {
   const { standing, actor } = given;
   const inOrder = orderRefusal(standing, kind);
   if (inOrder !== null) return inOrder;
-  if (!mayRecord(actor.role, kind)) return refuse(kind === 'returned' ? 'lead-returns' : 'role');
+  const byRole = roleRefusal(kind, actor);
+  if (byRole !== null) return byRole;
   if (kind === 'mounted') return soundRefusal(given);
   if (kind === 'returned') return returnRefusal(given);
   return RUNNING.includes(kind) ? runningRefusal(kind, given) : null;
