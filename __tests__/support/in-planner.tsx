@@ -1,5 +1,5 @@
-import { Formik, useFormikContext } from 'formik';
-import type { ReactNode } from 'react';
+import { Formik, useFormikContext, type FormikProps } from 'formik';
+import { createRef, type ReactNode } from 'react';
 
 import { PlanReader } from '@/features/plan';
 import type { SetupValues } from '@/features/setups/form';
@@ -11,17 +11,16 @@ import { assemblePlanInput, planSetup } from '@/shared/rules';
 
 import { showInShop, stored } from './in-shop';
 
-/** What the last render of the planner held. */
-let seen: SetupValues | null = null;
+const form = createRef<FormikProps<SetupValues>>();
 
+/** What the planner on show holds. */
 export function plannedValues(): SetupValues {
-  if (!seen) throw new Error('no planner was shown');
-  return seen;
+  if (!form.current) throw new Error('no planner is shown');
+  return form.current.values;
 }
 
 function Planned({ given, children }: { given: PlanInput; children: ReactNode }) {
   const { values } = useFormikContext<SetupValues>();
-  seen = values;
   const { lathe, grinder, quill, wheelData, rules, today } = given;
   const input = assemblePlanInput(values.inputs, {
     lathe,
@@ -61,7 +60,12 @@ export function showInPlanner(piece: ReactNode, given: PlanInput, units: UnitSys
     units,
   };
   return showInShop(
-    <Formik initialValues={initialValues} validateOnChange={false} onSubmit={() => undefined}>
+    <Formik
+      innerRef={form}
+      initialValues={initialValues}
+      validateOnChange={false}
+      onSubmit={() => undefined}
+    >
       <Planned given={given}>{piece}</Planned>
     </Formik>,
   );

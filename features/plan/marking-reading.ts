@@ -25,14 +25,13 @@ const bonds = (marks: readonly string[]) =>
 /** What each position takes, in the marks of aluminium oxide and silicon carbide, and of diamond and cBN. */
 const EXPECTED: Record<'conventional' | 'superabrasive', Record<MarkingPart, string>> = {
   conventional: {
-    abrasive:
-      'A or C, with the maker’s own prefix where there is one (38A, WA, GC); D for diamond, B for cBN',
-    grain: 'a size of the standard from 4 to 1200, like 46, 60 or 80; F or # may stand before it',
+    abrasive: 'A or C, with or without a prefix (38A, WA, GC), D for diamond or B for cBN',
+    grain: 'a size from 4 to 1200, like 46, F60 or 80',
     grade: 'one letter, A soft to Z hard',
     structure: 'a number from 0 dense to 16 open, or nothing',
     concentration: 'nothing',
     bond: bonds(CONVENTIONAL_BONDS),
-    suffix: 'at most 8 letters and figures of the maker’s own',
+    suffix: 'at most 8 letters and figures',
   },
   superabrasive: {
     abrasive: 'D for diamond or B for cBN',
@@ -41,7 +40,7 @@ const EXPECTED: Record<'conventional' | 'superabrasive', Record<MarkingPart, str
     structure: 'nothing',
     concentration: 'a number like C100, at most 240, or nothing',
     bond: bonds(SUPERABRASIVE_BONDS),
-    suffix: 'at most 8 letters and figures of the maker’s own',
+    suffix: 'at most 8 letters and figures',
   },
 };
 
@@ -60,14 +59,15 @@ export function readMarking(text: string): MarkingReading | null {
   if (text.trim() === '') return null;
   const parsed = parseMarking(text);
   if (parsed.ok) return { parsed, written: writeMarking(parsed.marking), fault: null, next: null };
-  const wanted = `${MARKING_PART_WORDS[parsed.part].toLowerCase()}: ${expectedAt(text, parsed)}`;
+  const part = MARKING_PART_WORDS[parsed.part].toLowerCase();
+  const expected = expectedAt(text, parsed);
   const rest = text.slice(parsed.position).trim();
   return rest === ''
-    ? { parsed, written: null, fault: null, next: `Next comes the ${wanted}.` }
+    ? { parsed, written: null, fault: null, next: `Next comes the ${part}: ${expected}.` }
     : {
         parsed,
         written: null,
-        fault: `“${rest}” does not fit, from character ${parsed.position + 1} on. There stands the ${wanted}.`,
+        fault: `At “${rest}” the ${part} is expected: ${expected}.`,
         next: null,
       };
 }

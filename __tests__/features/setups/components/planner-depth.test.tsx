@@ -162,7 +162,7 @@ describe('the marks of the wheel', () => {
     );
     const field = screen.getByLabelText('Marking', { selector: 'input' });
     expect(field).toHaveValue('A 60 K 99 V');
-    expect(field).toHaveAccessibleDescription(/“99 V” does not fit.*structure/);
+    expect(field).toHaveAccessibleDescription(/At “99 V” the structure is expected/);
     expect(button('What the marking says: structure not read')).toBeInTheDocument();
     press(/^Marks the handbook recommends/);
     expect(screen.getByText(/does not read, so it cannot be compared/)).toBeInTheDocument();

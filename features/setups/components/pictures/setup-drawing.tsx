@@ -178,7 +178,7 @@ function Compound({ compound, layout: { place }, width, textScale }: CompoundPro
       ))}
       <PictureText
         x={fits ? end.x + LABEL_GAP : start.x - LABEL_GAP}
-        y={(from.y + to.y) / 2}
+        y={Math.max(from.y, to.y) + 4 * textScale}
         anchor={fits ? 'start' : 'end'}
         size="small"
         textScale={textScale}
@@ -192,12 +192,18 @@ function Compound({ compound, layout: { place }, width, textScale }: CompoundPro
 /** A bent arrow across a turning part: the way its top goes. */
 function TurnArrow({ ends: [from, to] }: { ends: readonly Point[] }) {
   if (!from || !to) return null;
-  const way = Math.sign(to.y - from.y);
-  const length = Math.abs(to.y - from.y);
+  const length = Math.hypot(to.x - from.x, to.y - from.y);
+  if (!(length > 0)) return null;
+  const along = { x: (to.x - from.x) / length, y: (to.y - from.y) / length };
+  // Bent towards the tailstock, whichever way it points.
+  const side = along.y > 0 ? 1 : -1;
+  const across = { x: along.y * side, y: -along.x * side };
   const bend = Math.min(length * 0.25, 9);
   const head = Math.min(length * 0.3, 8);
-  const curve = `M${from.x},${from.y}Q${from.x + bend},${(from.y + to.y) / 2} ${to.x},${to.y}`;
-  const tip = `M${to.x - head * 0.4},${to.y - way * head}L${to.x},${to.y}L${to.x + head},${to.y - way * head * 0.7}`;
+  const by = (start: Point, forward: number, sideways: number) =>
+    `${start.x + along.x * forward + across.x * sideways},${start.y + along.y * forward + across.y * sideways}`;
+  const curve = `M${by(from, 0, 0)}Q${by(from, length / 2, bend)} ${by(to, 0, 0)}`;
+  const tip = `M${by(to, -head, -head * 0.4)}L${by(to, 0, 0)}L${by(to, -head * 0.7, head)}`;
   return (
     <>
       <Path
