@@ -123,11 +123,7 @@ function Marks({ readings, fit, layout }: Omit<RunOutDialProps, 'units'> & { lay
 }
 
 /** The dial in words: the span of the readings, and where their circle stands. */
-export function dialWords(
-  readings: readonly Reading[],
-  fit: RunoutFit | null,
-  units: UnitSystem,
-): string {
+function dialWords(readings: readonly Reading[], fit: RunoutFit | null, units: UnitSystem): string {
   const sorted = [...readings].sort((one, other) => one.readingMm - other.readingMm);
   const [lowest, highest] = [sorted[0], sorted.at(-1)];
   if (!lowest || !highest) return 'No readings yet.';

@@ -1,6 +1,7 @@
 import { render, screen, within } from '@testing-library/react';
 import fc from 'fast-check';
 
+import { anyPlanInput } from '@/__tests__/support/plan-arbitraries';
 import {
   boreInput,
   GOOD_INPUTS,
@@ -139,6 +140,24 @@ describe('the set-up seen from above, in millimetres', () => {
   it('draws nothing before length and diameter are known', () => {
     const input = withWork(outsideInput(), { diameterMm: null });
     expect(setupScene(input, planSetup(input))).toBeNull();
+  });
+});
+
+describe('whatever is typed', () => {
+  it('is drawn at finite places, or not at all', () => {
+    fc.assert(
+      fc.property(anyPlanInput, (input) => {
+        const drawn = setupScene(input, planSetup(input));
+        if (drawn === null) return;
+        const { left, right, top, bottom } = drawn.bounds;
+        const places = drawn.shapes.flatMap(({ points }) => points.flatMap(({ x, y }) => [x, y]));
+        for (const place of [left, right, top, bottom, ...places])
+          expect(Number.isFinite(place)).toBe(true);
+        expect(right).toBeGreaterThan(left);
+        expect(bottom).toBeGreaterThan(top);
+      }),
+      { numRuns: 500 },
+    );
   });
 });
 
