@@ -152,6 +152,9 @@ export function ReadingsSheet({ open, onClose, ...props }: ReadingsSheetProps) {
               onChange={(side) => setTyped({ ...typed, side })}
             />
           </Fold>
+          {readings.length > 0 && typed.side === 'inside' ? (
+            <Small>Signs are turned round below, as the indicator stood inside.</Small>
+          ) : null}
           {readings.length > 0 ? <RunOutDial readings={seen} fit={fit} units={units} /> : null}
           <Fit fit={fit} count={readings.length} faulty={faults.length > 0} />
         </Stack>

@@ -104,6 +104,7 @@ it('turns the high spot round for an indicator inside a bore', () => {
   const sides = screen.getByRole('radiogroup', { name: 'The indicator touches the surface' });
   fireEvent.click(within(sides).getByRole('radio', { name: 'inside a bore' }));
   expect(readout('High spot')).toHaveAccessibleName(/: 219°/);
+  expect(screen.getByText(/^Signs are turned round below/)).toBeInTheDocument();
 });
 
 it('says at the field what cannot be read, and keeps it', () => {

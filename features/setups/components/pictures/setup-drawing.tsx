@@ -178,7 +178,7 @@ function Compound({ compound, layout: { place }, width, textScale }: CompoundPro
       ))}
       <PictureText
         x={fits ? end.x + LABEL_GAP : start.x - LABEL_GAP}
-        y={Math.max(from.y, to.y) + 4 * textScale}
+        y={Math.max(from.y, to.y)}
         anchor={fits ? 'start' : 'end'}
         size="small"
         textScale={textScale}
