@@ -34,8 +34,9 @@ function Planned({ given, children }: { given: PlanInput; children: ReactNode })
     ...stored,
     id: '0190a000-0000-7000-8000-0000000000a1',
     tag: 'R-14',
-    data: wheelData,
+    data: { shape: null, madeOn: null, place: null, notes: null, ...wheelData },
     typed: {},
+    life: { receivedOn: '2026-01-05', onSpindle: null, due: null, limitRpm: 0, usable: true },
   };
   return (
     <PlannerProvider

@@ -11,9 +11,11 @@ export const PLAIN_WHEEL: WheelData = {
   markedSpeedMPerS: null,
   markingReadOn: 'wheel',
   mounted: null,
+  smallestUsableMm: null,
   looked: 'sound',
   rung: 'clear',
   expiresOn: null,
   state: 'on the rack',
   setAsideReason: null,
+  unsigned: false,
 };
