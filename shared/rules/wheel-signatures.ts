@@ -2,7 +2,7 @@ import type { Actor, AppointedTask, Appointment } from '../domain/appointments';
 import type { EntryKind, Signer, WaitingEntry, WheelEntry, WheelStep } from '../domain/wheel-life';
 import type { WheelRecord } from '../domain/wheels';
 import { can } from '../roles/roles';
-import { restsOn } from './wheel-step-order';
+import { leftHanging } from './wheel-step-order';
 import { countingEntries } from './wheel-life';
 import { refuse, type StepRefusal } from './wheel-step-words';
 
@@ -122,7 +122,7 @@ export function correctionRefusal(
   if (!countingEntries(entries).counting.includes(entry)) return refuse('corrected-already');
   if (entry.personId !== actor.personId && !can(actor.role, 'wheel:edit'))
     return refuse('others-entry');
-  const later = restsOn(wheel, entries, entryId);
+  const later = leftHanging(wheel, entries, entryId);
   return later === null
     ? null
     : refuse('later-entries', { names: { kind: later.step.kind, date: later.happenedOn } });

@@ -40,9 +40,9 @@ export function orderRefusal(at: WheelPlace, kind: EntryKind): StepRefusal | nul
  * @param entryId - the entry to be taken back.
  * @returns the first later entry that could not; null where all could.
  * @source none: the order of things
- * @example restsOn(rackWheel, [received, mounted, takenOff], mounted.id).id // 'taken-off'
+ * @example leftHanging(rackWheel, [received, mounted, takenOff], mounted.id).id // 'taken-off'
  */
-export function restsOn(
+export function leftHanging(
   wheel: WheelRecord,
   entries: readonly WheelEntry[],
   entryId: string,
