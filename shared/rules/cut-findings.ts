@@ -78,7 +78,7 @@ function dialFindings({ dial, rough, finish }: CutPlan, slide: Surface['slide'])
   if (coarse?.setting.compoundAngle != null && coarse.setting.compoundAngle.value !== null)
     found.push(
       finding(slide === 'compound' ? 'dial-too-coarse-on-taper' : 'dial-too-coarse', {
-        level: coarse.setting.stepMm === coarse.wantedMm ? 'check' : 'note',
+        level: coarse.setting.settable ? 'note' : 'check',
         figures: {
           half: quantity(dial.stepMm, 'mm'),
           infeed: quantity(coarse.wantedMm, 'mm'),

@@ -38,6 +38,8 @@ export function dialOf(lathe: LatheData | null, compoundFree = true): Dial | nul
 export interface Setting {
   infeedMm: number;
   stepMm: number;
+  /** False where neither slide can set it. */
+  settable: boolean;
   /** Divisions of the cross-slide dial; null when set otherwise. */
   divisions: number | null;
   /** The compound's angle from the spindle axis, where the cross-slide is too coarse. */
@@ -58,7 +60,13 @@ export interface Setting {
  */
 export function settle(wantedMm: number, ceilingMm: number, dial: Dial | null): Setting {
   if (dial === null)
-    return { infeedMm: wantedMm, stepMm: wantedMm, divisions: null, compoundAngle: null };
+    return {
+      infeedMm: wantedMm,
+      stepMm: wantedMm,
+      settable: true,
+      divisions: null,
+      compoundAngle: null,
+    };
   const { divisionMm, stepMm, compoundDivisionMm } = dial;
   const onDial = floorTo(wantedMm, stepMm);
   if (onDial > 0) return byCrossSlide(onDial, dial);
@@ -66,14 +74,27 @@ export function settle(wantedMm: number, ceilingMm: number, dial: Dial | null): 
   if (compoundDivisionMm !== null && angle.value !== null) {
     const unit = compoundDivisionMm * Math.sin((angle.value * Math.PI) / 180);
     const fed = floorTo(wantedMm, unit);
-    if (fed > 0) return { infeedMm: fed, stepMm: unit, divisions: null, compoundAngle: angle };
+    if (fed > 0)
+      return { infeedMm: fed, stepMm: unit, settable: true, divisions: null, compoundAngle: angle };
   }
   if (stepMm <= ceilingMm + 1e-9) return { ...byCrossSlide(stepMm, dial), compoundAngle: angle };
-  return { infeedMm: wantedMm, stepMm: wantedMm, divisions: null, compoundAngle: angle };
+  return {
+    infeedMm: wantedMm,
+    stepMm: wantedMm,
+    settable: false,
+    divisions: null,
+    compoundAngle: angle,
+  };
 }
 
 function byCrossSlide(infeedMm: number, { divisionMm, stepMm }: Dial): Setting {
-  return { infeedMm, stepMm, divisions: infeedMm / divisionMm, compoundAngle: null };
+  return {
+    infeedMm,
+    stepMm,
+    settable: true,
+    divisions: infeedMm / divisionMm,
+    compoundAngle: null,
+  };
 }
 
 /**
