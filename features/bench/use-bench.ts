@@ -12,7 +12,7 @@ import { needingAttention, recentlyEdited, wheelsOut } from './attention';
 export function useBench() {
   const { shop, person } = useShop();
   const setups = useInfiniteQuery(setupQueries.list(shop.id, {}));
-  const wheels = useInfiniteQuery(wheelQueries.list(shop.id, ''));
+  const wheels = useInfiniteQuery(wheelQueries.list(shop.id, {}));
   const lathes = useQuery(machineQueries.lathes(shop.id));
   const grinders = useQuery(machineQueries.grinders(shop.id));
   const queries = [setups, wheels, lathes, grinders];

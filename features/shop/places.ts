@@ -38,7 +38,7 @@ export function shopPlaces(shopId: string): (PlaceLink & { holds: string[] })[] 
       href: { pathname: '/shops/[shopId]/shop', params },
       label: 'Shop',
       icon: 'shop',
-      holds: [`${at}/shop`, `${at}/machines`],
+      holds: [`${at}/shop`, `${at}/machines`, `${at}/appointments`],
     },
   ];
 }

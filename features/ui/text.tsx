@@ -38,6 +38,8 @@ export interface TextProps {
   id?: string;
   /** Hides words that are spoken elsewhere. */
   hidden?: boolean;
+  /** Crossed out: say in words beside it that it no longer counts. */
+  struck?: boolean;
 }
 
 interface HeadingProps extends TextProps {
@@ -47,6 +49,8 @@ interface HeadingProps extends TextProps {
 
 // A style of the web that React Native's types do not know.
 const ON_ONE_LINE: object = { whiteSpace: 'nowrap' };
+
+const STRUCK = { textDecorationLine: 'line-through' } as const;
 
 const textOf = (variant: TextStyle, defaultTone: TextTone) =>
   function Styled({
@@ -58,13 +62,19 @@ const textOf = (variant: TextStyle, defaultTone: TextTone) =>
     flex,
     id,
     hidden,
+    struck = false,
   }: TextProps) {
     return (
       <Text
         id={id}
         aria-hidden={hidden}
         numberOfLines={lines}
-        style={[variant, { color: colors[tone], textAlign: align, flex }, whole && ON_ONE_LINE]}
+        style={[
+          variant,
+          { color: colors[tone], textAlign: align, flex },
+          whole && ON_ONE_LINE,
+          struck && STRUCK,
+        ]}
       >
         {children}
       </Text>

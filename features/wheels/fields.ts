@@ -4,7 +4,7 @@ import type { QuantitySpec } from '@/features/forms';
 export const WHEEL_FIELDS = {
   diameterNewMm: {
     label: 'Diameter when new',
-    hint: 'As marked, or as bought. The marked speed counts for this diameter.',
+    hint: 'The marked speed counts for this one. All three at once, as on the label: 25 x 20 x 8.',
     unit: 'mm',
     limit: 'wheelDiameterMm',
   },
@@ -16,6 +16,12 @@ export const WHEEL_FIELDS = {
   },
   widthMm: { label: 'Width', unit: 'mm', limit: 'wheelWidthMm' },
   holeMm: { label: 'Hole', unit: 'mm', limit: 'wheelHoleMm' },
+  smallestUsableMm: {
+    label: 'Smallest usable diameter',
+    hint: 'No dressing goes below it. Leave empty where it is not known.',
+    unit: 'mm',
+    limit: 'wheelDiameterMm',
+  },
   markedRpm: {
     label: 'Marked rpm',
     hint: 'Leave empty where no rpm is marked.',

@@ -16,20 +16,19 @@ import {
 import { newId } from '@/features/transport';
 import type { CreateWheelRequest, Wheel } from '@/shared/contracts/wheels';
 import { UNIT_SYSTEMS, type UnitSystem } from '@/shared/domain/people';
-import type {
-  LookResult,
-  MarkingPlace,
-  RackWheel,
-  RingResult,
-  WheelRecord,
-  WheelState,
+import {
+  MOUNTED_SHAPE,
+  type LookResult,
+  type MarkingPlace,
+  type RackWheel,
+  type RingResult,
+  type WheelRecord,
+  type WheelShape,
+  type WheelState,
 } from '@/shared/domain/wheels';
 
 import { MANDREL_FIELDS, WHEEL_FIELDS, type MandrelField, type WheelField } from './fields';
 import { SPEED_UNITS, storedSpeed, typedSpeed, type SpeedUnit } from './marked-speed';
-
-/** What of a wheel is not asked for here, and goes back as it came. */
-type Unasked = Pick<WheelRecord, 'shape' | 'smallestUsableMm' | 'madeOn' | 'place' | 'notes'>;
 
 interface MandrelValues extends Entries<MandrelField> {
   threaded: boolean;
@@ -41,16 +40,22 @@ export interface WheelValues extends RecordValues, Entries<WheelField> {
   markedSpeedMPerS: TypedEntry;
   speedUnit: SpeedUnit;
   markingReadOn: MarkingPlace | typeof UNKNOWN;
+  shape: WheelShape | typeof UNKNOWN;
+  /** The shape says it, and the fields of the mandrel hang on it. */
   isMounted: boolean;
   mounted: MandrelValues;
   looked: LookResult | typeof UNKNOWN;
   rung: RingResult | typeof UNKNOWN;
+  /** When a new wheel came; empty is today. */
+  receivedOn: string;
+  madeOn: string;
   expiresOn: string;
+  place: string;
+  notes: string;
   /** As the wheel's entries have it: shown, and not edited here. */
   state: WheelState;
   setAsideReason: string;
   unsigned: boolean;
-  unasked: Unasked;
 }
 
 const SPEED_UNIT_KEY = '@speedUnit';
@@ -65,10 +70,12 @@ export function newWheel(units: UnitSystem): WheelValues {
     diameterNowMm: EMPTY_ENTRY,
     widthMm: EMPTY_ENTRY,
     holeMm: EMPTY_ENTRY,
+    smallestUsableMm: EMPTY_ENTRY,
     markedRpm: EMPTY_ENTRY,
     markedSpeedMPerS: EMPTY_ENTRY,
     speedUnit: units === 'inch' ? 'ft/min' : 'm/s',
     markingReadOn: UNKNOWN,
+    shape: UNKNOWN,
     isMounted: false,
     mounted: {
       mandrelDiameterMm: EMPTY_ENTRY,
@@ -78,11 +85,14 @@ export function newWheel(units: UnitSystem): WheelValues {
     },
     looked: UNKNOWN,
     rung: UNKNOWN,
+    receivedOn: '',
+    madeOn: '',
     expiresOn: '',
+    place: '',
+    notes: '',
     state: 'on the rack',
     setAsideReason: '',
     unsigned: false,
-    unasked: { shape: null, smallestUsableMm: null, madeOn: null, place: null, notes: null },
   };
 }
 
@@ -105,10 +115,12 @@ export function valuesOf({ id, tag, data, typed }: Wheel, units: UnitSystem): Wh
     diameterNowMm: stored(data.diameterNowMm, 'diameterNowMm'),
     widthMm: stored(data.widthMm, 'widthMm'),
     holeMm: stored(data.holeMm, 'holeMm'),
+    smallestUsableMm: stored(data.smallestUsableMm, 'smallestUsableMm'),
     markedRpm: stored(data.markedRpm, 'markedRpm'),
     markedSpeedMPerS: storedSpeed(data.markedSpeedMPerS, speedUnit),
     speedUnit,
     markingReadOn: data.markingReadOn ?? UNKNOWN,
+    shape: data.shape ?? (data.mounted === null ? UNKNOWN : MOUNTED_SHAPE),
     isMounted: data.mounted !== null,
     mounted: {
       mandrelDiameterMm: mandrel(data.mounted?.mandrelDiameterMm, 'mandrelDiameterMm'),
@@ -118,17 +130,14 @@ export function valuesOf({ id, tag, data, typed }: Wheel, units: UnitSystem): Wh
     },
     looked: data.looked ?? UNKNOWN,
     rung: data.rung ?? UNKNOWN,
+    receivedOn: '',
+    madeOn: data.madeOn ?? '',
     expiresOn: data.expiresOn ?? '',
+    place: data.place ?? '',
+    notes: data.notes ?? '',
     state: data.state,
     setAsideReason: data.setAsideReason ?? '',
     unsigned: data.unsigned,
-    unasked: {
-      shape: data.shape,
-      smallestUsableMm: data.smallestUsableMm,
-      madeOn: data.madeOn,
-      place: data.place,
-      notes: data.notes,
-    },
   };
   return changed(values, recallTexts(typed, units));
 }
@@ -150,6 +159,12 @@ export const withSpeedUnit = (values: WheelValues, speedUnit: SpeedUnit): WheelV
   markedSpeedMPerS: typedSpeed(values.markedSpeedMPerS.text, speedUnit),
 });
 
+export const withShape = (values: WheelValues, shape: WheelValues['shape']): WheelValues => ({
+  ...values,
+  shape,
+  isMounted: shape === MOUNTED_SHAPE,
+});
+
 /** The wheel as far as it is typed; null while a size is missing or cannot be read. */
 export function wheelDataOf(values: WheelValues): RackWheel | null {
   const record = recordOf(values);
@@ -166,19 +181,31 @@ export function wheelDataOf(values: WheelValues): RackWheel | null {
 }
 
 function recordOf(values: WheelValues): WheelRecord | null {
-  const { mounted, isMounted, unasked, expiresOn } = values;
+  const { mounted, isMounted } = values;
   const { diameterNewMm, widthMm, holeMm, ...plate } = plateOf(values);
   if (diameterNewMm === null || widthMm === null || holeMm === null) return null;
   if (isMounted && (mounted.mandrelDiameterMm.si === null || mounted.overhangMm.si === null))
     return null;
-  return { ...plate, ...unasked, diameterNewMm, widthMm, holeMm, expiresOn: readDate(expiresOn) };
+  return {
+    ...plate,
+    diameterNewMm,
+    widthMm,
+    holeMm,
+    smallestUsableMm: values.smallestUsableMm.si,
+    madeOn: readDate(values.madeOn),
+    expiresOn: readDate(values.expiresOn),
+    place: values.place.trim() || null,
+    notes: values.notes.trim() || null,
+  };
 }
 
 /** What stands on the wheel's plate while it is typed; null where a size is missing. */
 export function plateOf(values: WheelValues) {
   const { mounted, isMounted } = values;
+  const shape = knownOrNull(values.shape);
   return {
     marking: values.marking.trim() || null,
+    shape: isMounted ? MOUNTED_SHAPE : shape === MOUNTED_SHAPE ? null : shape,
     diameterNewMm: values.diameterNewMm.si,
     widthMm: values.widthMm.si,
     holeMm: values.holeMm.si ?? (isMounted ? 0 : null),
@@ -205,7 +232,7 @@ export function toRequest(values: WheelValues): CreateWheelRequest {
   const typed = collectTexts(values.units, (change) => changed(values, change));
   typed[SPEED_UNIT_KEY] = values.speedUnit;
   const received = {
-    on: null,
+    on: readDate(values.receivedOn),
     diameterMm: values.diameterNowMm.si,
     looked: knownOrNull(values.looked),
     rung: knownOrNull(values.rung),
@@ -224,6 +251,8 @@ export function isWheelValues(value: unknown): value is WheelValues {
     typeof shape.tag === 'string' &&
     typeof shape.diameterNewMm?.text === 'string' &&
     typeof shape.mounted?.overhangMm?.text === 'string' &&
-    typeof shape.unasked === 'object'
+    typeof shape.smallestUsableMm?.text === 'string' &&
+    typeof shape.receivedOn === 'string' &&
+    typeof shape.place === 'string'
   );
 }

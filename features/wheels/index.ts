@@ -1,3 +1,4 @@
+export { SetAside } from './components/set-aside';
 export { StandingWords } from './components/standing-words';
 export { wheelQueries } from './queries';
 export { standingOf } from './standing';

@@ -14,7 +14,7 @@ import { formatQuantity } from '@/shared/units/format';
 import { MANDREL_FIELDS, WHEEL_FIELDS } from './fields';
 import type { WheelValues } from './form';
 import { speedWords } from './marked-speed';
-import { LOOK_WORDS, MARKING_PLACE_WORDS, RING_WORDS, STATE_WORDS } from './words';
+import { LOOK_WORDS, MARKING_PLACE_WORDS, RING_WORDS, shapeWords, STATE_WORDS } from './words';
 
 const quantity =
   (unit: UnitName) =>
@@ -22,6 +22,12 @@ const quantity =
     entry.si === null
       ? entry.text.trim() || NOT_GIVEN
       : formatQuantity({ value: entry.si, unit }, units);
+
+const date = (key: 'madeOn' | 'expiresOn', label: string): Part<WheelValues> =>
+  keyPart(key, label, (text) => {
+    const day = readDate(text);
+    return day ? dayWords(day) : text.trim() || NOT_GIVEN;
+  });
 
 const field = (name: keyof typeof WHEEL_FIELDS): Part<WheelValues> =>
   keyPart(name, WHEEL_FIELDS[name].label, quantity(WHEEL_FIELDS[name].unit));
@@ -69,6 +75,7 @@ export const wheelParts: Part<WheelValues>[] = [
   },
   field('widthMm'),
   field('holeMm'),
+  field('smallestUsableMm'),
   field('markedRpm'),
   {
     key: 'markedSpeedMPerS',
@@ -81,19 +88,25 @@ export const wheelParts: Part<WheelValues>[] = [
     place === UNKNOWN ? NOT_GIVEN : MARKING_PLACE_WORDS[place],
   ),
   {
+    key: 'shape',
+    label: 'Type',
+    words: ({ shape }) => (shape === UNKNOWN ? NOT_GIVEN : shapeWords(shape)),
+    take: (into, { shape, isMounted }) => ({ ...into, shape, isMounted }),
+  },
+  {
     key: 'mounted',
-    label: 'Mounted wheel',
+    label: 'Mandrel',
     words: (values) => mandrelWords(values, values),
-    take: (into, { isMounted, mounted }) => ({ ...into, isMounted, mounted }),
+    take: (into, { shape, isMounted, mounted }) => ({ ...into, shape, isMounted, mounted }),
   },
   keyPart('looked', 'Close look', (looked) =>
     looked === UNKNOWN ? 'not recorded' : LOOK_WORDS[looked],
   ),
   keyPart('rung', 'Ring test', (rung) => (rung === UNKNOWN ? 'not recorded' : RING_WORDS[rung])),
-  keyPart('expiresOn', 'Expires on', (text) => {
-    const date = readDate(text);
-    return date ? dayWords(date) : text.trim() || NOT_GIVEN;
-  }),
+  date('madeOn', 'Made on'),
+  date('expiresOn', 'Expires on'),
+  keyPart('place', 'Place', (place) => place.trim() || NOT_GIVEN),
+  keyPart('notes', 'Notes', (notes) => notes.trim() || NOT_GIVEN),
   {
     key: 'unasked',
     label: 'Type, place and notes',

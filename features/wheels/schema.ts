@@ -1,6 +1,6 @@
 import * as yup from 'yup';
 
-import { dateText, entryRules, type TypedEntry } from '@/features/records';
+import { dateText, entryRules, readDate, type TypedEntry } from '@/features/records';
 import { TEXT_LIMITS } from '@/shared/domain/limits';
 import type { UnitSystem } from '@/shared/domain/people';
 import { formatQuantity } from '@/shared/units/format';
@@ -29,6 +29,33 @@ const holeFits = (units: UnitSystem) =>
     return createError({ message: `Hole is smaller than the wheel, ${limit}.` });
   });
 
+const smallestFits = (units: UnitSystem) =>
+  yup.mixed<TypedEntry>().test('smallest fits', (smallest, { parent, createError }) => {
+    const { diameterNewMm, holeMm } = parent as WheelValues;
+    if (!smallest || smallest.si === null) return true;
+    const words = (value: number) => formatQuantity({ value, unit: 'mm' }, units);
+    if (diameterNewMm.si !== null && smallest.si > diameterNewMm.si)
+      return createError({
+        message: `Smallest usable diameter is at most ${words(diameterNewMm.si)}, the diameter when new.`,
+      });
+    if (holeMm.si !== null && smallest.si <= holeMm.si)
+      return createError({
+        message: `Smallest usable diameter is above the hole, ${words(holeMm.si)}.`,
+      });
+    return true;
+  });
+
+const afterMade = yup
+  .string()
+  .default('')
+  .test('after made', 'A wheel expires after it was made.', (text, { parent }) => {
+    const [made, expires] = [readDate((parent as WheelValues).madeOn), readDate(text ?? '')];
+    return made === null || expires === null || made <= expires;
+  });
+
+const atMost = (label: string, most: number) =>
+  yup.string().trim().max(most, `${label} has at most ${most} characters.`);
+
 export function wheelSchema({ units, speedUnit, isMounted }: WheelValues) {
   const rules = entryRules(WHEEL_FIELDS, units, ['diameterNewMm', 'widthMm']);
   return yup.object({
@@ -37,10 +64,7 @@ export function wheelSchema({ units, speedUnit, isMounted }: WheelValues) {
       .trim()
       .required('Enter the tag: the name under which the wheel hangs on the rack.')
       .max(TEXT_LIMITS.tag, `The tag has at most ${TEXT_LIMITS.tag} characters.`),
-    marking: yup
-      .string()
-      .trim()
-      .max(TEXT_LIMITS.marking, `The marking has at most ${TEXT_LIMITS.marking} characters.`),
+    marking: atMost('The marking', TEXT_LIMITS.marking),
     ...rules,
     diameterNowMm: rules.diameterNowMm.concat(notLarger(units)),
     holeMm: rules.holeMm.concat(holeFits(units)),
@@ -52,6 +76,11 @@ export function wheelSchema({ units, speedUnit, isMounted }: WheelValues) {
           ),
         }
       : {}),
-    expiresOn: dateText('Expires on'),
+    smallestUsableMm: rules.smallestUsableMm.concat(smallestFits(units)),
+    receivedOn: dateText('Received on'),
+    madeOn: dateText('Made on'),
+    expiresOn: dateText('Expires on').concat(afterMade),
+    place: atMost('Place', TEXT_LIMITS.place),
+    notes: atMost('Notes', TEXT_LIMITS.note),
   });
 }

@@ -6,16 +6,19 @@ import { FindingList, PlanReader } from '@/features/plan';
 import { RecordForm, shopDay } from '@/features/records';
 import { useShop } from '@/features/session';
 import { Stack } from '@/features/ui/card';
+import { useLayout } from '@/features/ui/use-layout';
 import { wheel as wheelContract, type Wheel } from '@/shared/contracts/wheels';
 import type { UnitSystem } from '@/shared/domain/people';
 import { markingFindings } from '@/shared/rules/wheel-checks';
 
+import { FurtherFields } from './components/further-fields';
 import { Nameplate } from './components/nameplate';
 import { WhereItMayRun } from './components/where-it-may-run';
-import { MarkingFields, SizeFields, SpeedFields, StateFields } from './components/wheel-fields';
+import { MarkingFields, SizeFields, SpeedFields } from './components/wheel-fields';
 import { isWheelValues, newWheel, plateOf, valuesOf, wheelDataOf, type WheelValues } from './form';
 import { inUnits, toRequest } from './form';
 import { recordParts, wheelParts } from './parts';
+import { wheelPlace } from './place';
 import { wheelSchema } from './schema';
 import { useSaveWheel, wheelQueries } from './queries';
 
@@ -28,6 +31,7 @@ interface WheelFormProps {
 /** Adds a wheel, or edits one. */
 export function WheelForm({ wheel, backTo }: WheelFormProps) {
   const { shop, units } = useShop();
+  const { wide } = useLayout();
   const router = useRouter();
   const client = useQueryClient();
   const save = useSaveWheel(shop.id);
@@ -58,15 +62,15 @@ export function WheelForm({ wheel, backTo }: WheelFormProps) {
         fetchCurrent={(id) =>
           client.fetchQuery({ ...wheelQueries.detail(shop.id, id), staleTime: 0 })
         }
-        onSaved={() => router.dismissTo(backTo)}
+        onSaved={(saved) => router.dismissTo(wheelPlace(shop.id, saved.id, wide))}
         pane={(values) => <Plate values={values} />}
       >
         {() => (
           <>
             <MarkingFields />
-            <SizeFields isNew={wheel === null} />
+            <SizeFields />
             <SpeedFields />
-            <StateFields isNew={wheel === null} />
+            <FurtherFields isNew={wheel === null} />
           </>
         )}
       </RecordForm>

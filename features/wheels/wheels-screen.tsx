@@ -1,4 +1,6 @@
 import { useInfiniteQuery } from '@tanstack/react-query';
+import { useLocalSearchParams } from 'expo-router';
+import { useState } from 'react';
 import { ScrollView, StyleSheet, View } from 'react-native';
 
 import { PlanReader } from '@/features/plan';
@@ -14,19 +16,24 @@ import { useLayout } from '@/features/ui/use-layout';
 import type { Wheel } from '@/shared/contracts/wheels';
 import { TEXT_LIMITS } from '@/shared/domain/limits';
 
-import { WheelDetail } from './components/wheel-detail';
+import { RackFilters } from './components/rack-filters';
+import { SetAsideSheet } from './components/set-aside';
+import { WheelPage } from './components/wheel-page';
 import { WheelList, WheelTable } from './components/wheel-table';
-import { wheelQueries } from './queries';
+import { wheelQueries, type WheelSearch } from './queries';
+import { searchOf } from './rack-filters';
 
 /** The Rack: the shop's wheels. */
 export function WheelsScreen() {
   const { shop, units, may } = useShop();
   const { wide } = useLayout();
-  const [search] = useAddressPart('search');
+  const address = useLocalSearchParams<Record<string, string>>();
   const [chosen] = useAddressPart('wheel');
+  const [asked, setAsked] = useState<Wheel | null>(null);
+  const search = searchOf(address);
   const query = useInfiniteQuery(wheelQueries.list(shop.id, search));
   const wheels = query.data?.pages.flatMap(({ items }) => items) ?? [];
-  const current = wheels.find(({ id }) => id === chosen) ?? wheels[0];
+  const current = chosen || wheels[0]?.id || null;
   const today = shopDay(shop.timeZone);
   const add = may('wheel:edit') ? (
     <ButtonLink
@@ -36,16 +43,15 @@ export function WheelsScreen() {
       href={{ pathname: '/shops/[shopId]/wheels/new', params: { shopId: shop.id } }}
     />
   ) : null;
+  const isNarrowed = Object.keys(search).some((key) => key !== 'sort' && key !== 'order');
 
   const found = () => {
     if (query.isPending) return <Skeleton label="Loading the rack" />;
+    if (query.error && wheels.length === 0)
+      return <LoadProblem error={query.error} onRetry={query.refetch} />;
     if (wheels.length === 0)
-      return query.error ? (
-        <LoadProblem error={query.error} onRetry={query.refetch} />
-      ) : search ? (
-        <EmptyState title="No wheel found" icon="search">
-          {`No tag or marking holds "${search}". Try a part of it.`}
-        </EmptyState>
+      return isNarrowed ? (
+        <NothingFound search={search} />
       ) : (
         <EmptyState title="No wheels yet" icon="rack" action={add}>
           {add
@@ -53,13 +59,14 @@ export function WheelsScreen() {
             : 'The rack keeps every wheel with its marking and sizes. A lead or machinist adds the first one.'}
         </EmptyState>
       );
+    const rows = {
+      wheels,
+      today,
+      ...(may('wheel:set-aside') ? { onSetAside: setAsked } : {}),
+    };
     return (
       <>
-        {wide ? (
-          <WheelTable wheels={wheels} today={today} current={current?.id ?? ''} />
-        ) : (
-          <WheelList wheels={wheels} today={today} />
-        )}
+        {wide ? <WheelTable {...rows} current={current ?? ''} /> : <WheelList {...rows} />}
         <Small>{countWords(wheels.length, query.hasNextPage)}</Small>
         <MorePages query={query} label="Show more wheels" />
       </>
@@ -77,22 +84,34 @@ export function WheelsScreen() {
               hint="A part of the tag or of the marking."
               maxLength={TEXT_LIMITS.marking}
             />
+            <RackFilters search={search} today={today} />
             {found()}
           </View>
-          {wide && current ? <Beside wheel={current} today={today} /> : null}
+          {wide && current !== null ? (
+            <View role="region" aria-label="The chosen wheel" style={[styles.beside, IN_VIEW]}>
+              <ScrollView contentContainerStyle={styles.stack}>
+                <WheelPage key={current} wheelId={current} />
+              </ScrollView>
+            </View>
+          ) : null}
         </View>
       </Screen>
+      {asked ? <SetAsideSheet wheel={asked} onClose={() => setAsked(null)} /> : null}
     </PlanReader>
   );
 }
 
-function Beside({ wheel, today }: { wheel: Wheel; today: string }) {
+function NothingFound({ search: { search, ...filters } }: { search: WheelSearch }) {
+  const filtered = Object.keys(filters).some((key) => key !== 'sort' && key !== 'order');
   return (
-    <View role="region" aria-label={`Wheel ${wheel.tag}`} style={styles.beside}>
-      <ScrollView contentContainerStyle={styles.stack}>
-        <WheelDetail wheel={wheel} today={today} />
-      </ScrollView>
-    </View>
+    <EmptyState title="No wheel found" icon="search">
+      {[
+        search ? `No tag or marking holds "${search}". Try a part of it.` : '',
+        filtered ? 'No wheel passes every filter that is on. Take one off to see more.' : '',
+      ]
+        .filter(Boolean)
+        .join(' ')}
+    </EmptyState>
   );
 }
 
@@ -100,6 +119,9 @@ function countWords(count: number, more: boolean): string {
   if (more) return `The first ${count} wheels`;
   return count === 1 ? '1 wheel' : `${count} wheels`;
 }
+
+// Stays beside the table however far that is scrolled; styles of the web that React Native's types do not know.
+const IN_VIEW: object = { position: 'sticky', top: 0, maxHeight: 'calc(100vh - 96px)' };
 
 const styles = StyleSheet.create({
   both: { flexDirection: 'row', gap: space[6], alignItems: 'flex-start' },

@@ -1,4 +1,12 @@
-import type { LookResult, MarkingPlace, RingResult, WheelState } from '@/shared/domain/wheels';
+import type { DueReason, EntryKind } from '@/shared/domain/wheel-life';
+import {
+  SHAPE_WORDS,
+  type LookResult,
+  type MarkingPlace,
+  type RingResult,
+  type WheelShape,
+  type WheelState,
+} from '@/shared/domain/wheels';
 
 export const LOOK_WORDS: Record<LookResult, string> = {
   sound: 'Looked at, no fault seen',
@@ -23,4 +31,30 @@ export const STATE_WORDS: Record<WheelState, string> = {
   mounted: 'Mounted',
   'set aside': 'Set aside',
   scrapped: 'Scrapped',
+};
+
+/** "1, straight" */
+export const shapeWords = (shape: WheelShape) => `${shape}, ${SHAPE_WORDS[shape]}`;
+
+export const DUE_WORDS: Record<DueReason, string> = {
+  'close look': 'Close look',
+  'ring test': 'Ring test',
+  expiry: 'Expires',
+};
+
+/** A step as somebody takes it: the words on its button and over its form. */
+export const STEP_LABELS: Record<EntryKind, string> = {
+  received: 'Receive',
+  inspected: 'Close look',
+  'ring test': 'Ring test',
+  mounted: 'Mount',
+  'trial run': 'Trial run',
+  dressed: 'Dress',
+  used: 'Used',
+  'taken off': 'Take off',
+  'set aside': 'Set aside',
+  returned: 'Return to the rack',
+  scrapped: 'Scrap',
+  countersigned: 'Sign',
+  correction: 'Correct',
 };

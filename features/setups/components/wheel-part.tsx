@@ -6,6 +6,7 @@ import { List } from '@/features/ui/list-row';
 import { Segmented } from '@/features/ui/segmented';
 import { Select } from '@/features/ui/select';
 import { Small, Strong } from '@/features/ui/text';
+import { SetAside } from '@/features/wheels';
 import type { SpeedLimit } from '@/shared/rules';
 import { LOOK_RESULTS, RING_RESULTS, type WheelData } from '@/shared/domain/wheels';
 import type { UnitSystem } from '@/shared/domain/people';
@@ -114,6 +115,7 @@ function ChosenWheel() {
           spoken={chosen || typed ? 'Change the wheel' : 'Choose the wheel'}
           onPress={() => setPicking(true)}
         />
+        {wheel && !typed ? <SetAside wheel={wheel} /> : null}
       </Row>
       <WheelPicker
         open={picking}

@@ -59,7 +59,9 @@ export function WheelPicker({ open, onClose, chosen, onChoose, onType }: WheelPi
 function RackList({ chosen, onChoose }: Pick<WheelPickerProps, 'chosen' | 'onChoose'>) {
   const { shop, units } = useShop();
   const [search, setSearch] = useState('');
-  const wheels = useInfiniteQuery(wheelQueries.list(shop.id, useDeferredValue(search.trim())));
+  const wheels = useInfiniteQuery(
+    wheelQueries.list(shop.id, { search: useDeferredValue(search.trim()) }),
+  );
   const found = wheels.data?.pages.flatMap((page) => page.items) ?? [];
   const size = (value: number) => formatQuantity({ value, unit: 'mm' }, units, { withUnit: false });
   const detail = ({ data }: Wheel) =>

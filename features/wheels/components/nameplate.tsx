@@ -7,7 +7,7 @@ import { Readout, ReadoutRow } from '@/features/ui/readout';
 import { Display, Engraved, Small } from '@/features/ui/text';
 import { space } from '@/features/ui/tokens';
 import type { UnitSystem } from '@/shared/domain/people';
-import type { WheelData } from '@/shared/domain/wheels';
+import type { RackWheel } from '@/shared/domain/wheels';
 import { formatQuantity } from '@/shared/units/format';
 
 import { speedWords, type SpeedUnit } from '../marked-speed';
@@ -17,8 +17,8 @@ import { MARKING_PLACE_WORDS } from '../words';
 
 /** What a plate can show while a wheel is still being typed in. */
 export type PlateWheel = Pick<
-  WheelData,
-  'marking' | 'markedRpm' | 'markedSpeedMPerS' | 'markingReadOn' | 'mounted'
+  RackWheel,
+  'marking' | 'shape' | 'markedRpm' | 'markedSpeedMPerS' | 'markingReadOn' | 'mounted'
 > & { diameterNewMm: number | null; widthMm: number | null; holeMm: number | null };
 
 interface NameplateProps {
@@ -37,7 +37,9 @@ export function Nameplate({ tag, wheel, speedUnit, units, typing = false }: Name
     <Card kind="engraved">
       <View style={styles.head}>
         <Engraved>
-          {[tag || 'no tag', wheel.mounted ? 'mounted' : ''].filter(Boolean).join(' · ')}
+          {[tag || 'no tag', wheel.shape === null ? '' : `type ${wheel.shape}`]
+            .filter(Boolean)
+            .join(' · ')}
         </Engraved>
         <Small>
           {wheel.markingReadOn === null

@@ -1,18 +1,20 @@
 import { readDraft, draftKey } from '@/features/forms';
 import { FindingList, MarkingFold } from '@/features/plan';
-import { Facts } from '@/features/records';
+import { dayWords, Facts } from '@/features/records';
 import { useShop } from '@/features/session';
 import { Row, Stack } from '@/features/ui/card';
+import { Fold } from '@/features/ui/fold';
 import { ButtonLink } from '@/features/ui/link';
 import { Notice } from '@/features/ui/notice';
+import { Body } from '@/features/ui/text';
 import type { Wheel } from '@/shared/contracts/wheels';
 
 import { isWheelValues, speedUnitOf, valuesOf } from '../form';
 import { wheelParts } from '../parts';
 import { standingOf, wheelFindingsOn } from '../standing';
+import { DUE_WORDS } from '../words';
 import { Nameplate } from './nameplate';
-import { SetAside } from './set-aside';
-import { WhereItMayRun } from './where-it-may-run';
+import { StandingWords } from './standing-words';
 
 interface WheelDetailProps {
   wheel: Wheel;
@@ -20,13 +22,39 @@ interface WheelDetailProps {
   today: string;
 }
 
-/** One wheel to be read: its plate, what stands against it, and every fact. Stands in a PlanReader. */
+/** The wheel's plate, where it stands, what is due, and what stands against it. Stands in a PlanReader. */
 export function WheelDetail({ wheel, today }: WheelDetailProps) {
+  const { units } = useShop();
+  const findings = wheelFindingsOn(wheel.data, today);
+  return (
+    <Stack gap={3}>
+      <Nameplate
+        tag={wheel.tag}
+        wheel={wheel.data}
+        speedUnit={speedUnitOf(wheel.typed, units)}
+        units={units}
+      />
+      <StandingWords {...standingOf(wheel.data, today)} />
+      {wheel.life.due ? <Body>{dueWords(wheel.life.due, today)}</Body> : null}
+      <FindingList findings={findings} sourced />
+    </Stack>
+  );
+}
+
+/** "Ring test due since 16 Feb 2026", "Expires on 31 Mar 2027". */
+function dueWords({ on, why }: NonNullable<Wheel['life']['due']>, today: string): string {
+  const day = dayWords(on);
+  if (why === 'expiry') return on < today ? `Expired on ${day}` : `Expires on ${day}`;
+  if (on === today) return `${DUE_WORDS[why]} due today`;
+  return on < today ? `${DUE_WORDS[why]} due since ${day}` : `${DUE_WORDS[why]} due ${day}`;
+}
+
+/** Everything that was written down of it, and the way to edit that. */
+export function WheelRecord({ wheel }: { wheel: Wheel }) {
   const { shop, person, units, may } = useShop();
   const mayEdit = may('wheel:edit');
   const draft =
     mayEdit && readDraft(draftKey(person.personId, shop.id, `wheel:${wheel.id}`), isWheelValues);
-  const shown = new Set(['tag', 'marking', 'markingReadOn', 'markedRpm', 'markedSpeedMPerS']);
   const edit = (label: string) => (
     <ButtonLink
       label={label}
@@ -38,32 +66,17 @@ export function WheelDetail({ wheel, today }: WheelDetailProps) {
     />
   );
   return (
-    <Stack>
-      <Nameplate
-        tag={wheel.tag}
-        wheel={wheel.data}
-        speedUnit={speedUnitOf(wheel.typed, units)}
-        units={units}
-      />
+    <Stack gap={3}>
       {draft ? (
         <Notice action={edit('Go on with them')}>
           Changes to this wheel are kept on this device and not saved yet.
         </Notice>
       ) : null}
-      <FindingList findings={wheelFindingsOn(wheel.data, today)} sourced />
-      <Row>
-        {mayEdit ? edit('Edit') : null}
-        {may('wheel:set-aside') ? <SetAside shopId={shop.id} wheel={wheel} today={today} /> : null}
-      </Row>
-      {standingOf(wheel.data, today).usable ? (
-        <WhereItMayRun wheel={wheel.data} today={today} />
-      ) : null}
       <MarkingFold marking={wheel.data.marking} />
-      <Facts
-        label={`Facts of ${wheel.tag}`}
-        parts={wheelParts.filter(({ key }) => !shown.has(key))}
-        values={valuesOf(wheel, units)}
-      />
+      <Fold label="All that is written down of it" value={wheel.data.place ?? 'no place given'}>
+        <Facts label={`Facts of ${wheel.tag}`} parts={wheelParts} values={valuesOf(wheel, units)} />
+      </Fold>
+      {mayEdit ? <Row>{edit('Edit')}</Row> : null}
     </Stack>
   );
 }

@@ -1,45 +1,35 @@
 import { useField, useFormikContext } from 'formik';
 
-import { TextField } from '@/features/forms';
+import { QuantityInput, TextField } from '@/features/forms';
 import { MarkingField, MarkingFold } from '@/features/plan';
 import {
   ChoiceField,
-  DateField,
   EntryField,
   FieldRow,
   FormFold,
+  typedEntry,
   UNKNOWN,
+  type TypedEntry,
 } from '@/features/records';
 import { Stack } from '@/features/ui/card';
-import { Checkbox } from '@/features/ui/checkbox';
 import { Field } from '@/features/ui/field';
 import { Segmented } from '@/features/ui/segmented';
 import { Heading } from '@/features/ui/text';
 import { TEXT_LIMITS } from '@/shared/domain/limits';
-import { LOOK_RESULTS, MARKING_PLACES, RING_RESULTS } from '@/shared/domain/wheels';
+import { MARKING_PLACES } from '@/shared/domain/wheels';
 import { ENTRY_UNITS } from '@/shared/units/entry-units';
 
-import { MANDREL_FIELDS, WHEEL_FIELDS, type MandrelField, type WheelField } from '../fields';
+import { WHEEL_FIELDS, type WheelField } from '../fields';
 import { withSpeedUnit, type WheelValues } from '../form';
 import { SPEED_UNITS, speedHint, typedSpeed } from '../marked-speed';
-import { LOOK_WORDS, MARKING_PLACE_WORDS, RING_WORDS } from '../words';
+import { readSizes, SIZE_FIELDS } from '../size-triple';
+import { MARKING_PLACE_WORDS } from '../words';
 
-function WheelQuantity({ name, required }: { name: WheelField; required?: boolean }) {
+/** A length or rpm of the wheel. */
+export function WheelQuantity({ name, required }: { name: WheelField; required?: boolean }) {
   const { values } = useFormikContext<WheelValues>();
   return (
     <EntryField name={name} spec={WHEEL_FIELDS[name]} units={values.units} required={required} />
-  );
-}
-
-function MandrelQuantity({ name, required }: { name: MandrelField; required?: boolean }) {
-  const { values } = useFormikContext<WheelValues>();
-  return (
-    <EntryField
-      name={`mounted.${name}`}
-      spec={MANDREL_FIELDS[name]}
-      units={values.units}
-      required={required}
-    />
   );
 }
 
@@ -78,21 +68,29 @@ function MarkingText() {
 
 /** The speeds that are marked, and where they were read. */
 export function SpeedFields() {
+  const { values } = useFormikContext<WheelValues>();
+  const { markingReadOn } = values;
   return (
     <Stack>
       <Heading>Marked speed</Heading>
-      <MarkedSpeed />
       <WheelQuantity name="markedRpm" />
-      <ChoiceField
-        name="markingReadOn"
-        label="Marking read"
-        hint="Small wheels carry their speed on the blotter, the box or a tag."
-        as="rows"
-        options={[
-          ...MARKING_PLACES.map((value) => ({ value, label: MARKING_PLACE_WORDS[value] })),
-          { value: UNKNOWN, label: 'not recorded' },
-        ]}
-      />
+      <MarkedSpeed />
+      <FormFold
+        label="Where it was read"
+        value={markingReadOn === UNKNOWN ? 'not recorded' : MARKING_PLACE_WORDS[markingReadOn]}
+        names={['markingReadOn']}
+      >
+        <ChoiceField
+          name="markingReadOn"
+          label="Marking read"
+          hint="Small wheels carry their speed on the blotter, the box or a tag."
+          as="rows"
+          options={[
+            ...MARKING_PLACES.map((value) => ({ value, label: MARKING_PLACE_WORDS[value] })),
+            { value: UNKNOWN, label: 'not recorded' },
+          ]}
+        />
+      </FormFold>
     </Stack>
   );
 }
@@ -128,85 +126,54 @@ function MarkedSpeed() {
   );
 }
 
-/** A wheel that has entries is as large as they make it; only of a new one is that asked. */
-export function SizeFields({ isNew }: { isNew: boolean }) {
-  const { values, setFieldValue } = useFormikContext<WheelValues>();
-  const { isMounted } = values;
+/** Diameter, width and hole, one by one or all from the label. */
+export function SizeFields() {
+  const { values } = useFormikContext<WheelValues>();
   return (
     <Stack>
-      <Heading>Sizes</Heading>
-      <FieldRow>
-        <WheelQuantity name="diameterNewMm" required />
-        {isNew ? <WheelQuantity name="diameterNowMm" /> : null}
-      </FieldRow>
+      <Heading>Sizes when new</Heading>
+      <NewDiameter />
       <FieldRow>
         <WheelQuantity name="widthMm" required />
-        <WheelQuantity name="holeMm" required={!isMounted} />
+        <WheelQuantity name="holeMm" required={!values.isMounted} />
       </FieldRow>
-      <FormFold
-        label="Mounted wheel"
-        value={isMounted ? 'on its own mandrel' : 'no'}
-        names={['mounted']}
-      >
-        <Checkbox
-          name="isMounted"
-          label="The wheel sits on a mandrel of its own"
-          checked={isMounted}
-          onChange={(next) => void setFieldValue('isMounted', next)}
-        />
-        {isMounted ? (
-          <>
-            <MandrelQuantity name="mandrelDiameterMm" required />
-            <MandrelQuantity name="overhangMm" required />
-            <Checkbox
-              name="mounted.threaded"
-              label="The mandrel is threaded"
-              hint="A threaded mandrel has the figure for half an inch of overhang of a plain one."
-              checked={values.mounted.threaded}
-              onChange={(next) => void setFieldValue('mounted.threaded', next)}
-            />
-            <MandrelQuantity name="makerMaximumRpm" />
-          </>
-        ) : null}
-      </FormFold>
     </Stack>
   );
 }
 
-/** Until when it may run; of a new wheel also what was seen and heard when it came. */
-export function StateFields({ isNew }: { isNew: boolean }) {
+/** More letters than a keystroke brings were pasted. */
+const PASTED = 3;
+
+function NewDiameter() {
+  const { values, setValues, getFieldMeta, setFieldTouched } = useFormikContext<WheelValues>();
+  const name = 'diameterNewMm';
+  const { error, touched } = getFieldMeta<TypedEntry>(name);
+  const { units, diameterNewMm } = values;
+  const entry = (field: WheelField, text: string) => typedEntry(text, WHEEL_FIELDS[field], units);
+  const spread = (text: string): boolean => {
+    const sizes = readSizes(text, units);
+    if (sizes === null) return false;
+    const read = SIZE_FIELDS.map((field, index) => [field, entry(field, sizes[index] ?? '')]);
+    void setValues({ ...values, ...Object.fromEntries(read) });
+    return true;
+  };
+  const change = (text: string) => {
+    const isPasted = text.length - diameterNewMm.text.length >= PASTED;
+    if (isPasted && spread(text)) return;
+    void setValues({ ...values, [name]: entry(name, text) });
+  };
   return (
-    <Stack>
-      <Heading>Checks</Heading>
-      {isNew ? (
-        <>
-          <ChoiceField
-            name="looked"
-            label="Close look"
-            hint="Clean and dry, in good light: cracks, chips, stains."
-            as="rows"
-            options={[
-              ...LOOK_RESULTS.map((value) => ({ value, label: LOOK_WORDS[value] })),
-              { value: UNKNOWN, label: 'Not recorded' },
-            ]}
-          />
-          <ChoiceField
-            name="rung"
-            label="Ring test"
-            hint="Wheels of 4 in and under, and soft bonds, may not ring: then the look decides."
-            as="rows"
-            options={[
-              ...RING_RESULTS.map((value) => ({ value, label: RING_WORDS[value] })),
-              { value: UNKNOWN, label: 'Not recorded' },
-            ]}
-          />
-        </>
-      ) : null}
-      <DateField
-        name="expiresOn"
-        label="Expires on"
-        hint="The last day on which it may run. Leave empty where no date is given."
-      />
-    </Stack>
+    <QuantityInput
+      name={name}
+      spec={WHEEL_FIELDS[name]}
+      units={units}
+      value={diameterNewMm.text}
+      onChangeText={change}
+      onBlur={() => {
+        if (!spread(diameterNewMm.text)) void setFieldTouched(name);
+      }}
+      error={touched ? error : undefined}
+      required
+    />
   );
 }

@@ -1,7 +1,11 @@
+import { useQuery } from '@tanstack/react-query';
+import { useLocalSearchParams } from 'expo-router';
 import { StyleSheet, View } from 'react-native';
 
+import { machineQueries } from '@/features/machines';
 import { LinkRow } from '@/features/records';
 import { useShop } from '@/features/session';
+import { IconButton } from '@/features/ui/button';
 import { TextLink } from '@/features/ui/link';
 import { List } from '@/features/ui/list-row';
 import { Table, type Column } from '@/features/ui/table';
@@ -9,35 +13,75 @@ import { Small, Strong } from '@/features/ui/text';
 import { stroke, space, colors } from '@/features/ui/tokens';
 import type { Wheel } from '@/shared/contracts/wheels';
 import type { UnitSystem } from '@/shared/domain/people';
-import { limitRpm } from '@/shared/rules/limits';
 import { unitLabel } from '@/shared/units/entry-units';
 import { formatQuantity } from '@/shared/units/format';
 
+import { leftWords } from '../left';
 import { sizeWords } from '../sizes';
-import { governingLimit, standingOf } from '../standing';
+import { standingOf } from '../standing';
 import { StandingWords } from './standing-words';
 
 interface WheelRowsProps {
   wheels: readonly Wheel[];
   /** ISO date of the shop. */
   today: string;
+  /** Asks why a wheel is set aside; left out for those who may not. */
+  onSetAside?: (wheel: Wheel) => void;
 }
 
-function limitWords({ data }: Wheel): string {
-  const limit = governingLimit(data);
-  if (limit === null) return '–';
-  return formatQuantity({ value: limitRpm(limit), unit: 'rpm' }, 'mm', {
+function limitWords({ life }: Wheel): string {
+  if (life.limitRpm === 0) return '–';
+  return formatQuantity({ value: life.limitRpm, unit: 'rpm' }, 'mm', {
     rounding: 'down',
     withUnit: false,
   });
 }
 
+/** Where a wheel stands, a mounted one with the grinder it sits on. */
+function useStanding(today: string) {
+  const { shop } = useShop();
+  const { data: grinders } = useQuery(machineQueries.grinders(shop.id));
+  return ({ data, life }: Wheel) => {
+    const standing = standingOf(data, today);
+    const on = grinders?.items.find(({ id }) => id === life.onSpindle?.grinderId);
+    return on ? { ...standing, words: `${standing.words}, ${on.name}` } : standing;
+  };
+}
+
+function SetAsideSign({
+  wheel,
+  onSetAside,
+}: Pick<WheelRowsProps, 'onSetAside'> & { wheel: Wheel }) {
+  const { state } = wheel.data;
+  if (!onSetAside || state === 'set aside' || state === 'scrapped') return null;
+  return (
+    <IconButton
+      icon="setAside"
+      color="stop"
+      label={`Set ${wheel.tag} aside`}
+      onPress={() => onSetAside(wheel)}
+    />
+  );
+}
+
 const sizesNow = ({ data }: Wheel, units: UnitSystem, withUnit = true) =>
   sizeWords([data.diameterNowMm, data.widthMm], { units, withUnit });
 
+function factWords(wheel: Wheel, units: UnitSystem): string {
+  const left = leftWords(wheel.data);
+  return [
+    sizesNow(wheel, units),
+    wheel.life.limitRpm === 0 ? '' : `limit ${limitWords(wheel)}\u00a0rpm`,
+    left === '–' ? '' : `${left} left`,
+  ]
+    .filter(Boolean)
+    .join(', ');
+}
+
 /** The rack on a phone. */
-export function WheelList({ wheels, today }: WheelRowsProps) {
+export function WheelList({ wheels, today, onSetAside }: WheelRowsProps) {
   const { shop, units } = useShop();
+  const standing = useStanding(today);
   return (
     <List label="Wheels">
       {wheels.map((wheel) => (
@@ -48,9 +92,10 @@ export function WheelList({ wheels, today }: WheelRowsProps) {
             pathname: '/shops/[shopId]/wheels/[wheelId]',
             params: { shopId: shop.id, wheelId: wheel.id },
           }}
+          beside={<SetAsideSign wheel={wheel} onSetAside={onSetAside} />}
         >
-          <Small>{`${sizesNow(wheel, units)}, limit ${limitWords(wheel)}\u00a0rpm`}</Small>
-          <StandingWords {...standingOf(wheel.data, today)} />
+          <Small>{factWords(wheel, units)}</Small>
+          <StandingWords {...standing(wheel)} />
         </LinkRow>
       ))}
     </List>
@@ -58,8 +103,16 @@ export function WheelList({ wheels, today }: WheelRowsProps) {
 }
 
 /** The rack on a wide screen; the tag opens the wheel beside the table. */
-export function WheelTable({ wheels, today, current }: WheelRowsProps & { current: string }) {
+export function WheelTable({
+  wheels,
+  today,
+  onSetAside,
+  current,
+}: WheelRowsProps & { current: string }) {
   const { shop, units } = useShop();
+  // What the rack is narrowed by stays in the address.
+  const address = useLocalSearchParams<Record<string, string>>();
+  const standing = useStanding(today);
   const columns: Column<Wheel>[] = [
     {
       id: 'tag',
@@ -71,7 +124,7 @@ export function WheelTable({ wheels, today, current }: WheelRowsProps & { curren
             replace
             href={{
               pathname: '/shops/[shopId]/wheels',
-              params: { shopId: shop.id, wheel: wheel.id },
+              params: { ...address, shopId: shop.id, wheel: wheel.id },
             }}
           />
         </View>
@@ -92,11 +145,17 @@ export function WheelTable({ wheels, today, current }: WheelRowsProps & { curren
       cell: (wheel) => sizesNow(wheel, units, false),
     },
     { id: 'limit', label: 'Limit,\u00a0rpm', numeric: true, cell: limitWords },
-    {
-      id: 'state',
-      label: 'State',
-      cell: ({ data }) => <StandingWords {...standingOf(data, today)} />,
-    },
+    { id: 'left', label: 'Left', numeric: true, whole: true, cell: ({ data }) => leftWords(data) },
+    { id: 'state', label: 'State', cell: (wheel) => <StandingWords {...standing(wheel)} /> },
+    ...(onSetAside
+      ? [
+          {
+            id: 'set-aside',
+            label: 'Set\u00a0aside',
+            cell: (wheel: Wheel) => <SetAsideSign wheel={wheel} onSetAside={onSetAside} />,
+          },
+        ]
+      : []),
   ];
   return <Table caption="Wheels" columns={columns} rows={wheels} rowKey={({ id }) => id} />;
 }

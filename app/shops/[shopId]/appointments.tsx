@@ -1,0 +1,1 @@
+export { AppointmentsScreen as default } from '@/features/appointments/appointments-screen';
