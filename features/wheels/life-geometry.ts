@@ -53,13 +53,32 @@ type Sizes = Pick<RackWheel, 'diameterNewMm' | 'diameterNowMm' | 'smallestUsable
 
 /** How far below the smallest usable diameter the bar begins, as a share of what can be used. */
 const BELOW_SHARE = 0.35;
+const LEAST_WIDTH = 2;
+
+/** What came off the wheel between two sizes on record. */
+export interface Loss {
+  fromMm: number;
+  toMm: number;
+  /** Or it wore off in use, or before it came. */
+  byDressing: boolean;
+}
+
+/** What each entry took off, oldest first; a wheel measured larger than reckoned has lost nothing. */
+export function lossesOf(freshMm: number, marks: readonly LifeMark[]): Loss[] {
+  return marks.flatMap(({ entry, diameterMm }, index) => {
+    const fromMm = marks[index - 1]?.diameterMm ?? freshMm;
+    if (diameterMm >= fromMm) return [];
+    return [{ fromMm, toMm: diameterMm, byDressing: entry.step.kind === 'dressed' }];
+  });
+}
 
 export interface LifeBar {
-  /** Left edges and right ends in pixels: what must never be used, what is left, what is gone. */
+  /** In pixels: where the usable wheel ends, where it is now, where it began. */
   end: number;
   now: number;
   fresh: number;
-  ticks: number[];
+  /** What dressing took, each at least wide enough to be seen. */
+  dressed: { x: number; width: number }[];
   /** What the lower end of the usable wheel is. */
   endIs: 'smallest' | 'hole';
   endMm: number;
@@ -76,9 +95,12 @@ export function lifeBar(sizes: Sizes, marks: readonly LifeMark[], width: number)
     end: x(endMm),
     now: x(diameterNowMm),
     fresh: x(diameterNewMm),
-    ticks: marks
-      .filter(({ entry }) => entry.step.kind === 'dressed')
-      .map((mark) => x(mark.diameterMm)),
+    dressed: lossesOf(diameterNewMm, marks)
+      .filter(({ byDressing }) => byDressing)
+      .map(({ fromMm, toMm }) => ({
+        x: x(toMm),
+        width: Math.max(x(fromMm) - x(toMm), LEAST_WIDTH),
+      })),
     endIs: smallestUsableMm === null ? 'hole' : 'smallest',
     endMm,
   };

@@ -48,6 +48,14 @@ export function standingOf(wheel: WheelData, today: string): Standing {
   return { usable: false, words: SHORT[first.code]?.(wheel) ?? 'must not run' };
 }
 
+/** The same with the spindle it sits on: where a mounted wheel is, and where one set aside still hangs. */
+export function standingOn(wheel: WheelData, today: string, spindle: string | null): Standing {
+  const standing = standingOf(wheel, today);
+  if (spindle === null) return standing;
+  const on = wheel.state === 'mounted' && standing.usable ? ' on ' : ', still on ';
+  return { ...standing, words: `${standing.words}${on}${spindle}` };
+}
+
 /** The limit that governs the wheel by itself: the lowest of what is marked, rounded down. */
 export function governingLimit(
   wheel: Pick<WheelData, 'markedRpm' | 'markedSpeedMPerS' | 'diameterNewMm' | 'mounted'>,

@@ -14,7 +14,7 @@ import { formatQuantity } from '@/shared/units/format';
 
 import { entryWords } from '../entry-words';
 import { leftWords } from '../left';
-import { labelAt, lifeBar, lifeMarks, type LifeMark } from '../life-geometry';
+import { labelAt, lifeBar, lifeMarks, lossesOf, type LifeMark, type Loss } from '../life-geometry';
 
 const BAR = { top: 34, height: 30, over: 8 };
 const LINE = 22;
@@ -32,9 +32,8 @@ export function LifePicture({ life, entries }: LifePictureProps) {
   const sizes = wheel.data;
   const marks = lifeMarks(entries, sizes.diameterNowMm);
   const size = (value: number) => formatQuantity({ value, unit: 'mm' }, units);
-  const drawn = marks.filter(({ entry }) => entry.step.kind === 'dressed').length;
-  const dressings = standing.dressings === 1 ? '1 dressing' : `${standing.dressings} dressings`;
-  const since = drawn < standing.dressings ? `${dressings}, the last ${drawn} drawn` : dressings;
+  const losses = lossesOf(sizes.diameterNewMm, marks);
+  const taken = lossWords(losses, standing.dressings, size);
   const left = leftWords(sizes);
   const isKnown = sizes.smallestUsableMm !== null;
   const description = [
@@ -42,7 +41,7 @@ export function LifePicture({ life, entries }: LifePictureProps) {
     sizes.smallestUsableMm === null
       ? `smallest usable diameter not recorded, hole ${size(sizes.holeMm)}`
       : `smallest usable ${size(sizes.smallestUsableMm)}, ${left} left`,
-    since,
+    taken,
   ].join('; ');
   return (
     <Stack gap={2}>
@@ -52,8 +51,8 @@ export function LifePicture({ life, entries }: LifePictureProps) {
         height={(_, scale) => BAR.top * scale + BAR.height + BAR.over + 2 * LINE * scale}
         caption={
           isKnown
-            ? `${since}.`
-            : `${since}. The smallest usable diameter is not recorded; without it only the hole is the end.`
+            ? `${taken}.`
+            : `${taken}. The smallest usable diameter is not recorded; without it only the hole is the end.`
         }
       >
         {({ width, textScale }) => {
@@ -83,6 +82,18 @@ export function LifePicture({ life, entries }: LifePictureProps) {
                 height={BAR.height}
                 fill={colors.well}
               />
+              {bar.dressed.map(({ x, width: lost }, index) => (
+                <Rect
+                  key={index}
+                  x={x}
+                  y={top}
+                  width={lost}
+                  height={BAR.height}
+                  fill={colors.outline}
+                  stroke={colors.page}
+                  strokeWidth={0.5}
+                />
+              ))}
               <Rect
                 x={0.5}
                 y={top + 0.5}
@@ -91,16 +102,6 @@ export function LifePicture({ life, entries }: LifePictureProps) {
                 fill="none"
                 stroke={colors.outline}
               />
-              {bar.ticks.map((x, index) => (
-                <Line
-                  key={index}
-                  x1={x}
-                  x2={x}
-                  y1={top + BAR.height / 2}
-                  y2={foot}
-                  stroke={colors.outline}
-                />
-              ))}
               {[bar.end, bar.now].map((x, index) => (
                 <Line
                   key={index}
@@ -146,6 +147,23 @@ export function LifePicture({ life, entries }: LifePictureProps) {
       {marks.length > 0 ? <Sizes marks={marks} life={life} entries={entries} /> : null}
     </Stack>
   );
+}
+
+/** "2 dressings took 0.4 mm off, drawn dark; use and wear 17.1 mm" */
+function lossWords(
+  losses: readonly Loss[],
+  dressings: number,
+  size: (value: number) => string,
+): string {
+  const dressed = losses.filter(({ byDressing }) => byDressing);
+  const sum = (some: readonly Loss[]) =>
+    some.reduce((total, { fromMm, toMm }) => total + fromMm - toMm, 0);
+  const worn = sum(losses) - sum(dressed);
+  const rest = worn > 0 ? `; use and wear took ${size(worn)}` : '';
+  if (dressings === 0) return `Not dressed yet${rest}`;
+  const count = dressings === 1 ? '1 dressing' : `${dressings} dressings`;
+  if (dressed.length < dressings) return `${count}, the last ${dressed.length} of them drawn dark`;
+  return `${count} took ${size(sum(dressed))} off, drawn dark${rest}`;
 }
 
 function Sizes({ marks, life, entries }: LifePictureProps & { marks: readonly LifeMark[] }) {

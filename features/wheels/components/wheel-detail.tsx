@@ -7,25 +7,29 @@ import { Fold } from '@/features/ui/fold';
 import { ButtonLink } from '@/features/ui/link';
 import { Notice } from '@/features/ui/notice';
 import { Body } from '@/features/ui/text';
+import type { WheelLife } from '@/shared/contracts/wheel-entries';
 import type { Wheel } from '@/shared/contracts/wheels';
 
 import { isWheelValues, speedUnitOf, valuesOf } from '../form';
 import { wheelParts } from '../parts';
-import { standingOf, wheelFindingsOn } from '../standing';
+import { standingOn, wheelFindingsOn } from '../standing';
 import { DUE_WORDS } from '../words';
 import { Nameplate } from './nameplate';
 import { StandingWords } from './standing-words';
 
 interface WheelDetailProps {
-  wheel: Wheel;
+  life: WheelLife;
   /** ISO date of the shop. */
   today: string;
 }
 
-/** The wheel's plate, where it stands, what is due, and what stands against it. Stands in a PlanReader. */
-export function WheelDetail({ wheel, today }: WheelDetailProps) {
+/** The wheel's plate, where it stands, what is due, and the first thing against it. Stands in a PlanReader. */
+export function WheelDetail({ life, today }: WheelDetailProps) {
   const { units } = useShop();
-  const findings = wheelFindingsOn(wheel.data, today);
+  const { wheel, spindles, standing } = life;
+  const on = spindles.find(({ quillId }) => quillId === standing.onSpindle?.quillId);
+  const spindle = on ? `${on.quillName}, ${on.grinderName}` : null;
+  const [first, ...more] = wheelFindingsOn(wheel.data, today);
   return (
     <Stack gap={3}>
       <Nameplate
@@ -34,9 +38,14 @@ export function WheelDetail({ wheel, today }: WheelDetailProps) {
         speedUnit={speedUnitOf(wheel.typed, units)}
         units={units}
       />
-      <StandingWords {...standingOf(wheel.data, today)} />
+      <StandingWords {...standingOn(wheel.data, today, spindle)} />
       {wheel.life.due ? <Body>{dueWords(wheel.life.due, today)}</Body> : null}
-      <FindingList findings={findings} sourced />
+      {first ? <FindingList findings={[first]} sourced={more.length === 0} /> : null}
+      {first && more.length > 0 ? (
+        <Fold label="All that speaks of it" value={`${more.length + 1} findings`}>
+          <FindingList findings={[first, ...more]} sourced />
+        </Fold>
+      ) : null}
     </Stack>
   );
 }

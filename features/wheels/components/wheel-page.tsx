@@ -47,7 +47,7 @@ export function WheelPage({ wheelId }: { wheelId: string }) {
     : query.data;
   return (
     <Stack gap={6}>
-      <WheelDetail wheel={life.wheel} today={shopDay(shop.timeZone)} />
+      <WheelDetail life={life} today={shopDay(shop.timeZone)} />
       <WheelSteps life={life} />
       <LifePicture life={life} entries={life.entries.items} />
       <SpindleList life={life} />

@@ -58,7 +58,11 @@ export function WheelSteps({ life }: { life: WheelLife }) {
             </Cell>
           ) : null,
         )}
-        <SetAside wheel={life.wheel} />
+        {isOutOfUse(life) ? null : (
+          <Cell least={136}>
+            <SetAside wheel={life.wheel} wide />
+          </Cell>
+        )}
       </Row>
       {refused.length > 0 ? (
         <Card kind="well">
@@ -86,6 +90,9 @@ export function WheelSteps({ life }: { life: WheelLife }) {
     </Stack>
   );
 }
+
+const isOutOfUse = ({ wheel }: WheelLife) =>
+  wheel.data.state === 'set aside' || wheel.data.state === 'scrapped';
 
 const isForm = (kind: WheelLife['steps'][number]['kind']): kind is FormKind =>
   kind !== 'received' && kind !== 'set aside';

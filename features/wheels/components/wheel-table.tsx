@@ -18,7 +18,7 @@ import { formatQuantity } from '@/shared/units/format';
 
 import { leftWords } from '../left';
 import { sizeWords } from '../sizes';
-import { standingOf } from '../standing';
+import { standingOn } from '../standing';
 import { StandingWords } from './standing-words';
 
 interface WheelRowsProps {
@@ -42,9 +42,8 @@ function useStanding(today: string) {
   const { shop } = useShop();
   const { data: grinders } = useQuery(machineQueries.grinders(shop.id));
   return ({ data, life }: Wheel) => {
-    const standing = standingOf(data, today);
     const on = grinders?.items.find(({ id }) => id === life.onSpindle?.grinderId);
-    return on ? { ...standing, words: `${standing.words}, ${on.name}` } : standing;
+    return standingOn(data, today, on?.name ?? null);
   };
 }
 
@@ -57,7 +56,7 @@ function SetAsideSign({
   return (
     <IconButton
       icon="setAside"
-      color="stop"
+      color="textSoft"
       label={`Set ${wheel.tag} aside`}
       onPress={() => onSetAside(wheel)}
     />
