@@ -66,7 +66,7 @@ export const wheelEntries = [
     [
       '2026-02-09',
       'apprentice',
-      { kind: 'set aside', reason: 'Rang dull after it was dropped on the bench.' },
+      { kind: 'set aside', reason: 'Rang dull after it was dropped on the bench' },
     ],
   ),
   ...life(

@@ -134,6 +134,9 @@ interface StepSubject {
 
 type Step = RecordEntryRequest['step'];
 
+/** A reason is set into sentences, which bring their own full stop. */
+export const reasonOf = (text: string) => text.trim().replace(/\s*\.$/, '');
+
 /**
  * @throws {RangeError} where something is missing; the schema refuses that before.
  */
@@ -143,7 +146,7 @@ export function toStep(
   { entryId, spindles }: StepSubject,
 ): Step {
   const { look, ring, quillId } = values;
-  const reason = values.reason.trim();
+  const reason = reasonOf(values.reason);
   switch (kind) {
     case 'inspected':
       return { kind, look: known(look), diameterMm: values.diameterMm.si };

@@ -22,6 +22,8 @@ const RACK = `/shops/${SHOP_ID}/wheels`;
 const backTo = { pathname: '/shops/[shopId]/wheels', params: { shopId: SHOP_ID } } as const;
 
 const field = (name: string) => screen.getByLabelText(name, { selector: 'input' });
+
+const SAVED = `${RACK}/0190a000-0000-7000-8000-0000000000a1`;
 const save = () => screen.getByRole('button', { name: 'Save the wheel' });
 
 const wheel: Wheel = {
@@ -105,17 +107,51 @@ it('shows the limit while the wheel is typed in, from the diameter when new', ()
   fillNew();
   // 60 000 x 25 / (pi x 31.75) = 15 038.7, rounded down (29 CFR 1910.215(d)(1)).
   expect(screen.getByRole('button', { name: /^Limit: 15\s038/ })).toBeInTheDocument();
+  fireEvent.click(screen.getByRole('button', { name: /^When it came/ }));
   fill('Diameter now', '20');
   expect(screen.getByRole('button', { name: /^Limit: 15\s038/ })).toBeInTheDocument();
 });
 
-it('stores a new wheel once, in SI and as it was typed, and leads to the rack', async () => {
+it('reads all three sizes of a label from the first field, pasted or left', () => {
+  serve(storing);
+  showInShop(<WheelForm wheel={null} backTo={backTo} />);
+  const sizes = () =>
+    ['Diameter when new', 'Width', 'Hole'].map((name) => (field(name) as HTMLInputElement).value);
+  fill('Diameter when new', '25 x 20 × 8');
+  expect(sizes()).toEqual(['25', '20', '8']);
+  // Letter by letter nothing is read before the field is left: the hole may be 1 or 10.
+  for (const typed of ['32 x 16 x', '32 x 16 x 1', '32 x 16 x 10'])
+    fill('Diameter when new', typed);
+  expect(sizes()).toEqual(['32 x 16 x 10', '20', '8']);
+  fireEvent.blur(field('Diameter when new'));
+  expect(sizes()).toEqual(['32', '16', '10']);
+  fill('Diameter when new', '1 x 3/4 x 3/8 in');
+  expect(sizes()).toEqual(['1 in', '3/4 in', '3/8 in']);
+});
+
+it('folds what few wheels need, and opens a fold that holds a mistake', async () => {
+  serve(storing);
+  const user = userEvent.setup();
+  showInShop(<WheelForm wheel={null} backTo={backTo} />);
+  fillNew();
+  expect(screen.queryByLabelText('Smallest usable diameter')).toBeNull();
+  await user.click(screen.getByRole('button', { name: /^Smallest usable diameter/ }));
+  fill('Smallest usable diameter', '9');
+  await user.click(screen.getByRole('button', { name: /^Smallest usable diameter/ }));
+  await user.click(save());
+  expect(
+    await screen.findAllByText('Smallest usable diameter is above the hole, 10\u00a0mm.'),
+  ).not.toHaveLength(0);
+  expect(field('Smallest usable diameter')).toHaveValue('9');
+});
+
+it('stores a new wheel once, in SI and as it was typed, and leads to its page', async () => {
   const log = serve(storing);
   const user = userEvent.setup();
   showInShop(<WheelForm wheel={null} backTo={backTo} />);
   fillNew();
   await user.click(save());
-  await waitFor(() => expect(visited()).toEqual([RACK]));
+  await waitFor(() => expect(visited()).toEqual([SAVED]));
   expect(writes(log)).toEqual([
     {
       method: 'POST',
@@ -148,7 +184,7 @@ it("puts the server's error on its field, and asks again once it is changed", as
   taken = false;
   fill('Tag', 'R-15b');
   await user.click(save());
-  await waitFor(() => expect(visited()).toEqual([RACK]));
+  await waitFor(() => expect(visited()).toEqual([SAVED]));
   const [first, second] = writes(log).map(({ body }) => (body as { id: string }).id);
   expect(second).toBe(first);
 });
@@ -196,7 +232,7 @@ it('shows both versions after somebody else saved, and saves what is chosen', as
   expect(screen.getByRole('radio', { name: /A 46 K 8 V/ })).toBeChecked();
   expect(screen.getByRole('radio', { name: /^14\smm/ })).toBeChecked();
   await user.click(screen.getByRole('button', { name: 'Save what is chosen' }));
-  await waitFor(() => expect(visited()).toEqual([RACK]));
+  await waitFor(() => expect(visited()).toEqual([SAVED]));
   expect(writes(log).at(-1)?.body).toMatchObject({
     version: 5,
     data: { marking: 'A 46 K 8 V', diameterNewMm: 32, widthMm: 14 },
@@ -213,7 +249,7 @@ it('finds what an unanswered attempt stored, instead of making a second wheel', 
   fillNew();
   await user.click(save());
   await user.click(await screen.findByRole('button', { name: 'Save what is chosen' }));
-  await waitFor(() => expect(visited()).toEqual([RACK]));
+  await waitFor(() => expect(visited()).toEqual([SAVED]));
   expect(writes(log).map(({ method }) => method)).toEqual(['POST', 'PUT']);
   expect(writes(log).at(-1)?.body).toMatchObject({ version: 4, tag: 'R-15' });
 });
@@ -226,7 +262,7 @@ it('changes the units of what is shown and nothing of what is stored', async () 
   expect(Number((field('Hole') as HTMLInputElement).value)).toBeCloseTo(10 / 25.4, 8);
   expect(field('Marked speed')).toHaveValue('25');
   await user.click(save());
-  await waitFor(() => expect(visited()).toEqual([RACK]));
+  await waitFor(() => expect(visited()).toEqual([SAVED]));
   const sent = (writes(log).at(-1)?.body as Wheel).data;
   expect(wheel.data).toMatchObject(sent);
   expect(sent).toMatchObject({ holeMm: 10, shape: '1', smallestUsableMm: 20, place: 'Peg 4' });

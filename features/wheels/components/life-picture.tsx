@@ -89,7 +89,7 @@ export function LifePicture({ life, entries }: LifePictureProps) {
                   y={top}
                   width={lost}
                   height={BAR.height}
-                  fill={colors.outline}
+                  fill={colors.metalEdge}
                   stroke={colors.page}
                   strokeWidth={0.5}
                 />
@@ -149,7 +149,7 @@ export function LifePicture({ life, entries }: LifePictureProps) {
   );
 }
 
-/** "2 dressings took 0.4 mm off, drawn dark; use and wear 17.1 mm" */
+/** "2 dressings took 0.4 mm off, drawn as dark strips; use and wear 17.1 mm" */
 function lossWords(
   losses: readonly Loss[],
   dressings: number,
@@ -162,8 +162,9 @@ function lossWords(
   const rest = worn > 0 ? `; use and wear took ${size(worn)}` : '';
   if (dressings === 0) return `Not dressed yet${rest}`;
   const count = dressings === 1 ? '1 dressing' : `${dressings} dressings`;
-  if (dressed.length < dressings) return `${count}, the last ${dressed.length} of them drawn dark`;
-  return `${count} took ${size(sum(dressed))} off, drawn dark${rest}`;
+  if (dressed.length < dressings)
+    return `${count}, the last ${dressed.length} of them drawn as dark strips`;
+  return `${count} took ${size(sum(dressed))} off, drawn as dark strips${rest}`;
 }
 
 function Sizes({ marks, life, entries }: LifePictureProps & { marks: readonly LifeMark[] }) {

@@ -17,6 +17,7 @@ import { TEXT_LIMITS } from '@/shared/domain/limits';
 
 import { useRecordEntry, wheelQueries } from '../queries';
 import { stoppedWords } from '../setup-words';
+import { reasonOf } from '../step-form';
 
 /** What wheels are most often set aside for; each is one press. */
 const COMMON_REASONS = [
@@ -60,7 +61,7 @@ export function SetAsideSheet({ wheel, onClose }: { wheel: Wheel; onClose: () =>
   const [typed, setTyped] = useState('');
   const [error, setError] = useState<string>();
   const setAside = (reason: string) => {
-    if (!reason.trim()) {
+    if (!reasonOf(reason)) {
       setError(MISSING);
       return;
     }
@@ -70,7 +71,7 @@ export function SetAsideSheet({ wheel, onClose }: { wheel: Wheel; onClose: () =>
       version: null,
       happenedOn: shopDay(shop.timeZone),
       note: null,
-      step: { kind: 'set aside', reason: reason.trim() },
+      step: { kind: 'set aside', reason: reasonOf(reason) },
     });
   };
   if (save.isSuccess) return <Done wheel={save.data.wheel} onClose={onClose} />;
@@ -126,7 +127,7 @@ export function SetAsideSheet({ wheel, onClose }: { wheel: Wheel; onClose: () =>
 function Done({ wheel, onClose }: { wheel: Wheel; onClose: () => void }) {
   const { shop } = useShop();
   const { data } = useQuery(wheelQueries.life(shop.id, wheel.id));
-  const reason = (wheel.data.setAsideReason ?? '').replace(/\.$/, '');
+  const reason = wheel.data.setAsideReason ?? '';
   const setups = data?.wheel.data.state === 'set aside' ? data.setups : null;
   return (
     <Sheet
