@@ -7,7 +7,6 @@ import {
   type Part,
   type TypedEntry,
 } from '@/features/records';
-import { SHAPE_WORDS } from '@/shared/domain/wheels';
 import type { UnitName } from '@/shared/units/unit';
 import { formatQuantity } from '@/shared/units/format';
 
@@ -41,23 +40,6 @@ function mandrelWords({ mounted, isMounted }: WheelValues, values: WheelValues):
     mounted.threaded ? 'threaded' : 'plain',
     `maker's rpm ${quantity(makerMaximumRpm.unit)(mounted.makerMaximumRpm, values)}`,
   ].join(', ');
-}
-
-/** What is kept of a wheel beside the form's own fields, in one line. */
-function unaskedWords({ unasked, units }: WheelValues): string {
-  const { shape, smallestUsableMm, madeOn, place, notes } = unasked;
-  const size = (value: number) => formatQuantity({ value, unit: 'mm' }, units);
-  return (
-    [
-      shape && `type ${shape}, ${SHAPE_WORDS[shape]}`,
-      smallestUsableMm && `usable down to ${size(smallestUsableMm)}`,
-      madeOn && `made ${dayWords(madeOn)}`,
-      place,
-      notes,
-    ]
-      .filter(Boolean)
-      .join('; ') || NOT_GIVEN
-  );
 }
 
 /** Everything a wheel's form holds, fact by fact. */
@@ -107,12 +89,6 @@ export const wheelParts: Part<WheelValues>[] = [
   date('expiresOn', 'Expires on'),
   keyPart('place', 'Place', (place) => place.trim() || NOT_GIVEN),
   keyPart('notes', 'Notes', (notes) => notes.trim() || NOT_GIVEN),
-  {
-    key: 'unasked',
-    label: 'Type, place and notes',
-    words: unaskedWords,
-    take: (into, { unasked }) => ({ ...into, unasked }),
-  },
   {
     key: 'state',
     label: 'State',
