@@ -128,6 +128,8 @@ it('follows one wheel from its marking to the setup that it stops, on a phone', 
 
   await page.goto(at);
   await page.getByText('set aside: Dropped or knocked').first().waitFor();
+  await page.getByText('The wheel is still on a spindle. Take it off first.').waitFor();
+  await record(page, 'Take off', nothing);
   await page.getByText('Only a lead returns a wheel from set aside.').waitFor();
   expect(await page.getByRole('list', { name: 'Setups that use it' }).textContent()).toContain(
     'Stop',
@@ -154,3 +156,25 @@ async function setupWith(page: Page, shop: string, tag: string) {
   await planner.saved();
   return planner;
 }
+
+it('narrows the rack in its address and reads a wheel beside it, on a wide screen', async () => {
+  const { page, context, complaints, shop } = await personAt('lead', 'wide');
+  await page.goto(`${shop}/wheels`);
+  await button(page, 'Usable now').click();
+  await button(page, 'Diameter now').click();
+  await sheetOf(page).getByRole('textbox', { name: 'At most' }).fill('1 1/4 in');
+  expect(await inspect(page, 'rack-filter-wide')).toEqual([]);
+  await button(page, 'Show the wheels').click();
+  await page.waitForURL(/usable=yes.*diameterToMm=31\.75/);
+  await page.getByRole('link', { name: 'W06' }).click();
+  const beside = page.getByRole('region', { name: 'The chosen wheel' });
+  await beside.getByRole('heading', { name: 'A 60 K 6 V' }).waitFor();
+  await page.reload();
+  await beside.getByRole('heading', { name: 'A 60 K 6 V' }).waitFor();
+  expect(await page.getByRole('link', { name: 'W07' }).count()).toBe(0);
+  expect(await inspect(page, 'rack-wide')).toEqual([]);
+  await button(page, /^Remove the filter up to 31\.75/).click();
+  await page.getByRole('link', { name: 'W07' }).waitFor();
+  expect(complaints).toEqual([]);
+  await context.close();
+});

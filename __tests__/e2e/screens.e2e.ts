@@ -26,6 +26,8 @@ const SCREENS: Record<string, string> = {
   board: '/board',
   shop: '/shop',
   machines: '/machines',
+  appointments: '/appointments',
+  'rack-narrowed': '/wheels?usable=yes&diameterToMm=60&sort=largest',
 };
 
 const FORMS: Record<string, string> = {
@@ -70,8 +72,15 @@ describe.each(SIZES)('on a %s screen', (size) => {
       async (path) => (await (await fetch(`/api${path}/setups`)).json()).items,
       shop,
     );
+    const wheels = await page.evaluate(
+      async (path) => (await (await fetch(`/api${path}/wheels?limit=4`)).json()).items,
+      shop,
+    );
     const screens = {
       ...SCREENS,
+      ...Object.fromEntries(
+        wheels.map(({ id, tag }: { id: string; tag: string }) => [`wheel-${tag}`, `/wheels/${id}`]),
+      ),
       ...(role === 'apprentice' ? {} : FORMS),
       ...Object.fromEntries(
         setups.map(({ id, operation }: { id: string; operation: string }) => [

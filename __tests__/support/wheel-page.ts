@@ -6,6 +6,7 @@ import { PERSON_ID, stored } from './in-shop';
 
 export const WHEEL_ID = '0190a000-0000-7000-8000-0000000000a1';
 export const QUILL_ID = '0190a000-0000-7000-8000-0000000000c1';
+const STEP_ID = '0190a000-0000-7000-8000-0000000000e1';
 const GRINDER_ID = '0190a000-0000-7000-8000-0000000000b1';
 export const OTHER_PERSON = '0190a000-0000-7000-8000-000000000009';
 
@@ -104,10 +105,16 @@ export const wheelLife = (more: Partial<WheelLife> = {}): WheelLife => ({
       limitRpm: 14_000,
       limitOf: 'marked rpm',
       steps: [
-        { id: 'a', name: 'A', rpm: 6000, wheelSpeedMPerS: 9.7, allowed: true },
-        { id: 'b', name: 'B', rpm: 15_438, wheelSpeedMPerS: 25.1, allowed: false },
+        { id: STEP_ID, name: 'A', rpm: 6000, wheelSpeedMPerS: 9.7, allowed: true },
+        {
+          id: '0190a000-0000-7000-8000-0000000000e2',
+          name: 'B',
+          rpm: 15_438,
+          wheelSpeedMPerS: 25.1,
+          allowed: false,
+        },
       ],
-      suggestedStepId: 'a',
+      suggestedStepId: STEP_ID,
     },
     {
       grinderId: GRINDER_ID,

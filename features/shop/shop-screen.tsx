@@ -30,14 +30,14 @@ export function ShopScreen() {
                 href={{ pathname: '/shops/[shopId]/machines', params: { shopId: shop.id } }}
               />
               <ListRow
-                label="Appointed people"
-                detail="Who may mount, dress and trial-run a wheel, and sign for others"
-                href={{ pathname: '/shops/[shopId]/appointments', params: { shopId: shop.id } }}
-              />
-              <ListRow
                 label="Where the numbers come from"
                 detail="The books, standards and laws behind the rules, and what is checked against them"
                 href="/numbers"
+              />
+              <ListRow
+                label="Appointed people"
+                detail="Who may mount, dress and trial-run a wheel, and sign for others"
+                href={{ pathname: '/shops/[shopId]/appointments', params: { shopId: shop.id } }}
               />
             </List>
             <Stack gap={2}>

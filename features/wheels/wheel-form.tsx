@@ -65,12 +65,13 @@ export function WheelForm({ wheel, backTo }: WheelFormProps) {
         onSaved={(saved) => router.dismissTo(wheelPlace(shop.id, saved.id, wide))}
         pane={(values) => <Plate values={values} />}
       >
-        {() => (
+        {(values) => (
           <>
             <MarkingFields />
             <SizeFields />
             <SpeedFields />
             <FurtherFields isNew={wheel === null} />
+            {wide ? null : <MayRun values={values} />}
           </>
         )}
       </RecordForm>
@@ -85,9 +86,8 @@ function storedWheel(current: unknown, units: UnitSystem) {
 
 /** The wheel's own label as it comes out of what is typed, and where such a wheel may run. */
 function Plate({ values }: { values: WheelValues }) {
-  const { shop } = useShop();
+  const { wide } = useLayout();
   const plate = plateOf(values);
-  const whole = wheelDataOf(values);
   const { diameterNewMm } = plate;
   return (
     <Stack>
@@ -101,7 +101,14 @@ function Plate({ values }: { values: WheelValues }) {
       {diameterNewMm === null ? null : (
         <FindingList findings={markingFindings({ ...plate, diameterNewMm }, true)} />
       )}
-      {whole === null ? null : <WhereItMayRun wheel={whole} today={shopDay(shop.timeZone)} />}
+      {wide ? <MayRun values={values} /> : null}
     </Stack>
   );
+}
+
+/** On a phone it stands under the fields: over them it would push them away from the hands that type. */
+function MayRun({ values }: { values: WheelValues }) {
+  const { shop } = useShop();
+  const whole = wheelDataOf(values);
+  return whole === null ? null : <WhereItMayRun wheel={whole} today={shopDay(shop.timeZone)} />;
 }

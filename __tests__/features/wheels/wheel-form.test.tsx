@@ -112,39 +112,6 @@ it('shows the limit while the wheel is typed in, from the diameter when new', ()
   expect(screen.getByRole('button', { name: /^Limit: 15\s038/ })).toBeInTheDocument();
 });
 
-it('reads all three sizes of a label from the first field, pasted or left', () => {
-  serve(storing);
-  showInShop(<WheelForm wheel={null} backTo={backTo} />);
-  const sizes = () =>
-    ['Diameter when new', 'Width', 'Hole'].map((name) => (field(name) as HTMLInputElement).value);
-  fill('Diameter when new', '25 x 20 × 8');
-  expect(sizes()).toEqual(['25', '20', '8']);
-  // Letter by letter nothing is read before the field is left: the hole may be 1 or 10.
-  for (const typed of ['32 x 16 x', '32 x 16 x 1', '32 x 16 x 10'])
-    fill('Diameter when new', typed);
-  expect(sizes()).toEqual(['32 x 16 x 10', '20', '8']);
-  fireEvent.blur(field('Diameter when new'));
-  expect(sizes()).toEqual(['32', '16', '10']);
-  fill('Diameter when new', '1 x 3/4 x 3/8 in');
-  expect(sizes()).toEqual(['1 in', '3/4 in', '3/8 in']);
-});
-
-it('folds what few wheels need, and opens a fold that holds a mistake', async () => {
-  serve(storing);
-  const user = userEvent.setup();
-  showInShop(<WheelForm wheel={null} backTo={backTo} />);
-  fillNew();
-  expect(screen.queryByLabelText('Smallest usable diameter')).toBeNull();
-  await user.click(screen.getByRole('button', { name: /^Smallest usable diameter/ }));
-  fill('Smallest usable diameter', '9');
-  await user.click(screen.getByRole('button', { name: /^Smallest usable diameter/ }));
-  await user.click(save());
-  expect(
-    await screen.findAllByText('Smallest usable diameter is above the hole, 10\u00a0mm.'),
-  ).not.toHaveLength(0);
-  expect(field('Smallest usable diameter')).toHaveValue('9');
-});
-
 it('stores a new wheel once, in SI and as it was typed, and leads to its page', async () => {
   const log = serve(storing);
   const user = userEvent.setup();

@@ -26,6 +26,11 @@ type Opened = FilterGroup | 'sort' | 'all' | null;
 const cleared = (groups: readonly FilterGroup[]) =>
   Object.fromEntries(groups.flatMap((group) => GROUP_KEYS[group]).map((key) => [key, '']));
 
+function titleOf(opened: Opened): string {
+  if (opened === 'sort') return 'Sort';
+  return opened === null || opened === 'all' ? 'Filters' : GROUP_LABELS[opened];
+}
+
 /** What narrows and orders the rack: chips on a wide screen, one sheet on a phone. It stands in the address. */
 export function RackFilters({ search, today }: { search: WheelSearch; today: string }) {
   const { units } = useShop();
@@ -43,7 +48,7 @@ export function RackFilters({ search, today }: { search: WheelSearch; today: str
   const sorted = SORTS.find(({ value }) => value === address.sort) ?? SORTS[0];
   const shown = wide ? FILTER_GROUPS : active;
   const groups = opened === 'all' ? FILTER_GROUPS : FILTER_GROUPS.filter((one) => one === opened);
-  const title = opened === 'all' ? 'Filters' : opened === 'sort' ? 'Sort' : 'Filter';
+  const title = titleOf(opened);
   return (
     <>
       <Row gap={2} align="center">

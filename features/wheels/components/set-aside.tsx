@@ -31,7 +31,7 @@ const COMMON_REASONS = [
 const MISSING = 'Enter why: what was seen or heard, in a few words.';
 
 /** Anybody may set a wheel aside, in two presses; it then stops every setup that uses it. */
-export function SetAside({ wheel, wide = false }: { wheel: Wheel; wide?: boolean }) {
+export function SetAside({ wheel }: { wheel: Wheel }) {
   const { may } = useShop();
   const [open, setOpen] = useState(false);
   const { state } = wheel.data;
@@ -42,7 +42,6 @@ export function SetAside({ wheel, wide = false }: { wheel: Wheel; wide?: boolean
       {isOut ? null : (
         <Button
           kind="danger"
-          wide={wide}
           label="Set aside"
           spoken={`Set ${wheel.tag} aside`}
           onPress={() => setOpen(true)}

@@ -14,7 +14,7 @@ import { entryWords, SIGNER_WORDS } from '../entry-words';
 import { likelyStep, refusedSteps } from '../next-step';
 import type { FormKind } from '../step-form';
 import { STEP_LABELS } from '../words';
-import { SetAside } from './set-aside';
+import { SetAsideSheet } from './set-aside';
 import { StepSheet } from './step-sheet';
 
 interface Opened {
@@ -25,8 +25,9 @@ interface Opened {
 
 /** What may be recorded of the wheel now, what may not and why, and what waits for a signature. */
 export function WheelSteps({ life }: { life: WheelLife }) {
-  const { shop } = useShop();
+  const { shop, may } = useShop();
   const [opened, setOpened] = useState<Opened | null>(null);
+  const [asking, setAsking] = useState(false);
   const [recorded, setRecorded] = useState<RecordedEntry | null>(null);
   const open = (kind: FormKind, needs: Signer | null, entryId: string | null = null) => {
     setRecorded(null);
@@ -58,9 +59,15 @@ export function WheelSteps({ life }: { life: WheelLife }) {
             </Cell>
           ) : null,
         )}
-        {isOutOfUse(life) ? null : (
+        {isOutOfUse(life) || !may('wheel:set-aside') ? null : (
           <Cell least={136}>
-            <SetAside wheel={life.wheel} wide />
+            <Button
+              kind="danger"
+              wide
+              label={STEP_LABELS['set aside']}
+              spoken={`Set ${life.wheel.tag} aside`}
+              onPress={() => setAsking(true)}
+            />
           </Cell>
         )}
       </Row>
@@ -75,6 +82,7 @@ export function WheelSteps({ life }: { life: WheelLife }) {
           ))}
         </Card>
       ) : null}
+      {asking ? <SetAsideSheet wheel={life.wheel} onClose={() => setAsking(false)} /> : null}
       {opened ? (
         <StepSheet
           key={`${opened.kind}:${opened.entryId ?? ''}`}
