@@ -11,7 +11,7 @@ export interface WorkStep {
   figures: Record<string, Quantity>;
 }
 
-type Words = string | ((input: PlanInput) => string);
+type Words = string | ((input: PlanInput, plan: Plan) => string);
 
 interface Step {
   id: string;
@@ -148,7 +148,10 @@ const STEPS: readonly Step[] = [
   {
     id: 'finish',
     title: 'Finish',
-    words: '{passes} of {infeed}, at {rate}, then {sparks} without infeed.',
+    words: (_, plan) =>
+      count(plan, 'finish spark-out') === 0
+        ? '{passes} of {infeed}, at {rate}.'
+        : '{passes} of {infeed}, at {rate}, then {sparks} without infeed.',
     figures: (plan) => ({
       passes: count(plan, 'finish'),
       infeed: plan.infeed.finish,
@@ -178,7 +181,7 @@ export function orderOfWork(plan: Plan, input: PlanInput): WorkStep[] {
   return STEPS.filter(({ when }) => when?.(input) ?? true).map(({ id, title, words, figures }) => ({
     id,
     title,
-    words: typeof words === 'string' ? words : words(input),
+    words: typeof words === 'string' ? words : words(input, plan),
     figures: quantities(figures(plan, input)),
   }));
 }

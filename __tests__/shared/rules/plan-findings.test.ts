@@ -223,6 +223,15 @@ describe('words of findings', () => {
 });
 
 describe('the order of the work', () => {
+  it('speaks of spark-out at the end only where there is one', () => {
+    const words = (sparkOutPasses: number) => {
+      const input = withCut(outsideInput(), { sparkOutPasses });
+      return orderOfWork(planSetup(input), input).find(({ id }) => id === 'finish')?.words;
+    };
+    expect(words(0)).not.toContain('without infeed');
+    expect(words(2)).toContain('{sparks} without infeed');
+  });
+
   it.each(OPERATIONS)(
     'runs from survey to the last measurement, every figure in place: %s',
     (op) => {
